@@ -1,5 +1,6 @@
 package rankfall.locus;
 
+import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedMap;
@@ -38,7 +39,7 @@ public record BranchAlgebra(
       Chain chain, StructureConstants<Polynomial> constants) {
     List<Polynomial> all = new ArrayList<>();
     constants.brackets().values().forEach(c -> all.addAll(c.values()));
-    List<Polynomial> normal = all.isEmpty() ? all : chain.normal(all).entries();
+    List<Polynomial> normal = withoutIntegerContent(chain.reduced(all));
     SortedMap<Pair, SortedMap<Integer, Polynomial>> out = new TreeMap<>();
     int at = 0;
     for (var e : constants.brackets().entrySet()) {
@@ -56,6 +57,17 @@ public record BranchAlgebra(
         chain, n, out, chain.one(), java.util.Collections.nCopies(n, chain.one()));
   }
 
+  /** A common factor that is not a number may vanish at special points, so it stays. */
+  private static List<Polynomial> withoutIntegerContent(List<Polynomial> all) {
+    BigInteger g = all.stream().map(Polynomial::content).reduce(BigInteger.ZERO, BigInteger::gcd);
+    if (g.bitLength() < 2) {
+      return all;
+    }
+    return all.stream()
+        .map(p -> p.over(Polynomial.constant(p.variables(), g)))
+        .toList();
+  }
+
   private static List<List<Polynomial>> reducedMatrix(
       Chain chain, List<List<Polynomial>> matrix) {
     List<Polynomial> all = new ArrayList<>();
@@ -63,7 +75,7 @@ public record BranchAlgebra(
     if (all.isEmpty()) {
       return matrix;
     }
-    List<Polynomial> normal = chain.normal(all).entries();
+    List<Polynomial> normal = withoutIntegerContent(chain.reduced(all));
     List<List<Polynomial>> out = new ArrayList<>();
     for (int r = 0; r < matrix.size(); r++) {
       out.add(normal.subList(r * matrix.size(), (r + 1) * matrix.size()));
