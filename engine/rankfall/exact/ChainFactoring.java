@@ -6,6 +6,8 @@ import java.util.Comparator;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Set;
+import org.apache.commons.numbers.fraction.BigFraction;
+import rankfall.exact.Factorization.Factor;
 
 /** Irreducible factors over the field of a chain. */
 public final class ChainFactoring {
@@ -47,18 +49,77 @@ public final class ChainFactoring {
    */
   public static List<Polynomial> irreducible(Chain chain, Polynomial f) {
     List<Chain.Rule> numbers = numbers(chain);
-    if (numbers.isEmpty()) {
-      return Factoring.irreducible(f);
-    }
-    Chain field = new Chain(chain.variables(), numbers);
-    Polynomial g = field.reduced(f);
+    return numbers.isEmpty()
+        ? Factoring.irreducible(f)
+        : factors(chain, numbers, f).stream().map(Factor::base).toList();
+  }
+
+  private static List<Factor> factors(Chain chain, List<Chain.Rule> numbers, Polynomial f) {
+    Polynomial g = new Chain(chain.variables(), numbers).reduced(f);
     if (g.isZero()) {
       throw new ArithmeticException("0 has no factorization");
     }
-    List<Polynomial> out =
-        new ArrayList<>(new NumberFieldFactoring(chain.variables(), numbers).irreducible(g));
-    out.sort(BY_SIZE);
+    List<Factor> out =
+        new ArrayList<>(new NumberFieldFactoring(chain.variables(), numbers).factors(g));
+    out.sort(Comparator.comparing(Factor::base, BY_SIZE));
     return out;
+  }
+
+  /**
+   * The factorization over the algebraic numbers of a chain.
+   *
+   * @param chain only its rules for algebraic numbers are used
+   * @param f a polynomial that is not 0 over these numbers, in normal form unless all rules are monic
+   * @return its bases have a rational leading coefficient; an algebraic number that is left over stands
+   *     among the factors as one more base
+   */
+  public static Factorization factorization(Chain chain, Polynomial f) {
+    List<Chain.Rule> numbers = numbers(chain);
+    if (numbers.isEmpty()) {
+      return Factoring.overRationals(f);
+    }
+    Polynomial g = new Chain(chain.variables(), numbers).reduced(f);
+    if (!g.equals(f) && !isMonic(numbers)) {
+      throw new ArithmeticException("not in normal form: " + f);
+    }
+    List<Factor> out = factors(chain, numbers, g);
+    BigFraction unit = BigFraction.ONE;
+    for (Factor x : out) {
+      unit = unit.divide(BigFraction.of(x.base().leadingCoefficient()).pow(x.multiplicity()));
+    }
+    Polynomial leading = leading(g);
+    BigInteger content = leading.content();
+    Polynomial number = leading.over(Polynomial.constant(g.variables(), content));
+    unit = unit.multiply(content);
+    if (number.isConstant()) {
+      unit = unit.multiply(number.constantValue());
+    } else {
+      out.add(0, new Factor(number, 1));
+    }
+    return new Factorization(unit, out);
+  }
+
+  private static boolean isMonic(List<Chain.Rule> rules) {
+    return rules.stream().allMatch(r -> r.initial().isOne());
+  }
+
+  /** The coefficient, an algebraic number, of the leading monomial in the other variables. */
+  private static Polynomial leading(Polynomial g) {
+    int own = g.variables().indeterminates();
+    List<Term> terms = new ArrayList<>(g.terms());
+    terms.sort(PolynomialText.order(g.variables()));
+    List<Integer> top = terms.get(0).exponents().subList(0, own);
+    List<Term> out = new ArrayList<>();
+    for (Term t : terms) {
+      if (t.exponents().subList(0, own).equals(top)) {
+        List<Integer> e = new ArrayList<>(t.exponents());
+        for (int v = 0; v < own; v++) {
+          e.set(v, 0);
+        }
+        out.add(new Term(t.coefficient(), e));
+      }
+    }
+    return Polynomial.of(g.variables(), out);
   }
 
   /**

@@ -12,6 +12,7 @@ import cc.redberry.rings.poly.multivar.MultivariatePolynomial;
 import cc.redberry.rings.poly.univar.UnivariatePolynomial;
 import java.util.ArrayList;
 import java.util.List;
+import rankfall.exact.Factorization.Factor;
 
 /**
  * Irreducible factors over a field of algebraic numbers that is given by a tower of rules.
@@ -96,13 +97,13 @@ final class NumberFieldFactoring {
   }
 
   /**
-   * The irreducible factors that are not constants of the field, without multiplicities.
+   * The irreducible factors that are not constants of the field, with multiplicities.
    *
    * @param f not 0 in the field, reduced
    * @return each with its leading coefficient (graded-lexicographic in the other variables) made
    *     rational and its content removed
    */
-  List<Polynomial> irreducible(Polynomial f) {
+  List<Factor> factors(Polynomial f) {
     var lifted = lifted(f);
     if (lifted.isConstant()) {
       return List.of();
@@ -118,7 +119,7 @@ final class NumberFieldFactoring {
     throw new ArithmeticException("no factorization found of " + f + ": " + last);
   }
 
-  private List<Polynomial> checked(
+  private List<Factor> checked(
       MultivariatePolynomial<UnivariatePolynomial<Rational<BigInteger>>> f,
       PolynomialFactorDecomposition<
               MultivariatePolynomial<UnivariatePolynomial<Rational<BigInteger>>>>
@@ -126,13 +127,25 @@ final class NumberFieldFactoring {
     if (!d.multiply().equals(f)) {
       throw new ArithmeticException("factors do not multiply back");
     }
-    List<Polynomial> out = new ArrayList<>();
+    List<Factor> out = new ArrayList<>();
     for (int k = 0; k < d.size(); k++) {
       if (!d.get(k).isConstant()) {
-        out.add(lowered(d.get(k).clone().monic()));
+        addPowers(out, lowered(d.get(k).clone().monic()), d.getExponent(k));
       }
     }
     return out;
+  }
+
+  /** The library leaves a power of one variable as it is. */
+  private static void addPowers(List<Factor> out, Polynomial base, int exponent) {
+    if (base.termCount() == 1) {
+      for (int v : base.support()) {
+        out.add(
+            new Factor(Polynomial.variable(base.variables(), v), exponent * base.degree(v)));
+      }
+    } else {
+      out.add(new Factor(base, exponent));
+    }
   }
 
   /** f with coefficients in the simple extension. */
