@@ -6,6 +6,9 @@ import java.nio.file.Path;
 import java.util.List;
 import rankfall.Analysis;
 import rankfall.Budget;
+import rankfall.report.ReportWriter;
+import rankfall.report.SummaryRow;
+import rankfall.spec.Diagnostic;
 import rankfall.spec.Spec;
 import rankfall.spec.SpecReader;
 import rankfall.spec.SpecResult;
@@ -29,18 +32,28 @@ final class Program implements FrontDoors {
   }
 
   @Override
-  public void writeFamily(Path out, Analysis analysis) {
-    throw absent("report");
+  public void writeFamily(Path out, Analysis analysis) throws IOException {
+    ReportWriter.write(analysis, out);
   }
 
   @Override
-  public void writeSummary(Path out, List<Outcome> outcomes) {
-    throw absent("report");
+  public void writeSummary(Path out, List<Outcome> outcomes) throws IOException {
+    ReportWriter.writeSummary(outcomes.stream().map(Program::row).toList(), out);
   }
 
   @Override
   public PointAnswers points(Spec spec, PointForm form) {
     throw absent("Engine");
+  }
+
+  private static SummaryRow row(Outcome outcome) {
+    if (outcome instanceof Outcome.Analysed analysed) {
+      return SummaryRow.of(analysed.analysis());
+    }
+    SpecResult.Faulty faulty = ((Outcome.Refused) outcome).faulty();
+    Diagnostic first = faulty.diagnostics().get(0);
+    return SummaryRow.failed(
+        faulty.family().orElseGet(() -> first.place().file()), first.headline());
   }
 
   private static IllegalStateException absent(String room) {
