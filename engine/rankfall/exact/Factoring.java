@@ -66,11 +66,14 @@ public final class Factoring {
     if (f.isConstant()) {
       return new Factorization(BigFraction.of(f.constantValue()), List.of());
     }
-    RuntimeException last = null;
+    Throwable last = null;
     for (int k = 0; k < TRIES * Math.max(1, f.variables().count()); k++) {
       try {
         return checked(f, attempt(f, k / TRIES));
-      } catch (NullPointerException | ArithmeticException | ArrayIndexOutOfBoundsException e) {
+      } catch (NullPointerException
+          | ArithmeticException
+          | ArrayIndexOutOfBoundsException
+          | AssertionError e) {
         last = e;
       }
     }

@@ -108,11 +108,14 @@ final class NumberFieldFactoring {
     if (lifted.isConstant()) {
       return List.of();
     }
-    RuntimeException last = null;
+    Throwable last = null;
     for (int k = 0; k < TRIES; k++) {
       try {
         return checked(lifted, MultivariateFactorization.FactorInNumberField(lifted.clone()));
-      } catch (NullPointerException | ArithmeticException | ArrayIndexOutOfBoundsException e) {
+      } catch (NullPointerException
+          | ArithmeticException
+          | ArrayIndexOutOfBoundsException
+          | AssertionError e) {
         last = e;
       }
     }
