@@ -103,7 +103,7 @@ public final class Exploration {
   }
 
   private Leaf profiled(Piece piece, BranchAlgebra algebra, List<Task> cut) {
-    KnownNonZero domain = domain(piece);
+    KnownNonZero domain = KnownNonZero.on(piece);
     Echelon<Polynomial> derived = algebra.derivedRank(domain);
     Echelon<Polynomial> centre = algebra.centreRank(domain);
     Echelon<Polynomial> killing = algebra.killingRank(domain);
@@ -114,17 +114,6 @@ public final class Exploration {
     Profile profile =
         new Profile(n, killing.rank(), derived.rank(), n - centre.rank());
     return new Leaf.Defined(cut(piece, watched, List.of(algebra), cut), profile, algebra);
-  }
-
-  private static KnownNonZero domain(Piece piece) {
-    List<Polynomial> known = new ArrayList<>();
-    for (Polynomial p : piece.nonZero()) {
-      Polynomial r = piece.chain().reduced(p);
-      if (!r.isConstant()) {
-        known.add(r.equals(p) ? p : r.primitive());
-      }
-    }
-    return new KnownNonZero(piece.chain(), known);
   }
 
   /** Cuts off the zeros of polynomials, piece by piece, and returns what is left. */
