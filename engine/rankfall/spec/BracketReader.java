@@ -117,7 +117,8 @@ final class BracketReader {
   private void expect(List<Token> tokens, int index, String sign) {
     Token token = tokens.get(Math.min(index, tokens.size() - 1));
     if (!token.is(sign)) {
-      String found = token.kind() == Token.Kind.END ? "the line ends" : "'" + token.text() + "' stands";
+      String found =
+          token.kind() == Token.Kind.END ? "the line ends" : "'" + token.text() + "' stands";
       throw SpecFault.of(
           text.place(token.from(), token.to()), found + " where '" + sign + "' is due", EXAMPLE);
     }

@@ -9,7 +9,9 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Set;
 
-/** Reads {@code matrices}: rows of entries, or combinations of matrix units and earlier matrices. */
+/**
+ * Reads {@code matrices}: rows of entries, or combinations of matrix units and earlier matrices.
+ */
 final class MatrixReader {
   /** The largest order of matrices. */
   static final int MAX_ORDER = 1000;
@@ -38,8 +40,7 @@ final class MatrixReader {
    * @param given the key {@code order}, read already
    * @param orderText where it stands
    */
-  Spec.Matrices read(
-      OptionalInt given, Optional<ScalarText> orderText, Spec.Closure closure) {
+  Spec.Matrices read(OptionalInt given, Optional<ScalarText> orderText, Spec.Closure closure) {
     Map<String, Role> scalars = names.roles();
     Set<String> declared = declare();
     Order order = order(given, orderText);
@@ -49,10 +50,13 @@ final class MatrixReader {
     entries.forEach(e -> later.put(e.name(), Role.MATRIX));
     for (YamlNode.Entry entry : entries) {
       int before = matrices.size();
-      faults.gather(() -> body(entry, order, earlier, later).ifPresent(
-          body ->
-              matrices.add(
-                  new Spec.NamedMatrix(entry.name(), body, entry.key().place()))));
+      faults.gather(
+          () ->
+              body(entry, order, earlier, later)
+                  .ifPresent(
+                      body ->
+                          matrices.add(
+                              new Spec.NamedMatrix(entry.name(), body, entry.key().place()))));
       if (declared.contains(entry.name())) {
         earlier.put(entry.name(), Role.MATRIX);
         later.remove(entry.name());
@@ -160,8 +164,13 @@ final class MatrixReader {
       if (length != count) {
         throw SpecFault.of(
             row.place(),
-            name + " is not square: row " + (k + 1) + " has " + counted(length, "entry", "entries")
-                + ", there are " + counted(count, "row", "rows"),
+            name
+                + " is not square: row "
+                + (k + 1)
+                + " has "
+                + counted(length, "entry", "entries")
+                + ", there are "
+                + counted(count, "row", "rows"),
             "give every row as many entries as there are rows");
       }
     }

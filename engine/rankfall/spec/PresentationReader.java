@@ -63,7 +63,11 @@ final class PresentationReader {
     boolean brackets = fields.has("brackets");
     if (matrices && brackets) {
       faults.add(
-          fields.entry("brackets").or(() -> fields.entry("matrices")).map(e -> e.key().place()).orElse(start),
+          fields
+              .entry("brackets")
+              .or(() -> fields.entry("matrices"))
+              .map(e -> e.key().place())
+              .orElse(start),
           "both 'matrices' and 'brackets' stand here",
           "give one of them");
       return Optional.empty();
@@ -77,8 +81,7 @@ final class PresentationReader {
       misplaced("closure", "matrices");
       return brackets();
     }
-    faults.add(
-        start, "neither 'matrices' nor 'brackets' stands in the spec", "give one of them");
+    faults.add(start, "neither 'matrices' nor 'brackets' stands in the spec", "give one of them");
     return Optional.empty();
   }
 
@@ -104,8 +107,7 @@ final class PresentationReader {
             faults.gather(
                 () ->
                     order[0] =
-                        OptionalInt.of(
-                            Scalars.integer(text, "order", 1, MatrixReader.MAX_ORDER))));
+                        OptionalInt.of(Scalars.integer(text, "order", 1, MatrixReader.MAX_ORDER))));
     if (mapping.isEmpty()) {
       return Optional.empty();
     }
@@ -158,7 +160,9 @@ final class PresentationReader {
   private boolean tooMany(int count, Place place) {
     if (count > MAX_GENERATORS) {
       faults.add(
-          place, "the family has " + count + " generators", "at most " + MAX_GENERATORS + " are read");
+          place,
+          "the family has " + count + " generators",
+          "at most " + MAX_GENERATORS + " are read");
       return true;
     }
     return false;

@@ -98,7 +98,11 @@ record Scope(
     }
     String advice =
         Spelling.nearest(name, allowed)
-            .map(near -> "the nearest known name is '" + near + "'; a new one is listed under 'parameters'")
+            .map(
+                near ->
+                    "the nearest known name is '"
+                        + near
+                        + "'; a new one is listed under 'parameters'")
             .orElse("list it under 'parameters'");
     return SpecFault.of(place, cause, advice);
   }

@@ -77,8 +77,7 @@ final class YamlComposer {
       if (depth >= MAX_DEPTH) {
         throw SpecFault.of(place(event), "lists and mappings nested over " + MAX_DEPTH + " deep");
       }
-      counted =
-          event instanceof MappingStartEvent ? mapping(event, depth) : sequence(event, depth);
+      counted = event instanceof MappingStartEvent ? mapping(event, depth) : sequence(event, depth);
     }
     checkTag(event);
     Optional<Anchor> anchor = ((NodeEvent) event).getAnchor();
@@ -174,9 +173,7 @@ final class YamlComposer {
     Mark end = last.getEndMark().orElseThrow();
     int line = start.getLine() + lineShift;
     int length =
-        start.getLine() == end.getLine()
-            ? end.getColumn() - start.getColumn()
-            : Integer.MAX_VALUE;
+        start.getLine() == end.getLine() ? end.getColumn() - start.getColumn() : Integer.MAX_VALUE;
     return file.place(line, start.getColumn(), length);
   }
 }

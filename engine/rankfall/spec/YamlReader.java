@@ -46,8 +46,7 @@ final class YamlReader {
     LoadSettings settings = LoadSettings.builder().setCodePointLimit(Integer.MAX_VALUE).build();
     int start = firstLine;
     try {
-      Iterator<Event> events =
-          new Parse(settings).parseString(file.from(firstLine)).iterator();
+      Iterator<Event> events = new Parse(settings).parseString(file.from(firstLine)).iterator();
       YamlComposer composer = new YamlComposer(file, firstLine, events);
       while (composer.findDocument()) {
         start = composer.documentLine();
@@ -59,7 +58,8 @@ final class YamlReader {
     } catch (MarkedYamlEngineException e) {
       return breakOff(start, syntaxFault(e, firstLine));
     } catch (YamlEngineException e) {
-      return breakOff(start, SpecFault.of(file.place(start, 0, 1), "not YAML 1.2: " + oneLine(e.getMessage())));
+      return breakOff(
+          start, SpecFault.of(file.place(start, 0, 1), "not YAML 1.2: " + oneLine(e.getMessage())));
     }
   }
 
