@@ -21,6 +21,7 @@ final class BracketReader {
   private final boolean listed;
   private final boolean open;
   private final Faults faults;
+  private final Scope anyBracket;
   private final Map<String, Place> pairNames = new LinkedHashMap<>();
   private final Map<String, Place> inOrder = new LinkedHashMap<>();
 
@@ -37,6 +38,9 @@ final class BracketReader {
     this.listed = listed;
     this.open = open;
     this.faults = faults;
+    anyBracket =
+        Scope.ofScalars("a bracket", names.roles(), open || !listed)
+            .withVectors(OptionalInt.empty());
   }
 
   /**
@@ -159,9 +163,7 @@ final class BracketReader {
   }
 
   private Scope scope(String left, String right) {
-    String setting = "the bracket of " + left + " and " + right;
-    return Scope.ofScalars(setting, names.roles(), open || !listed)
-        .withVectors(OptionalInt.empty());
+    return anyBracket.withSetting("the bracket of " + left + " and " + right);
   }
 
   /** Checks the right side; an equation that says nothing is left out. */

@@ -116,7 +116,8 @@ final class PresentationReader {
       faults.add(mapping.get().place(), "no matrix is given", "write at least one");
       return Optional.empty();
     }
-    if (tooMany(entries.size(), entries.get(entries.size() - 1).key().place())) {
+    if (tooMany(
+        entries.size(), entries.get(Math.min(entries.size() - 1, MAX_GENERATORS)).key().place())) {
       return Optional.empty();
     }
     return Optional.of(

@@ -1,14 +1,12 @@
 package rankfall.spec;
 
-import java.util.Collections;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
 
 /**
- * What may stand in an expression.
+ * What may stand in an expression. The maps are shared with the caller and not changed here.
  *
  * @param setting where the expression stands, as in "an entry of Lx"
  * @param known the known names
@@ -25,11 +23,6 @@ record Scope(
     OptionalInt units,
     boolean open) {
 
-  Scope {
-    known = Collections.unmodifiableMap(new LinkedHashMap<>(known));
-    later = Collections.unmodifiableMap(new LinkedHashMap<>(later));
-  }
-
   /** Numbers and the scalar names among those known. */
   static Scope ofScalars(String setting, Map<String, Role> known, boolean open) {
     return new Scope(setting, known, Map.of(), false, OptionalInt.empty(), open);
@@ -42,6 +35,10 @@ record Scope(
 
   Scope withLater(Map<String, Role> names) {
     return new Scope(setting, known, names, vectors, units, open);
+  }
+
+  Scope withSetting(String words) {
+    return new Scope(words, known, later, vectors, units, open);
   }
 
   Scope withVectors(OptionalInt order) {

@@ -178,9 +178,9 @@ class SpecReaderTest {
 
   @Test
   void fourMebibytesAreReadAndOneByteMoreIsNot() {
-    String spec = "family: f\nbrackets: \"[X, Y] = Z\"\n#";
-    byte[] full =
-        (spec + "x".repeat(4 * 1024 * 1024 - spec.length())).getBytes(StandardCharsets.UTF_8);
+    String spec = "family: f\nbrackets: \"[X, Y] = Z\"\n";
+    String filled = spec + ("#" + "x".repeat(62) + "\n").repeat(1 << 16);
+    byte[] full = Arrays.copyOf(filled.getBytes(StandardCharsets.UTF_8), 4 * 1024 * 1024);
     assertTrue(SpecReader.read("f.yaml", full).get(0) instanceof SpecResult.Read);
     byte[] over = Arrays.copyOf(full, full.length + 1);
     assertEquals(
