@@ -169,7 +169,7 @@ final class MatrixReader {
                 + (k + 1)
                 + " has "
                 + counted(length, "entry", "entries")
-                + ", there are "
+                + " and the matrix "
                 + counted(count, "row", "rows"),
             "give every row as many entries as there are rows");
       }

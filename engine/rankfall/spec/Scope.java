@@ -80,8 +80,8 @@ record Scope(
     if (later.containsKey(name)) {
       return SpecFault.of(
           place,
-          "'" + name + "' in " + setting + " is given only further down",
-          "move it before its use");
+          "'" + name + "' in " + setting + " is not given before it",
+          "only earlier ones can be used");
     }
     List<String> allowed =
         known.entrySet().stream()
