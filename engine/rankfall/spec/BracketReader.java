@@ -6,7 +6,6 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalInt;
 import java.util.Set;
 
 /** Reads {@code brackets}: one equation {@code [X, Y] = a*Z} a line, with {@code #} comments. */
@@ -38,9 +37,7 @@ final class BracketReader {
     this.listed = listed;
     this.open = open;
     this.faults = faults;
-    anyBracket =
-        Scope.ofScalars("a bracket", names.roles(), open || !listed)
-            .withVectors(OptionalInt.empty());
+    anyBracket = Scope.ofScalars("a bracket", names.roles(), open || !listed).withGenerators();
   }
 
   /**
@@ -197,8 +194,7 @@ final class BracketReader {
     }
     Map<String, Role> known = new LinkedHashMap<>(names.roles());
     pairNames.keySet().forEach(name -> known.putIfAbsent(name, Role.GENERATOR));
-    Scope scope =
-        Scope.ofScalars(line.scope().setting(), known, false).withVectors(OptionalInt.empty());
+    Scope scope = Scope.ofScalars(line.scope().setting(), known, false).withGenerators();
     Set<Expression.Name> strange = new LinkedHashSet<>();
     for (Expression.Name name : NameNodes.of(line.equation().value())) {
       if (!name.name().equals("i") && !known.containsKey(name.name())) {

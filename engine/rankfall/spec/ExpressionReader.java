@@ -260,8 +260,11 @@ final class ExpressionReader {
 
   private Part named(Token token) {
     Optional<FunctionKind> kind = Names.function(token.text());
-    if (kind.isPresent() || token.text().equals("sqrt")) {
-      return called(token, kind);
+    if (kind.isPresent()) {
+      return function(token, kind.get());
+    }
+    if (token.text().equals("sqrt")) {
+      return root(token);
     }
     if (token.text().equals("E") && scope.units().isPresent()) {
       return unit(token, scope.units().getAsInt());
@@ -297,28 +300,37 @@ final class ExpressionReader {
             .orElse(all));
   }
 
-  private Part called(Token name, Optional<FunctionKind> kind) {
+  /** The argument of a function in its parentheses. */
+  private Part argument(Token name, String example) {
     Token open = peek();
     if (!takeIf("(")) {
       throw SpecFault.of(
           placeOf(name),
           "'" + name.text() + "' stands without its argument",
-          "write it in parentheses, as in " + name.text() + (kind.isPresent() ? "(t)" : "(2)"));
+          "write it in parentheses, as in " + example);
     }
     descend(open);
     Part inner = sum();
     close(open);
     depth--;
+    return inner;
+  }
+
+  private Part root(Token name) {
+    Part inner = argument(name, "sqrt(2)");
     int to = tokens.get(at - 1).to();
-    Place place = text.place(name.from(), to);
-    Place argument = text.place(inner.from(), inner.to());
-    if (kind.isEmpty()) {
-      BigFraction radicand = Radicand.of(inner.expression(), argument);
-      return new Part(new Expression.Root(radicand, place), name.from(), to);
-    }
+    BigFraction radicand = Radicand.of(inner.expression(), text.place(inner.from(), inner.to()));
+    return new Part(new Expression.Root(radicand, text.place(name.from(), to)), name.from(), to);
+  }
+
+  private Part function(Token name, FunctionKind kind) {
+    Part inner = argument(name, name.text() + "(t)");
+    int to = tokens.get(at - 1).to();
     SortedMap<String, BigInteger> combination =
-        IntegerCombination.of(inner.expression(), argument, name.text(), scope);
-    return new Part(new Expression.Function(kind.get(), combination, place), name.from(), to);
+        IntegerCombination.of(
+            inner.expression(), text.place(inner.from(), inner.to()), name.text(), scope);
+    return new Part(
+        new Expression.Function(kind, combination, text.place(name.from(), to)), name.from(), to);
   }
 
   private Part unit(Token name, int order) {

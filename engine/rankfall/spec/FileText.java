@@ -132,11 +132,8 @@ final class FileText {
   }
 
   Diagnostic diagnostic(SpecFault fault) {
-    return diagnostic(fault.place(), fault.getMessage(), fault.advice());
-  }
-
-  Diagnostic diagnostic(Place place, String cause, Optional<String> advice) {
-    return new Diagnostic(place, lines.get(place.line() - 1), cause, advice);
+    String line = lines.get(fault.place().line() - 1);
+    return new Diagnostic(fault.place(), line, fault.getMessage(), fault.advice());
   }
 
   /** The first character that YAML does not allow, if there is one. */

@@ -6,7 +6,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalInt;
 
 /** Reads matrices or brackets, with the keys that go with them. */
 final class PresentationReader {
@@ -100,14 +99,7 @@ final class PresentationReader {
     Optional<YamlNode.Mapping> mapping =
         fields.mapping("matrices", "matrices: {X: [[0, 1], [-1, 0]]}");
     Spec.Closure closure = fields.choice("closure", CLOSURES);
-    Optional<ScalarText> orderText = fields.text("order", "order: 3");
-    OptionalInt[] order = {OptionalInt.empty()};
-    orderText.ifPresent(
-        text ->
-            faults.gather(
-                () ->
-                    order[0] =
-                        OptionalInt.of(Scalars.integer(text, "order", 1, MatrixReader.MAX_ORDER))));
+    MatrixReader.Order order = order();
     if (mapping.isEmpty()) {
       return Optional.empty();
     }
@@ -120,8 +112,21 @@ final class PresentationReader {
         entries.size(), entries.get(Math.min(entries.size() - 1, MAX_GENERATORS)).key().place())) {
       return Optional.empty();
     }
-    return Optional.of(
-        new MatrixReader(entries, names, open, faults).read(order[0], orderText, closure));
+    return Optional.of(new MatrixReader(entries, names, open, faults).read(order, closure));
+  }
+
+  private MatrixReader.Order order() {
+    Optional<ScalarText> text = fields.text("order", "order: 3");
+    if (text.isEmpty()) {
+      return fields.has("order") ? MatrixReader.Order.faulty() : MatrixReader.Order.unwritten();
+    }
+    try {
+      return MatrixReader.Order.written(
+          Scalars.integer(text.get(), "order", 1, MatrixReader.MAX_ORDER));
+    } catch (SpecFault fault) {
+      faults.add(fault);
+      return MatrixReader.Order.faulty();
+    }
   }
 
   private Optional<Spec.Presentation> brackets() {

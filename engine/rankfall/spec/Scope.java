@@ -41,8 +41,12 @@ record Scope(
     return new Scope(words, known, later, vectors, units, open);
   }
 
-  Scope withVectors(OptionalInt order) {
-    return new Scope(setting, known, later, true, order, open);
+  Scope withGenerators() {
+    return new Scope(setting, known, later, true, OptionalInt.empty(), open);
+  }
+
+  Scope withMatrices(int order) {
+    return new Scope(setting, known, later, true, OptionalInt.of(order), open);
   }
 
   boolean isParameter(String name) {
