@@ -133,7 +133,13 @@ final class FileText {
 
   Diagnostic diagnostic(SpecFault fault) {
     String line = lines.get(fault.place().line() - 1);
-    return new Diagnostic(fault.place(), line, fault.getMessage(), fault.advice());
+    return new Diagnostic(
+        fault.place(), line, oneLine(fault.getMessage()), fault.advice().map(FileText::oneLine));
+  }
+
+  /** Names in a message may hold line ends, where a key is quoted. */
+  private static String oneLine(String message) {
+    return message.replaceAll("\\R|\t", " ");
   }
 
   /** The first character that YAML does not allow, if there is one. */
