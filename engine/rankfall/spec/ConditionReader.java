@@ -81,8 +81,7 @@ final class ConditionReader {
           case GREATER_OR_EQUAL -> order >= 0;
         };
     if (!holds) {
-      throw SpecFault.of(
-          text.place(), "this condition never holds", "no parameter point is left");
+      throw SpecFault.of(text.place(), "this condition never holds", "no parameter point is left");
     }
   }
 }
