@@ -13,8 +13,9 @@ import rankfall.exact.Factorization.Factor;
 /**
  * Irreducible factors over the rationals.
  *
- * <p>The library fails now and then on unlucky evaluation points; a failed call is tried again,
- * then with the variables in other orders. Every answer is multiplied back and compared.
+ * <p>The library fails now and then on unlucky evaluation points (with an {@code AssertionError}
+ * where assertions are on); a failed call is tried again, then with the variables in other orders.
+ * Every answer is multiplied back and compared.
  */
 public final class Factoring {
   private static final int TRIES = 6;
@@ -35,18 +36,41 @@ public final class Factoring {
     if (f.isConstant()) {
       return new Factorization(BigFraction.of(f.constantValue()), List.of());
     }
-    RuntimeException last = null;
+    Throwable last = null;
+    List<Factor> variables = variablesIn(f);
+    Polynomial rest = f.over(product(f.variables(), variables));
     for (int k = 0; k < TRIES * Math.max(1, f.variables().count()); k++) {
       try {
-        return checked(f, attempt(f, k / TRIES));
-      } catch (NullPointerException | ArithmeticException | ArrayIndexOutOfBoundsException e) {
+        List<Factor> factors = new ArrayList<>(variables);
+        factors.addAll(attempt(rest, k / TRIES));
+        return checked(f, factors);
+      } catch (NullPointerException
+          | ArithmeticException
+          | ArrayIndexOutOfBoundsException
+          | AssertionError e) {
         last = e;
       }
     }
     throw new ArithmeticException("no factorization found of " + f + ": " + last);
   }
 
+  /** The variables that divide f: taken out first, as the library leaves a power of one whole. */
+  private static List<Factor> variablesIn(Polynomial f) {
+    List<Factor> out = new ArrayList<>();
+    for (int v : f.support()) {
+      int variable = v;
+      int e = f.terms().stream().mapToInt(t -> t.exponents().get(variable)).min().orElse(0);
+      if (e > 0) {
+        out.add(new Factor(Polynomial.variable(f.variables(), v), e));
+      }
+    }
+    return out;
+  }
+
   private static List<Factor> attempt(Polynomial f, int rotation) {
+    if (f.isConstant()) {
+      return List.of();
+    }
     int n = Math.max(1, f.variables().count());
     int[] there = IntStream.range(0, n).map(i -> (i + rotation) % n).toArray();
     int[] back = IntStream.range(0, n).map(i -> (i - rotation % n + n) % n).toArray();
@@ -62,23 +86,28 @@ public final class Factoring {
         out.add(new Factor(base, d.getExponent(k)));
       }
     }
-    out.sort(
-        Comparator.comparing((Factor x) -> x.base().totalDegree())
-            .thenComparing(x -> x.base().termCount())
-            .thenComparing(x -> x.base().toString()));
     return out;
   }
 
   private static Factorization checked(Polynomial f, List<Factor> factors) {
-    Polynomial product = Polynomial.one(f.variables());
-    for (Factor x : factors) {
-      product = product.times(x.base().pow(x.multiplicity()));
-    }
-    Polynomial rest = f.over(product);
+    Polynomial rest = f.over(product(f.variables(), factors));
     if (!rest.isConstant()) {
       throw new ArithmeticException("factors do not multiply back to " + f);
     }
-    return new Factorization(BigFraction.of(rest.constantValue()), factors);
+    List<Factor> out = new ArrayList<>(factors);
+    out.sort(
+        Comparator.comparing((Factor x) -> x.base().totalDegree())
+            .thenComparing(x -> x.base().termCount())
+            .thenComparing(x -> x.base().toString()));
+    return new Factorization(BigFraction.of(rest.constantValue()), out);
+  }
+
+  private static Polynomial product(Variables variables, List<Factor> factors) {
+    Polynomial product = Polynomial.one(variables);
+    for (Factor x : factors) {
+      product = product.times(x.base().pow(x.multiplicity()));
+    }
+    return product;
   }
 
   /** The irreducible factors of f without their multiplicities. */
