@@ -161,7 +161,7 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
     Polynomial x = Polynomial.variable(ring, v);
     for (int shift = 1; ; shift++) {
       Polynomial theta = Polynomial.zero(ring);
-      BigInteger factor = BigInteger.ONE;
+      BigInteger factor = BigInteger.valueOf(shift);
       for (Chain.Rule r : below.rules()) {
         theta = theta.plus(Polynomial.variable(ring, r.variable()).times(factor));
         factor = factor.multiply(BigInteger.valueOf(shift));
