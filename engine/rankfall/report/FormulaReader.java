@@ -109,7 +109,7 @@ final class FormulaReader {
       if (take("*")) {
         if (quotient.isPresent()) {
           factors.clear();
-          factors.add(quotient.get());
+          factors.add(Formulas.enclosed(quotient.get()));
           quotient = Optional.empty();
         }
         factors.add(power());

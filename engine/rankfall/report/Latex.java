@@ -62,7 +62,7 @@ final class Latex {
     @Override
     public String word(Formula.Word f) {
       boolean name = f.text().chars().allMatch(c -> c < 128 && (Character.isLetterOrDigit(c) || c == '_'));
-      return (name ? "\\mathit{" : "\\text{") + LatexText.escape(f.text()) + "}";
+      return (name ? "\\mathrm{" : "\\text{") + LatexText.escape(f.text()) + "}";
     }
 
     @Override

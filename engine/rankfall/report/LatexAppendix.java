@@ -226,7 +226,7 @@ final class LatexAppendix {
     }
     LatexTable table =
         new LatexTable(
-            "Where the Killing form degenerates", List.of(0.42, 0.1, 0.08, 0.26, 0.14));
+            "Where the Killing form degenerates", List.of(0.37, 0.12, 0.12, 0.26, 0.13));
     table.head("Condition", "Power", "Rank", "Kernel", "Real points");
     for (Condition d : c.conditions()) {
       table.row(
@@ -246,8 +246,8 @@ final class LatexAppendix {
             + " dimension of the derived algebra, $z$ of the centre.");
     LatexTable table =
         new LatexTable(
-            "Strata of the parameter variety", List.of(0.08, 0.44, 0.06, 0.06, 0.06, 0.06, 0.24));
-    table.head("Stratum", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
+            "Strata of the parameter variety", List.of(0.1, 0.4, 0.065, 0.065, 0.065, 0.065, 0.24));
+    table.head("", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
     for (Stratum s : strata) {
       table.row(
           subscripted(s.name()),
@@ -283,12 +283,11 @@ final class LatexAppendix {
     section("Real regions");
     LatexTable table =
         new LatexTable(
-            "Real regions of the strata", List.of(0.08, 0.08, 0.40, 0.12, 0.18, 0.14));
-    table.head("Stratum", "Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
+            "Real regions of the strata", List.of(0.17, 0.34, 0.17, 0.18, 0.14));
+    table.head("Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
     for (Region r : regions) {
       table.row(
-          subscripted(r.stratum()),
-          subscripted(r.name()),
+          subscripted(r.stratum()) + ", " + subscripted(r.name()),
           r.conditions().isEmpty()
               ? "all points"
               : Latex.inline(

@@ -18,7 +18,7 @@ final class LatexTable {
     out.append("\\begin{longtable}{@{}");
     for (double w : widths) {
       out.append(
-          String.format(Locale.ROOT, "p{\\dimexpr%.2f\\linewidth-2\\tabcolsep\\relax}", w));
+          String.format(Locale.ROOT, "p{\\dimexpr%.3f\\linewidth-2\\tabcolsep\\relax}", w));
     }
     out.append("@{}}\n\\caption{").append(caption).append("}\\\\\n\\toprule\n");
   }

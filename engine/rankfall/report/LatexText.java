@@ -26,7 +26,7 @@ final class LatexText {
           Map.entry((int) '<', "\\ensuremath{<}"),
           Map.entry((int) '>', "\\ensuremath{>}"),
           Map.entry((int) '|', "\\ensuremath{|}"),
-          Map.entry((int) '"', "\\textquotedbl{}"),
+          Map.entry((int) '"', "{\\char34}"),
           Map.entry((int) '[', "{[}"),
           Map.entry((int) ']', "{]}"),
           Map.entry((int) '\t', " "),

@@ -96,7 +96,9 @@ record PageView(
       List<SafeString> determinant,
       List<SafeString> kernel,
       List<SafeString> blocks,
-      List<MatrixView> dual) {}
+      String withoutDeterminant,
+      List<MatrixView> dual,
+      String withoutInverse) {}
 
   /** A stratum. */
   record StratumView(

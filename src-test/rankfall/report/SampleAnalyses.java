@@ -297,7 +297,7 @@ final class SampleAnalyses {
       if (k > 0) {
         int up = layer == 1 ? 0 : k - perLayer;
         coverings.add(new Covering("S" + (k + 1), "S" + (up + 1)));
-        if (layer > 1 && k % 2 == 0 && up + 1 < k) {
+        if (layer > 1 && k % 2 == 0 && (up % perLayer) != 0) {
           coverings.add(new Covering("S" + (k + 1), "S" + (up + 2)));
         }
         if (layer == 3 && k % 5 == 0) {
