@@ -135,12 +135,17 @@ final class ClosureDiagram {
                 + " aria-labelledby=\"closure-title\" width=\"%d\" height=\"%d\" viewBox=\"0 0 %d"
                 + " %d\">\n<title id=\"closure-title\">Strata by codimension; a line joins a"
                 + " stratum to those directly in its closure</title>\n",
-            width, height, width, height));
+            width,
+            height,
+            width,
+            height));
     for (int k = 0; k < layers.size(); k++) {
       out.append(layerLabel(k, width));
     }
-    layers.forEach(layer -> layer.forEach(n -> n.down.forEach(m -> out.append(edge(n, m, origin)))));
-    layers.forEach(layer -> layer.forEach(n -> n.stratum.forEach(s -> out.append(box(n, s, origin)))));
+    layers.forEach(
+        layer -> layer.forEach(n -> n.down.forEach(m -> out.append(edge(n, m, origin)))));
+    layers.forEach(
+        layer -> layer.forEach(n -> n.stratum.forEach(s -> out.append(box(n, s, origin)))));
     return out.append("</svg>\n").toString();
   }
 
@@ -150,7 +155,11 @@ final class ClosureDiagram {
         Locale.ROOT,
         "<line class=\"level\" x1=\"0\" y1=\"%.1f\" x2=\"%d\" y2=\"%.1f\"></line>\n"
             + "<text class=\"level\" x=\"0\" y=\"%.1f\">codimension %d</text>\n",
-        y, width, y, y - 6, codimensions.get(k));
+        y,
+        width,
+        y,
+        y - 6,
+        codimensions.get(k));
   }
 
   /** From box to box; within the layer of a bend the line runs straight down between the boxes. */
@@ -165,7 +174,15 @@ final class ClosureDiagram {
     return String.format(
         Locale.ROOT,
         "<path class=\"edge\" d=\"M%.1f %.1fC%.1f %.1f %.1f %.1f %.1f %.1f%s\"></path>\n",
-        x1, y1, x1, middle, x2, middle, x2, y2, through);
+        x1,
+        y1,
+        x1,
+        middle,
+        x2,
+        middle,
+        x2,
+        y2,
+        through);
   }
 
   private static String box(Node n, Stratum s, double origin) {

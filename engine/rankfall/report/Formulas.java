@@ -61,7 +61,8 @@ final class Formulas {
 
   /** Roots stand before letters, functions after them, as is the custom. */
   private static int place(Formula f) {
-    if (f instanceof Formula.Root || f instanceof Formula.Power p && p.base() instanceof Formula.Root) {
+    if (f instanceof Formula.Root
+        || f instanceof Formula.Power p && p.base() instanceof Formula.Root) {
       return 0;
     }
     return f instanceof Formula.Function ? 2 : 1;
@@ -213,7 +214,8 @@ final class Formulas {
       return new Formula.Fraction(open(above), open(below));
     }
     return new Formula.Slash(
-        enclosed(above), isSymbol(below) || below instanceof Formula.Group ? below : new Formula.Group(below, ""));
+        enclosed(above),
+        isSymbol(below) || below instanceof Formula.Group ? below : new Formula.Group(below, ""));
   }
 
   private static Formula signedQuotient(Formula above, Formula below) {

@@ -87,8 +87,7 @@ final class PageParts {
   }
 
   private SafeString block(List<Integer> block, List<String> basis) {
-    return math(
-        Formulas.sequence(block.stream().map(k -> formulas.text(basis.get(k))).toList()));
+    return math(Formulas.sequence(block.stream().map(k -> formulas.text(basis.get(k))).toList()));
   }
 
   private PageView.ConditionView condition(Condition d, List<String> basis) {

@@ -11,6 +11,10 @@ import rankfall.spec.Spec;
 
 /** Sentences that the page and the appendix share. */
 final class Words {
+  /** What stands in place of the answer where no component was analysed. */
+  static final String NO_GENERAL_POINT =
+      "Not decided: no general point of the parameter variety was analysed.";
+
   private Words() {}
 
   /** How far the analysis came, a sentence. */
