@@ -96,9 +96,7 @@ final class JsonFile {
       out.set("strata", array(f.strata(), JsonFile::stratum));
       out.set(
           "coverings",
-          array(
-              f.coverings(),
-              (node, c) -> node.put("lower", c.lower()).put("upper", c.upper())));
+          array(f.coverings(), (node, c) -> node.put("lower", c.lower()).put("upper", c.upper())));
     } else {
       out.putNull("strata").putNull("coverings");
     }
@@ -201,11 +199,7 @@ final class JsonFile {
   }
 
   private static ObjectNode signature(Signature s) {
-    return NODES
-        .objectNode()
-        .put("plus", s.plus())
-        .put("minus", s.minus())
-        .put("zero", s.zero());
+    return NODES.objectNode().put("plus", s.plus()).put("minus", s.minus()).put("zero", s.zero());
   }
 
   private static ArrayNode entries(List<MatrixEntry> entries, List<String> basis) {

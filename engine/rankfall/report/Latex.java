@@ -48,8 +48,7 @@ final class Latex {
       String d = f.digits();
       StringBuilder out = new StringBuilder();
       for (int k = 0; k < d.length(); k += DIGITS_IN_A_ROW) {
-        out.append(k == 0 ? "" : BREAK)
-            .append(d, k, Math.min(d.length(), k + DIGITS_IN_A_ROW));
+        out.append(k == 0 ? "" : BREAK).append(d, k, Math.min(d.length(), k + DIGITS_IN_A_ROW));
       }
       return out.toString();
     }
@@ -61,8 +60,9 @@ final class Latex {
 
     @Override
     public String word(Formula.Word f) {
-      boolean name = f.text().chars().allMatch(c -> c < 128 && (Character.isLetterOrDigit(c) || c == '_'));
-      return (name ? "\\mathit{" : "\\text{") + LatexText.escape(f.text()) + "}";
+      boolean name =
+          f.text().chars().allMatch(c -> c < 128 && (Character.isLetterOrDigit(c) || c == '_'));
+      return (name ? "\\mathrm{" : "\\text{") + LatexText.escape(f.text()) + "}";
     }
 
     @Override

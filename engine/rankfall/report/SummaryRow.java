@@ -53,7 +53,8 @@ public record SummaryRow(List<String> cells) {
   }
 
   /**
-   * The row of an analysis; {@code generic_rank} and the signature are those of the first component.
+   * The row of an analysis; {@code generic_rank} and the signature are those of the first
+   * component.
    *
    * @param analysis of any status
    * @return its row
@@ -76,8 +77,7 @@ public record SummaryRow(List<String> cells) {
             signature.map(s -> Integer.toString(s.minus())).orElse(""),
             count(
                 contents.hasComponents(),
-                found.map(
-                    f -> f.components().stream().mapToInt(c -> c.conditions().size()).sum())),
+                found.map(f -> f.components().stream().mapToInt(c -> c.conditions().size()).sum())),
             count(contents.hasStrata(), found.map(f -> f.strata().size())),
             count(contents.hasRegions(), found.map(f -> f.regions().size())),
             found.flatMap(f -> f.strata().stream().findFirst().flatMap(s -> s.type())).orElse(""),
