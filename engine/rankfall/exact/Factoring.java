@@ -19,6 +19,14 @@ import rankfall.exact.Factorization.Factor;
 public final class Factoring {
   private static final int TRIES = 6;
 
+  /** Longer polynomials are worth a search for repeated factors first. */
+  private static final int LONG = 30;
+
+  private static final Comparator<Factor> BY_SIZE =
+      Comparator.comparing((Factor x) -> x.base().totalDegree())
+          .thenComparing(x -> x.base().termCount())
+          .thenComparing(x -> x.base().toString());
+
   private Factoring() {}
 
   /**
@@ -35,15 +43,80 @@ public final class Factoring {
     if (f.isConstant()) {
       return new Factorization(BigFraction.of(f.constantValue()), List.of());
     }
-    RuntimeException last = null;
+    List<Factor> powers = new ArrayList<>();
+    Polynomial rest = f;
+    for (int x : f.support()) {
+      Polynomial v = Polynomial.variable(f.variables(), x);
+      int e = 0;
+      for (; rest.coefficient(x, 0).isZero(); e++) {
+        rest = rest.over(v);
+      }
+      if (e > 0) {
+        powers.add(new Factor(v, e));
+      }
+    }
+    Factorization others =
+        rest.termCount() > LONG ? throughSquareFreePart(rest) : directly(rest);
+    powers.addAll(others.factors());
+    powers.sort(BY_SIZE);
+    return new Factorization(others.unit(), powers);
+  }
+
+  private static Factorization directly(Polynomial f) {
+    if (f.isConstant()) {
+      return new Factorization(BigFraction.of(f.constantValue()), List.of());
+    }
+    Throwable last = null;
     for (int k = 0; k < TRIES * Math.max(1, f.variables().count()); k++) {
       try {
         return checked(f, attempt(f, k / TRIES));
-      } catch (NullPointerException | ArithmeticException | ArrayIndexOutOfBoundsException e) {
+      } catch (NullPointerException
+          | ArithmeticException
+          | ArrayIndexOutOfBoundsException
+          | AssertionError e) {
         last = e;
       }
     }
     throw new ArithmeticException("no factorization found of " + f + ": " + last);
+  }
+
+  /**
+   * The product of the different irreducible factors of f.
+   *
+   * @param f not 0
+   * @return primitive; 1 for constants
+   */
+  public static Polynomial squareFreePart(Polynomial f) {
+    Polynomial p = f.primitive();
+    if (p.isConstant()) {
+      return Polynomial.one(f.variables());
+    }
+    int x =
+        p.support().stream().min(Comparator.comparingInt(p::degree)).orElseThrow();
+    Polynomial content =
+        p.coefficientsIn(x).stream().reduce(Polynomial.zero(f.variables()), Polynomial::gcd);
+    Polynomial rest = p.over(content);
+    return squareFreePart(content)
+        .times(rest.over(rest.gcd(rest.derivative(x))).primitive())
+        .primitive();
+  }
+
+  private static Factorization throughSquareFreePart(Polynomial f) {
+    Polynomial part = squareFreePart(f);
+    if (part.equals(f.primitive())) {
+      return directly(f);
+    }
+    Polynomial rest = f;
+    List<Factor> out = new ArrayList<>();
+    for (Factor x : directly(part).factors()) {
+      int multiplicity = 0;
+      for (var q = rest.dividedBy(x.base()); q.isPresent(); q = rest.dividedBy(x.base())) {
+        rest = q.get();
+        multiplicity++;
+      }
+      out.add(new Factor(x.base(), multiplicity));
+    }
+    return checked(f, out);
   }
 
   private static List<Factor> attempt(Polynomial f, int rotation) {
@@ -62,10 +135,6 @@ public final class Factoring {
         out.add(new Factor(base, d.getExponent(k)));
       }
     }
-    out.sort(
-        Comparator.comparing((Factor x) -> x.base().totalDegree())
-            .thenComparing(x -> x.base().termCount())
-            .thenComparing(x -> x.base().toString()));
     return out;
   }
 

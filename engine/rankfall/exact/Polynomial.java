@@ -235,9 +235,14 @@ public final class Polynomial {
     return out;
   }
 
-  /** The coefficient of the leading term; 0 for the polynomial 0. */
+  /**
+   * The coefficient of the first term in the text; 0 for the polynomial 0.
+   */
   public BigInteger leadingCoefficient() {
-    return java(p.lc());
+    if (variables.numbers() == 0 || isZero()) {
+      return java(p.lc());
+    }
+    return terms().stream().min(PolynomialText.order(variables)).orElseThrow().coefficient();
   }
 
   /** The coefficients in one variable, constant one first; their number is the degree plus 1. */

@@ -1,0 +1,69 @@
+package rankfall.cli;
+
+import java.io.IOException;
+import java.io.Reader;
+import java.nio.file.Path;
+import java.util.List;
+import java.util.Map;
+import java.util.function.Consumer;
+import org.apache.commons.numbers.fraction.BigFraction;
+import rankfall.Analysis;
+import rankfall.Budget;
+import rankfall.spec.Spec;
+import rankfall.spec.SpecException;
+import rankfall.spec.SpecResult;
+
+/** What the verbs ask of the other rooms. */
+interface FrontDoors {
+  /** Reads all documents of a file, in order. */
+  List<SpecResult> read(Path file) throws IOException;
+
+  /** The JSON schema of the spec format, ending with a line feed. */
+  String schema();
+
+  /** Analyses one family; called on several threads at once. */
+  Analysis analyse(Spec spec, Budget budget) throws SpecException;
+
+  /** Writes the folder of one family; called on several threads at once. */
+  void writeFamily(Path out, Analysis analysis) throws IOException;
+
+  /** Writes the table over all families, in the order of the outcomes. */
+  void writeSummary(Path out, List<Outcome> outcomes) throws IOException;
+
+  /** Prepares a family to be asked at points. */
+  PointAnswers points(Spec spec, PointForm form) throws SpecException;
+
+  /** How the answer to a point is written. */
+  enum PointForm {
+    TEXT,
+    JSON,
+    CSV
+  }
+
+  /** One family, ready to be asked at points. */
+  interface PointAnswers {
+    /** What stands before the first answer: the header row of a table, else nothing. */
+    String head();
+
+    /** The answer at one point. */
+    Answer at(Map<String, BigFraction> point);
+
+    /**
+     * Answers each row of a table whose header names the parameters.
+     *
+     * @param table the text of the table
+     * @param out takes the answers one by one, in the order of the rows; a row that cannot be read
+     *     gets an answer that says so
+     * @throws IOException if the table cannot be read on
+     */
+    void atEach(Reader table, Consumer<Answer> out) throws IOException;
+  }
+
+  /**
+   * What is said of a point.
+   *
+   * @param text whole lines, each with its line feed
+   * @param good false where it is an error instead of facts
+   */
+  record Answer(String text, boolean good) {}
+}

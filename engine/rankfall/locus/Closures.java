@@ -1,0 +1,71 @@
+package rankfall.locus;
+
+import java.util.ArrayList;
+import java.util.Comparator;
+import java.util.HashMap;
+import java.util.List;
+import java.util.Map;
+import rankfall.exact.Chain;
+import rankfall.exact.GroebnerBasis;
+import rankfall.exact.Polynomial;
+
+/**
+ * Inclusions between the closures of chains, and their prime ideals.
+ *
+ * <p>Most inclusions are told at the general point: if the rules of Z vanish at that of W and no initial
+ * of Z does, W lies in the closure of Z. Only where an initial vanishes the ideal of Z is needed. Ideals
+ * are remembered; one object serves one family on one thread.
+ */
+final class Closures {
+  private final GroebnerBasis bases;
+  private final Map<Chain, List<Polynomial>> ideals = new HashMap<>();
+
+  Closures(Chain constants) {
+    this.bases = new GroebnerBasis(constants);
+  }
+
+  /** The reduced basis of the prime ideal of the closure. */
+  List<Polynomial> ideal(Chain chain) {
+    return ideals.computeIfAbsent(chain, bases::of);
+  }
+
+  /** Whether the closure of w lies in the closure of z. */
+  boolean isInside(Chain w, Chain z) {
+    if (w.dimension() > z.dimension()) {
+      return false;
+    }
+    if (!z.rules().stream().allMatch(r -> w.vanishes(r.equation()))) {
+      return false;
+    }
+    return z.initials().stream().noneMatch(w::vanishes)
+        || ideal(z).stream().allMatch(w::vanishes);
+  }
+
+  /**
+   * Those sets that lie in no other one, each once.
+   *
+   * @param chains any
+   * @return in no particular order
+   */
+  List<Chain> maximal(List<Chain> chains) {
+    List<Chain> byDimension = new ArrayList<>(chains);
+    byDimension.sort(
+        Comparator.comparingInt((Chain c) -> -c.dimension())
+            .thenComparingInt(c -> c.initials().size()));
+    List<Chain> out = new ArrayList<>();
+    for (Chain c : byDimension) {
+      if (out.stream().noneMatch(z -> isInside(c, z))) {
+        out.add(c);
+      }
+    }
+    return out;
+  }
+
+  /** The components of what two closures share. */
+  List<Chain> intersection(Splitter splitter, Chain a, Chain b) {
+    List<Polynomial> equations = new ArrayList<>(ideal(a));
+    equations.addAll(ideal(b));
+    return maximal(
+        splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());
+  }
+}

@@ -1,0 +1,77 @@
+package rankfall.locus;
+
+import java.util.List;
+import rankfall.exact.Chain;
+import rankfall.exact.Domain;
+import rankfall.exact.Polynomial;
+
+/**
+ * The ring on a piece, where some polynomials are known not to vanish: these make pivots as good as
+ * constants.
+ *
+ * @param chain the chain of the piece
+ * @param nonZero reduced on the chain, irreducible
+ */
+record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Domain<Polynomial> {
+  KnownNonZero {
+    nonZero = List.copyOf(nonZero);
+  }
+
+  @Override
+  public Polynomial zero() {
+    return chain.zero();
+  }
+
+  @Override
+  public Polynomial one() {
+    return chain.one();
+  }
+
+  @Override
+  public Polynomial plus(Polynomial a, Polynomial b) {
+    return a.plus(b);
+  }
+
+  @Override
+  public Polynomial times(Polynomial a, Polynomial b) {
+    return a.times(b);
+  }
+
+  @Override
+  public Polynomial negate(Polynomial a) {
+    return a.negate();
+  }
+
+  @Override
+  public boolean isZero(Polynomial a) {
+    return a.isZero();
+  }
+
+  @Override
+  public Normal<Polynomial> normal(List<Polynomial> row) {
+    return chain.normal(row);
+  }
+
+  @Override
+  public List<Polynomial> cofactors(Polynomial a, Polynomial b) {
+    return chain.cofactors(a, b);
+  }
+
+  /** The weight of what is left when the factors that cannot vanish are taken out. */
+  @Override
+  public int weight(Polynomial a) {
+    Polynomial rest = a;
+    for (Polynomial p : nonZero) {
+      if (rest.isConstant()) {
+        return 0;
+      }
+      if (p.support().stream().allMatch(rest::contains)) {
+        for (var q = rest.dividedBy(p); q.isPresent() && !rest.isConstant(); ) {
+          rest = q.get();
+          q = rest.dividedBy(p);
+        }
+      }
+    }
+    return chain.weight(rest);
+  }
+}

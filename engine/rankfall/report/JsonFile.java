@@ -1,0 +1,265 @@
+package rankfall.report;
+
+import com.fasterxml.jackson.core.JsonProcessingException;
+import com.fasterxml.jackson.core.util.DefaultIndenter;
+import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
+import com.fasterxml.jackson.databind.ObjectMapper;
+import com.fasterxml.jackson.databind.node.ArrayNode;
+import com.fasterxml.jackson.databind.node.JsonNodeFactory;
+import com.fasterxml.jackson.databind.node.ObjectNode;
+import java.io.UncheckedIOException;
+import java.util.List;
+import java.util.Locale;
+import java.util.Optional;
+import java.util.function.BiConsumer;
+import rankfall.Analysis;
+import rankfall.Analysis.Combination;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
+import rankfall.Analysis.Coordinate;
+import rankfall.Analysis.Findings;
+import rankfall.Analysis.Killing;
+import rankfall.Analysis.MatrixEntry;
+import rankfall.Analysis.Region;
+import rankfall.Analysis.Signature;
+import rankfall.Analysis.Stratum;
+import rankfall.exact.Polynomial;
+import rankfall.spec.Spec;
+
+/** The image of an analysis as JSON; the resource {@code result-schema.json} documents it. */
+final class JsonFile {
+  private static final JsonNodeFactory NODES = JsonNodeFactory.instance;
+
+  private JsonFile() {}
+
+  /** {@code result.json}, ended by a line feed. */
+  static String of(Analysis a) {
+    DefaultIndenter indent = new DefaultIndenter("  ", "\n");
+    DefaultPrettyPrinter printer =
+        new DefaultPrettyPrinter().withObjectIndenter(indent).withArrayIndenter(indent);
+    try {
+      return new ObjectMapper().writer(printer).writeValueAsString(tree(a)) + "\n";
+    } catch (JsonProcessingException e) {
+      throw new UncheckedIOException("a tree cannot be written", e);
+    }
+  }
+
+  private static ObjectNode tree(Analysis a) {
+    ObjectNode out = NODES.objectNode();
+    out.put("format", 1);
+    out.set("program", NODES.objectNode().put("name", "rankfall").put("version", a.version()));
+    out.set("spec", spec(a.spec()));
+    out.put("status", word(a.status()));
+    out.put("message", a.message());
+    out.set("remarks", texts(a.remarks()));
+    out.set("undecided", texts(a.undecided()));
+    Contents contents = Contents.of(a);
+    if (a.findings().isPresent()) {
+      out.set("findings", findings(a.findings().get(), contents));
+    } else {
+      out.putNull("findings");
+    }
+    return out;
+  }
+
+  private static ObjectNode spec(Spec s) {
+    ObjectNode out = NODES.objectNode();
+    out.put("family", s.family());
+    out.put("title", s.title().orElse(""));
+    out.put("notes", s.notes().orElse(""));
+    out.put("sha256", s.source().sha256());
+    out.put("ground", word(s.ground()));
+    out.put("convention", word(s.convention()));
+    out.put("presentation", s.presentation() instanceof Spec.Matrices ? "matrices" : "brackets");
+    out.set("generators", texts(s.presentation().generators()));
+    out.set("parameters", texts(s.parameters()));
+    out.set("where", texts(s.where().stream().map(Spec.Condition::text).toList()));
+    return out;
+  }
+
+  private static ObjectNode findings(Findings f, Contents contents) {
+    ObjectNode out = NODES.objectNode();
+    out.set("generators", texts(f.listed()));
+    out.set("variables", texts(f.variables()));
+    out.set(
+        "relations",
+        array(
+            f.relations(),
+            (node, r) -> {
+              node.put("polynomial", r.polynomial().toString());
+              node.set("factors", polynomials(r.factors()));
+              node.put("origin", word(r.origin()));
+            }));
+    out.set("poles", polynomials(f.poles()));
+    out.set("components", array(f.components(), JsonFile::component));
+    if (contents.hasStrata()) {
+      out.set("strata", array(f.strata(), JsonFile::stratum));
+      out.set(
+          "coverings",
+          array(
+              f.coverings(),
+              (node, c) -> node.put("lower", c.lower()).put("upper", c.upper())));
+    } else {
+      out.putNull("strata").putNull("coverings");
+    }
+    if (contents.hasRegions()) {
+      out.set("regions", array(f.regions(), JsonFile::region));
+    } else {
+      out.putNull("regions");
+    }
+    return out;
+  }
+
+  private static void component(ObjectNode out, Component c) {
+    List<String> basis = c.basis();
+    out.put("number", c.number());
+    out.set("equations", polynomials(c.equations()));
+    out.put("parameter_dimension", c.parameterDimension());
+    out.put("dimension", basis.size());
+    out.set("basis", texts(basis));
+    out.set(
+        "structure",
+        array(
+            c.structure(),
+            (node, s) ->
+                node.put("left", basis.get(s.left()))
+                    .put("right", basis.get(s.right()))
+                    .put("target", basis.get(s.target()))
+                    .put("coefficient", s.coefficient().toString())));
+    out.set("killing", killing(c.killing(), basis));
+    if (c.dual().isPresent()) {
+      out.set("dual", entries(c.dual().get(), basis));
+    } else {
+      out.putNull("dual");
+    }
+    out.set("conditions", array(c.conditions(), (node, d) -> condition(node, d, basis)));
+  }
+
+  private static ObjectNode killing(Killing k, List<String> basis) {
+    ObjectNode out = NODES.objectNode();
+    out.set("entries", entries(k.entries(), basis));
+    out.put("rank", k.rank());
+    out.set("kernel", combinations(k.kernel(), basis));
+    ArrayNode blocks = NODES.arrayNode();
+    k.blocks().forEach(b -> blocks.add(texts(b.stream().map(basis::get).toList())));
+    out.set("blocks", blocks);
+    k.determinant()
+        .ifPresentOrElse(
+            d ->
+                out.set(
+                    "determinant",
+                    NODES
+                        .objectNode()
+                        .put("numerator", d.numerator().toString())
+                        .put("denominator", d.denominator().toString())),
+            () -> out.putNull("determinant"));
+    k.signature()
+        .ifPresentOrElse(s -> out.set("signature", signature(s)), () -> out.putNull("signature"));
+    return out;
+  }
+
+  private static void condition(ObjectNode out, Condition d, List<String> basis) {
+    out.set("equations", polynomials(d.equations()));
+    out.put("multiplicity", d.multiplicity());
+    out.put("rank", d.rank());
+    out.put("kernel_dimension", d.kernelDimension());
+    out.set("kernel", combinations(d.kernel(), basis));
+    out.put("real_points", word(d.realPoints()));
+  }
+
+  private static void stratum(ObjectNode out, Stratum s) {
+    out.put("name", s.name());
+    out.set("equations", polynomials(s.equations()));
+    ArrayNode exclusions = NODES.arrayNode();
+    s.exclusions().forEach(e -> exclusions.add(polynomials(e)));
+    out.set("exclusions", exclusions);
+    out.put("codimension", s.codimension());
+    out.put("dimension", s.dimension());
+    out.put("rank", s.rank());
+    out.put("kernel_dimension", s.kernelDimension());
+    out.put("derived", s.derived());
+    out.put("centre", s.centre());
+    out.put("radical", s.radical());
+    out.put("nilradical", s.nilradical());
+    out.put("class", s.kind());
+    optional(out, "type", s.type());
+    out.put("real_points", word(s.realPoints()));
+    out.set("witness", point(s.witness()));
+    out.set("basis", texts(s.basis()));
+    out.set("kernel", combinations(s.kernel(), s.basis()));
+    out.set("remarks", texts(s.remarks()));
+  }
+
+  private static void region(ObjectNode out, Region r) {
+    out.put("stratum", r.stratum());
+    out.put("name", r.name());
+    out.set("conditions", texts(r.conditions()));
+    out.set("signature", signature(r.signature()));
+    optional(out, "type", r.type());
+    out.put("proof", CsvFiles.proof(r.exact()));
+    out.set("witness", point(r.witness()));
+  }
+
+  private static ObjectNode signature(Signature s) {
+    return NODES
+        .objectNode()
+        .put("plus", s.plus())
+        .put("minus", s.minus())
+        .put("zero", s.zero());
+  }
+
+  private static ArrayNode entries(List<MatrixEntry> entries, List<String> basis) {
+    return array(
+        entries,
+        (node, e) ->
+            node.put("row", basis.get(e.row()))
+                .put("column", basis.get(e.column()))
+                .put("entry", e.value().toString()));
+  }
+
+  private static ArrayNode combinations(List<Combination> list, List<String> basis) {
+    return array(
+        list,
+        (node, c) -> {
+          for (int k = 0; k < c.coefficients().size(); k++) {
+            if (!c.coefficients().get(k).isZero()) {
+              node.put(basis.get(k), c.coefficients().get(k).toString());
+            }
+          }
+        });
+  }
+
+  private static ObjectNode point(List<Coordinate> witness) {
+    ObjectNode out = NODES.objectNode();
+    witness.forEach(c -> out.put(c.variable(), c.value()));
+    return out;
+  }
+
+  private static ArrayNode polynomials(List<Polynomial> list) {
+    return texts(list.stream().map(Polynomial::toString).toList());
+  }
+
+  private static ArrayNode texts(List<String> list) {
+    ArrayNode out = NODES.arrayNode();
+    list.forEach(out::add);
+    return out;
+  }
+
+  private static <T> ArrayNode array(List<T> list, BiConsumer<ObjectNode, T> fill) {
+    ArrayNode out = NODES.arrayNode();
+    for (T item : list) {
+      ObjectNode node = NODES.objectNode();
+      fill.accept(node, item);
+      out.add(node);
+    }
+    return out;
+  }
+
+  private static void optional(ObjectNode out, String key, Optional<String> value) {
+    value.ifPresentOrElse(v -> out.put(key, v), () -> out.putNull(key));
+  }
+
+  private static String word(Enum<?> value) {
+    return value.name().toLowerCase(Locale.ROOT);
+  }
+}

@@ -1,0 +1,306 @@
+package rankfall.report;
+
+import java.util.List;
+import java.util.stream.Collectors;
+import java.util.stream.Stream;
+import rankfall.Analysis;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
+import rankfall.Analysis.Findings;
+import rankfall.Analysis.Killing;
+import rankfall.Analysis.MatrixEntry;
+import rankfall.Analysis.Region;
+import rankfall.Analysis.Relation;
+import rankfall.Analysis.Stratum;
+import rankfall.exact.Polynomial;
+
+/**
+ * A fragment for {@code \input} inside an article with {@code amsmath}, {@code booktabs} and {@code
+ * longtable}; ASCII only. Formulas stand in cells and paragraphs in which lines can break.
+ */
+final class LatexAppendix {
+  /** Largest order of a matrix that is set as one. */
+  private static final int LARGEST_ORDER = 8;
+
+  /** Widest matrix that is set as one, in letters over all columns, spaces between them apart. */
+  private static final int WIDEST_MATRIX = 44;
+
+  private final Analysis analysis;
+  private final Formulas formulas;
+  private final StringBuilder out = new StringBuilder();
+
+  private LatexAppendix(Analysis analysis) {
+    this.analysis = analysis;
+    this.formulas = new Formulas(FamilyNames.notation(analysis));
+  }
+
+  /** {@code appendix.tex}. */
+  static String of(Analysis analysis) {
+    LatexAppendix a = new LatexAppendix(analysis);
+    a.head();
+    analysis.findings().ifPresent(a::findings);
+    return a.out.toString();
+  }
+
+  private void line(String text) {
+    out.append(text).append('\n');
+  }
+
+  private void section(String title) {
+    line("");
+    line("\\subsection*{" + title + "}");
+  }
+
+  private void paragraph(String latex) {
+    line(latex);
+    line("");
+  }
+
+  private static String text(String plain) {
+    return LatexText.escape(plain);
+  }
+
+  private void head() {
+    String family = analysis.spec().family();
+    line("% Rankfall " + analysis.version() + ", family " + family);
+    line("% SHA-256 of the spec: " + analysis.spec().source().sha256());
+    line("% For \\input in a document that loads amsmath, booktabs and longtable.");
+    line(Latex.DEFINITION);
+    line("\\section{" + text(analysis.spec().title().orElse(family)) + "}");
+    line("\\label{rankfall:" + family + "}");
+    paragraph("\\noindent " + text(Words.status(analysis)));
+    if (!analysis.message().isEmpty()) {
+      paragraph("\\noindent\\textbf{" + text(analysis.message()) + "}");
+    }
+    items("Undecided:", analysis.undecided());
+    items("Remarks:", analysis.remarks());
+  }
+
+  private void items(String lead, List<String> sentences) {
+    if (!sentences.isEmpty()) {
+      line("\\noindent " + lead);
+      line("\\begin{itemize}");
+      sentences.forEach(s -> line("\\item " + text(s)));
+      line("\\end{itemize}");
+    }
+  }
+
+  private void findings(Findings f) {
+    paragraph("\\noindent " + text(Words.setting(analysis.spec())) + parameters());
+    relations(f.relations());
+    poles(f.poles());
+    for (Component c : f.components()) {
+      component(c, f.components().size() > 1);
+    }
+    Contents contents = Contents.of(analysis);
+    if (contents.hasStrata()) {
+      strata(f.strata());
+    }
+    if (contents.hasRegions()) {
+      regions(f.regions());
+    }
+  }
+
+  private String parameters() {
+    List<String> names = analysis.spec().parameters();
+    List<Formula> where =
+        analysis.spec().where().stream().map(c -> formulas.text(c.text())).toList();
+    return names.isEmpty()
+        ? " There are no parameters."
+        : " Parameters: "
+            + Latex.inline(Formulas.sequence(names.stream().map(formulas::text).toList()))
+            + (where.isEmpty() ? "" : " with " + Latex.inline(Formulas.sequence(where)))
+            + ".";
+  }
+
+  private void relations(List<Relation> relations) {
+    if (relations.isEmpty()) {
+      return;
+    }
+    section("Relations");
+    LatexTable table = new LatexTable("Relations between the parameters", List.of(0.66, 0.34));
+    table.head("Relation", "Origin");
+    for (Relation r : relations) {
+      table.row(
+          Latex.inline(Formulas.equal(product(r.factors()), new Formula.Number("0"))),
+          text(Words.origin(r.origin())));
+    }
+    out.append(table.text());
+  }
+
+  private Formula product(List<Polynomial> factors) {
+    return factors.size() == 1
+        ? formulas.of(factors.get(0))
+        : Formulas.product(
+            factors.stream().map(p -> Formulas.enclosed(formulas.of(p))).toList());
+  }
+
+  private void poles(List<Polynomial> poles) {
+    if (!poles.isEmpty()) {
+      Formula list = Formulas.sequence(poles.stream().map(formulas::of).toList());
+      paragraph(
+          "{\\raggedright\\noindent An entry is undefined where one of these vanishes: "
+              + Latex.inline(list)
+              + ".\\par}");
+    }
+  }
+
+  private void component(Component c, boolean oneOfMany) {
+    if (oneOfMany) {
+      section("Component " + c.number());
+      paragraph(
+          "{\\raggedright\\noindent "
+              + Latex.inline(formulas.vanishing(c.equations()))
+              + ", of dimension "
+              + c.parameterDimension()
+              + ".\\par}");
+    }
+    brackets(c);
+    killing(c);
+    conditions(c);
+  }
+
+  private void brackets(Component c) {
+    section("Brackets");
+    List<Formula> brackets = FamilyNames.brackets(c, formulas);
+    if (brackets.isEmpty()) {
+      paragraph("All brackets vanish.");
+      return;
+    }
+    LatexTable table = new LatexTable("Brackets of the generators", List.of(1.0));
+    table.head("Non-zero brackets");
+    brackets.forEach(b -> table.row(Latex.inline(b)));
+    out.append(table.text());
+  }
+
+  private void killing(Component c) {
+    Killing k = c.killing();
+    section("Killing form");
+    paragraph("\\noindent " + text(Words.general(c)));
+    matrix("K", c.basis(), k.entries());
+    k.determinant()
+        .ifPresent(
+            d ->
+                paragraph(
+                    "{\\raggedright\\noindent Its determinant is $\\det K = "
+                        + Latex.of(formulas.of(d))
+                        + "$.\\par}"));
+    if (!k.kernel().isEmpty()) {
+      paragraph(
+          "{\\raggedright\\noindent Its kernel at a general point is spanned by "
+              + Latex.inline(formulas.span(k.kernel(), c.basis()))
+              + ".\\par}");
+    }
+  }
+
+  private void matrix(String name, List<String> basis, List<MatrixEntry> entries) {
+    SquareMatrix m = SquareMatrix.of(basis.size(), entries, formulas);
+    if (entries.isEmpty()) {
+      paragraph("All entries of its matrix vanish.");
+    } else if (m.order() <= LARGEST_ORDER && m.width() <= WIDEST_MATRIX) {
+      paragraph(
+          "{\\raggedright\\noindent In the basis "
+              + Latex.inline(Formulas.sequence(basis.stream().map(formulas::text).toList()))
+              + " its matrix is\\par}");
+      line("\\[\n" + name + " = " + Latex.matrix(m.rows()) + "\n\\]");
+    } else {
+      LatexTable table =
+          new LatexTable(
+              "Non-zero entries of the Killing matrix, upper triangle", List.of(0.16, 0.16, 0.68));
+      table.head("Row", "Column", "Entry");
+      for (MatrixEntry e : entries) {
+        table.row(
+            Latex.inline(formulas.text(basis.get(e.row()))),
+            Latex.inline(formulas.text(basis.get(e.column()))),
+            Latex.inline(formulas.of(e.value())));
+      }
+      out.append(table.text());
+    }
+  }
+
+  private void conditions(Component c) {
+    section("Degeneration");
+    paragraph("\\noindent " + text(Words.conditions(c, analysis.status())));
+    if (c.conditions().isEmpty()) {
+      return;
+    }
+    LatexTable table =
+        new LatexTable(
+            "Where the Killing form degenerates", List.of(0.42, 0.1, 0.08, 0.26, 0.14));
+    table.head("Condition", "Power", "Rank", "Kernel", "Real points");
+    for (Condition d : c.conditions()) {
+      table.row(
+          Latex.inline(formulas.vanishing(d.equations())),
+          Integer.toString(d.multiplicity()),
+          Integer.toString(d.rank()),
+          Latex.inline(formulas.span(d.kernel(), c.basis())),
+          Words.realPoints(d.realPoints()));
+    }
+    out.append(table.text());
+  }
+
+  private void strata(List<Stratum> strata) {
+    section("Strata");
+    paragraph(
+        "\\noindent Columns: $n$ dimension of the algebra, $r$ rank of the Killing form, $d$"
+            + " dimension of the derived algebra, $z$ of the centre.");
+    LatexTable table =
+        new LatexTable(
+            "Strata of the parameter variety", List.of(0.08, 0.44, 0.06, 0.06, 0.06, 0.06, 0.24));
+    table.head("Stratum", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
+    for (Stratum s : strata) {
+      table.row(
+          subscripted(s.name()),
+          points(s),
+          Integer.toString(s.dimension()),
+          Integer.toString(s.rank()),
+          Integer.toString(s.derived()),
+          Integer.toString(s.centre()),
+          text(s.type().map(t -> t + ", " + s.kind()).orElse(s.kind())));
+    }
+    out.append(table.text());
+  }
+
+  private static String subscripted(String name) {
+    return "$" + name.substring(0, 1) + "_{" + name.substring(1) + "}$";
+  }
+
+  private String points(Stratum s) {
+    String equations =
+        s.equations().isEmpty() ? "everywhere" : Latex.inline(formulas.vanishing(s.equations()));
+    String exclusions =
+        s.exclusions().stream()
+            .map(e -> Latex.inline(formulas.vanishing(e)))
+            .collect(Collectors.joining(" or "));
+    String real =
+        s.realPoints() == Analysis.RealPoints.YES
+            ? ""
+            : " (real points: " + Words.realPoints(s.realPoints()) + ")";
+    return equations + (exclusions.isEmpty() ? "" : " except " + exclusions) + real;
+  }
+
+  private void regions(List<Region> regions) {
+    section("Real regions");
+    LatexTable table =
+        new LatexTable(
+            "Real regions of the strata", List.of(0.08, 0.08, 0.40, 0.12, 0.18, 0.14));
+    table.head("Stratum", "Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
+    for (Region r : regions) {
+      table.row(
+          subscripted(r.stratum()),
+          subscripted(r.name()),
+          r.conditions().isEmpty()
+              ? "all points"
+              : Latex.inline(
+                  Formulas.sequence(r.conditions().stream().map(formulas::text).toList())),
+          "$("
+              + Stream.of(r.signature().plus(), r.signature().minus(), r.signature().zero())
+                  .map(n -> Integer.toString(n))
+                  .collect(Collectors.joining(","))
+              + ")$",
+          text(r.type().orElse("")),
+          CsvFiles.proof(r.exact()));
+    }
+    out.append(table.text());
+  }
+}

@@ -1,0 +1,157 @@
+package rankfall.report;
+
+import io.pebbletemplates.pebble.extension.escaper.SafeString;
+import java.util.List;
+import rankfall.Analysis;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
+import rankfall.Analysis.Coordinate;
+import rankfall.Analysis.Findings;
+import rankfall.Analysis.MatrixEntry;
+import rankfall.Analysis.Region;
+import rankfall.Analysis.Relation;
+import rankfall.Analysis.Stratum;
+import rankfall.exact.Polynomial;
+
+/** Turns the parts of one analysis into what the page shows. */
+final class PageParts {
+  /** Largest order of a matrix that is set as one; a browser is slow beyond. */
+  private static final int LARGEST_ORDER = 48;
+
+  private final Analysis.Status status;
+  private final Formulas formulas;
+
+  PageParts(Analysis a) {
+    this.status = a.status();
+    this.formulas = new Formulas(FamilyNames.notation(a));
+  }
+
+  private static SafeString math(Formula f) {
+    return new SafeString(MathMl.inline(f));
+  }
+
+  SafeString text(String text) {
+    return math(formulas.text(text));
+  }
+
+  SafeString polynomial(Polynomial p) {
+    return math(formulas.of(p));
+  }
+
+  /** Names as one formula; empty without names. */
+  List<SafeString> names(List<String> names) {
+    return names.isEmpty()
+        ? List.of()
+        : List.of(math(Formulas.sequence(names.stream().map(formulas::text).toList())));
+  }
+
+  PageView.RelationView relation(Relation r) {
+    Formula left =
+        r.factors().size() == 1
+            ? formulas.of(r.factors().get(0))
+            : Formulas.product(
+                r.factors().stream().map(p -> Formulas.enclosed(formulas.of(p))).toList());
+    return new PageView.RelationView(
+        math(Formulas.equal(left, new Formula.Number("0"))), Words.origin(r.origin()));
+  }
+
+  PageView.ComponentView component(Component c, int ofHowMany) {
+    List<String> basis = c.basis();
+    return new PageView.ComponentView(
+        c.number(),
+        ofHowMany == 1 ? "" : "Component " + c.number(),
+        c.equations().isEmpty() ? List.of() : List.of(math(formulas.vanishing(c.equations()))),
+        c.parameterDimension(),
+        Words.general(c),
+        Words.conditions(c, status),
+        c.conditions().stream().map(d -> condition(d, basis)).toList(),
+        FamilyNames.brackets(c, formulas).stream().map(PageParts::math).toList(),
+        math(Formulas.sequence(basis.stream().map(formulas::text).toList())),
+        basis.size(),
+        matrix(basis, c.killing().entries()),
+        c.killing().determinant().map(d -> math(formulas.of(d))).stream().toList(),
+        c.killing().kernel().isEmpty()
+            ? List.of()
+            : List.of(math(formulas.span(c.killing().kernel(), basis))),
+        c.killing().blocks().size() < 2
+            ? List.of()
+            : c.killing().blocks().stream().map(b -> block(b, basis)).toList(),
+        c.dual().map(d -> matrix(basis, d)).stream().toList());
+  }
+
+  private SafeString block(List<Integer> block, List<String> basis) {
+    return math(
+        Formulas.sequence(block.stream().map(k -> formulas.text(basis.get(k))).toList()));
+  }
+
+  private PageView.ConditionView condition(Condition d, List<String> basis) {
+    return new PageView.ConditionView(
+        math(formulas.vanishing(d.equations())),
+        d.multiplicity(),
+        d.rank(),
+        d.kernelDimension(),
+        math(formulas.span(d.kernel(), basis)),
+        Words.realPoints(d.realPoints()));
+  }
+
+  private PageView.MatrixView matrix(List<String> basis, List<MatrixEntry> entries) {
+    if (entries.isEmpty()) {
+      return new PageView.MatrixView(List.of(), List.of());
+    }
+    if (basis.size() <= LARGEST_ORDER) {
+      SquareMatrix m = SquareMatrix.of(basis.size(), entries, formulas);
+      return new PageView.MatrixView(List.of(new SafeString(MathMl.matrix(m.rows()))), List.of());
+    }
+    return new PageView.MatrixView(
+        List.of(),
+        entries.stream()
+            .map(
+                e ->
+                    new PageView.EntryView(
+                        text(basis.get(e.row())),
+                        text(basis.get(e.column())),
+                        math(formulas.of(e.value()))))
+            .toList());
+  }
+
+  PageView.StratumView stratum(Stratum s) {
+    return new PageView.StratumView(
+        s.name(),
+        s.equations().isEmpty() ? List.of() : List.of(math(formulas.vanishing(s.equations()))),
+        s.exclusions().stream().map(e -> math(formulas.vanishing(e))).toList(),
+        s.codimension(),
+        s.dimension(),
+        s.rank(),
+        s.derived(),
+        s.centre(),
+        s.radical(),
+        s.nilradical(),
+        s.kind(),
+        s.type().orElse(""),
+        Words.realPoints(s.realPoints()),
+        witness(s.witness()),
+        s.kernel().isEmpty() ? List.of() : List.of(math(formulas.span(s.kernel(), s.basis()))),
+        s.remarks());
+  }
+
+  private List<SafeString> witness(List<Coordinate> point) {
+    return point.stream()
+        .map(c -> math(Formulas.equal(formulas.text(c.variable()), formulas.text(c.value()))))
+        .toList();
+  }
+
+  SafeString diagram(Findings f) {
+    return new SafeString(ClosureDiagram.of(f.strata(), f.coverings()));
+  }
+
+  PageView.RegionView region(Region r) {
+    return new PageView.RegionView(
+        r.stratum(),
+        r.name(),
+        r.conditions().stream().map(this::text).toList(),
+        Words.signature(r.signature()),
+        r.type().orElse(""),
+        CsvFiles.proof(r.exact()),
+        witness(r.witness()));
+  }
+}

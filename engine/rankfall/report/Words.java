@@ -1,0 +1,125 @@
+package rankfall.report;
+
+import java.util.List;
+import rankfall.Analysis;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
+import rankfall.Analysis.Origin;
+import rankfall.Analysis.RealPoints;
+import rankfall.Analysis.Signature;
+import rankfall.spec.Spec;
+
+/** Sentences that the page and the appendix share. */
+final class Words {
+  private Words() {}
+
+  /** How far the analysis came, a sentence. */
+  static String status(Analysis a) {
+    return switch (a.status()) {
+      case COMPLETE -> "Complete: everything this report states was decided exactly.";
+      case INCOMPLETE ->
+          "Incomplete: what is stated was decided exactly, but lists can lack entries; see what is"
+              + " undecided.";
+      case FAILED -> "Failed: this family has no results.";
+    };
+  }
+
+  /** Why a relation holds. */
+  static String origin(Origin origin) {
+    return switch (origin) {
+      case SPEC -> "stated in the spec";
+      case CLOSURE -> "needed for the span to close under the bracket";
+      case JACOBI -> "needed for the Jacobi identity";
+      case FUNCTION -> "identity between functions of a parameter";
+      case CONSTANT -> "minimal polynomial of an algebraic number";
+    };
+  }
+
+  /** Whether there are real points. */
+  static String realPoints(RealPoints r) {
+    return switch (r) {
+      case YES -> "yes";
+      case NO -> "none";
+      case UNKNOWN -> "not decided";
+    };
+  }
+
+  /** Over which field, and how listed elements relate to the algebra. */
+  static String setting(Spec spec) {
+    boolean real = spec.ground() == Spec.Ground.REAL;
+    boolean hermitian = spec.convention() == Spec.Convention.HERMITIAN;
+    return (real ? "Real span" : "Complex span")
+        + (hermitian ? "; the algebra is spanned by \u2212i times the listed elements." : ".");
+  }
+
+  /** A signature as {@code (2, 1)}, with the zeros where there are some. */
+  static String signature(Signature s) {
+    return "("
+        + s.plus()
+        + ", "
+        + s.minus()
+        + ")"
+        + (s.zero() > 0 ? ", kernel of dimension " + s.zero() : "");
+  }
+
+  /** Rank and signature at a general point, a sentence. */
+  static String general(Component c) {
+    int n = c.basis().size();
+    String form =
+        n == c.killing().rank()
+            ? "is non-degenerate: rank " + n + " in dimension " + n
+            : "is degenerate for all parameter values: rank "
+                + c.killing().rank()
+                + " in dimension "
+                + n;
+    return "At a general point the Killing form "
+        + form
+        + c.killing()
+            .signature()
+            .map(
+                s ->
+                    ", with "
+                        + s.plus()
+                        + " positive and "
+                        + s.minus()
+                        + " negative squares wherever it has this rank at a real point")
+            .orElse("")
+        + ".";
+  }
+
+  /** What the list of conditions of a component says, a sentence. */
+  static String conditions(Component c, Analysis.Status status) {
+    List<Condition> list = c.conditions();
+    boolean complete = status == Analysis.Status.COMPLETE;
+    boolean degenerate = c.killing().rank() < c.basis().size();
+    if (list.isEmpty()) {
+      return complete
+          ? degenerate
+              ? "On no locus of codimension one does the rank fall further."
+              : "It degenerates nowhere: the determinant has no zeros."
+          : "No locus of degeneration is listed. The analysis did not finish, so this does not mean"
+              + " that there is none.";
+    }
+    String lead = degenerate ? "The rank falls further" : "It degenerates";
+    return lead
+        + (complete
+            ? list.size() == 1 ? " exactly here:" : " exactly where one of these holds:"
+            : " where one of these holds (the list can lack entries):");
+  }
+
+  /** A count with its noun. */
+  static String count(int n, String noun, String plural) {
+    return n + " " + (n == 1 ? noun : plural);
+  }
+
+  /** A line by which the result is cited. */
+  static String citation(Analysis a) {
+    return "Family "
+        + a.spec().family()
+        + ", computed with Rankfall "
+        + a.version()
+        + " from the spec with SHA-256 "
+        + a.spec().source().sha256()
+        + ".";
+  }
+}

@@ -1,0 +1,312 @@
+package rankfall.report;
+
+import java.math.BigInteger;
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Map;
+import java.util.Optional;
+import java.util.stream.IntStream;
+import org.apache.commons.numbers.fraction.BigFraction;
+import rankfall.Analysis;
+import rankfall.Analysis.Combination;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
+import rankfall.Analysis.Coordinate;
+import rankfall.Analysis.Covering;
+import rankfall.Analysis.Findings;
+import rankfall.Analysis.Killing;
+import rankfall.Analysis.MatrixEntry;
+import rankfall.Analysis.Origin;
+import rankfall.Analysis.Quotient;
+import rankfall.Analysis.RealPoints;
+import rankfall.Analysis.Region;
+import rankfall.Analysis.Relation;
+import rankfall.Analysis.Signature;
+import rankfall.Analysis.Status;
+import rankfall.Analysis.Stratum;
+import rankfall.Analysis.StructureEntry;
+import rankfall.exact.Factorization;
+import rankfall.exact.Factorization.Factor;
+import rankfall.exact.Polynomial;
+import rankfall.exact.RationalFunction;
+import rankfall.exact.Variables;
+import rankfall.spec.Place;
+import rankfall.spec.Spec;
+
+/** Analyses written by hand, as the writers get them. */
+final class SampleAnalyses {
+  private SampleAnalyses() {}
+
+  static final String SHA = "0123456789abcdef".repeat(4);
+
+  static Spec spec(String family, String title, String notes, List<String> parameters, List<String> generators) {
+    Place place = new Place("sample.yaml", 1, 9, family.length());
+    return new Spec(
+        family,
+        title.isEmpty() ? Optional.empty() : Optional.of(title),
+        notes.isEmpty() ? Optional.empty() : Optional.of(notes),
+        Spec.Ground.REAL,
+        Spec.Convention.DIRECT,
+        parameters,
+        List.of(),
+        List.of(),
+        List.of(),
+        new Spec.Brackets(generators, List.of()),
+        List.of(),
+        Map.of(),
+        Map.of(),
+        new Spec.Source("sample.yaml", List.of("family: " + family), SHA, place));
+  }
+
+  static RationalFunction whole(Polynomial p) {
+    return RationalFunction.of(p);
+  }
+
+  static Factorization factored(long unit, Factor... factors) {
+    return new Factorization(BigFraction.of(unit), List.of(factors));
+  }
+
+  static Combination unit(Variables v, int n, int k) {
+    return new Combination(
+        IntStream.range(0, n)
+            .mapToObj(j -> j == k ? Polynomial.one(v) : Polynomial.zero(v))
+            .toList());
+  }
+
+  /**
+   * sl(2) with [H,X] = 2 X, [H,Y] = -2 Y, [X,Y] = alpha/b_1 H: by hand K(H,H) = 8, K(X,Y) = 4
+   * alpha/b_1, determinant -128 alpha^2/b_1^2; at alpha = 0 the kernel is spanned by X and Y.
+   */
+  static Analysis scaled(Status status, String title, String notes) {
+    Variables v = new Variables(List.of("alpha", "b_1"));
+    Polynomial a = Polynomial.variable(v, "alpha");
+    Polynomial b = Polynomial.variable(v, "b_1");
+    Polynomial one = Polynomial.one(v);
+    RationalFunction two = whole(Polynomial.constant(v, 2));
+    RationalFunction four = whole(Polynomial.constant(v, 4));
+    RationalFunction q = RationalFunction.of(a, b);
+    List<String> basis = List.of("H", "X", "Y");
+    Killing killing =
+        new Killing(
+            List.of(
+                new MatrixEntry(0, 0, whole(Polynomial.constant(v, 8))),
+                new MatrixEntry(1, 2, four.times(q))),
+            3,
+            List.of(),
+            List.of(List.of(0), List.of(1, 2)),
+            Optional.of(
+                new Quotient(
+                    factored(-128, new Factor(a, 2)), factored(1, new Factor(b, 2)))),
+            Optional.of(new Signature(2, 1, 0)));
+    Component c =
+        new Component(
+            1,
+            List.of(),
+            2,
+            basis,
+            List.of(
+                new StructureEntry(0, 1, 1, two),
+                new StructureEntry(0, 2, 2, two.negate()),
+                new StructureEntry(1, 2, 0, q)),
+            killing,
+            Optional.of(
+                List.of(
+                    new MatrixEntry(0, 0, RationalFunction.of(one, Polynomial.constant(v, 8))),
+                    new MatrixEntry(1, 2, RationalFunction.of(b, a.times(BigInteger.valueOf(4)))))),
+            List.of(
+                new Condition(
+                    List.of(a), 2, 1, 2, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
+    return new Analysis(
+        spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
+        "0.1.0",
+        status,
+        status == Status.COMPLETE ? "" : "the time ran out",
+        List.of(),
+        status == Status.COMPLETE ? List.of() : List.of("Factors of the determinant: time ran out."),
+        Optional.of(
+            new Findings(
+                basis, v.names(), List.of(), List.of(b), List.of(c), List.of(), List.of(), List.of())));
+  }
+
+  static Analysis scaled() {
+    return scaled(Status.COMPLETE, "Scaled generators", "Demo family.\nTwo lines.");
+  }
+
+  /** A family of which nothing is known. */
+  static Analysis failed() {
+    return new Analysis(
+        spec("broken", "", "", List.of("a"), List.of("X", "Y")),
+        "0.1.0",
+        Status.FAILED,
+        "the closure needs [X, Y], which is not in the span; <none> & \"quoted\"",
+        List.of(),
+        List.of(),
+        Optional.empty());
+  }
+
+  /**
+   * Rotations with [X,Y] = c Z, [Y,Z] = a X, [Z,X] = b Y: the Killing form is diagonal, -2bc, -2ac,
+   * -2ab, so the rank is 3 where abc != 0, 1 where one of the three vanishes, else 0.
+   */
+  static Analysis stratified() {
+    Variables v = new Variables(List.of("a", "b", "c"));
+    Polynomial a = Polynomial.variable(v, "a");
+    Polynomial b = Polynomial.variable(v, "b");
+    Polynomial c = Polynomial.variable(v, "c");
+    List<String> basis = List.of("X", "Y", "Z");
+    BigInteger m2 = BigInteger.valueOf(-2);
+    List<Combination> all = List.of(unit(v, 3, 0), unit(v, 3, 1), unit(v, 3, 2));
+    Killing killing =
+        new Killing(
+            List.of(
+                new MatrixEntry(0, 0, whole(b.times(c).times(m2))),
+                new MatrixEntry(1, 1, whole(a.times(c).times(m2))),
+                new MatrixEntry(2, 2, whole(a.times(b).times(m2)))),
+            3,
+            List.of(),
+            List.of(List.of(0), List.of(1), List.of(2)),
+            Optional.of(
+                new Quotient(
+                    factored(-8, new Factor(a, 2), new Factor(b, 2), new Factor(c, 2)),
+                    factored(1))),
+            Optional.empty());
+    Component component =
+        new Component(
+            1,
+            List.of(),
+            3,
+            basis,
+            List.of(
+                new StructureEntry(0, 1, 2, whole(c)),
+                new StructureEntry(0, 2, 1, whole(b.negate())),
+                new StructureEntry(1, 2, 0, whole(a))),
+            killing,
+            Optional.empty(),
+            List.of(
+                new Condition(List.of(a), 2, 1, 2, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
+                new Condition(List.of(b), 2, 1, 2, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
+                new Condition(List.of(c), 2, 1, 2, List.of(unit(v, 3, 0), unit(v, 3, 1)), RealPoints.UNKNOWN)));
+    List<Coordinate> origin = point("0", "0", "0");
+    List<Stratum> strata =
+        List.of(
+            stratum("S1", List.of(), List.of(List.of(a), List.of(b), List.of(c)), 0, 3, 3, "simple", Optional.of("sl(2,C)"), point("1", "1", "1"), List.of()),
+            stratum("S2", List.of(a), List.of(List.of(b), List.of(c)), 1, 1, 2, "solvable", Optional.empty(), point("0", "1", "-3/2"), all.subList(1, 3)),
+            stratum("S3", List.of(a, b), List.of(List.of(c)), 2, 0, 1, "nilpotent", Optional.of("Heisenberg"), point("0", "0", "1"), all),
+            stratum("S4", List.of(a, b, c), List.of(), 3, 0, 0, "abelian", Optional.of("R^3"), origin, all));
+    List<Region> regions =
+        List.of(
+            new Region("S1", "R1", List.of("a > 0", "b*c - 2*a^2 < 0"), new Signature(2, 1, 0), Optional.of("sl(2,R)"), true, point("1", "1", "root(x^2 - 2, 1.41421356)")),
+            new Region("S4", "R1", List.of(), new Signature(0, 0, 3), Optional.empty(), false, origin));
+    return new Analysis(
+        spec("stretched-rotor", "Rotations, stretched", "", List.of("a", "b", "c"), basis),
+        "0.1.0",
+        Status.COMPLETE,
+        "",
+        List.of("The span has dimension 3 everywhere."),
+        List.of(),
+        Optional.of(
+            new Findings(
+                basis,
+                v.names(),
+                List.of(new Relation(a.times(b).minus(c), List.of(a.times(b).minus(c)), Origin.JACOBI)),
+                List.of(),
+                List.of(component),
+                strata,
+                List.of(new Covering("S2", "S1"), new Covering("S3", "S2"), new Covering("S4", "S3")),
+                regions)));
+  }
+
+  private static List<Coordinate> point(String a, String b, String c) {
+    return List.of(new Coordinate("a", a), new Coordinate("b", b), new Coordinate("c", c));
+  }
+
+  private static Stratum stratum(
+      String name,
+      List<Polynomial> equations,
+      List<List<Polynomial>> exclusions,
+      int codimension,
+      int rank,
+      int derived,
+      String kind,
+      Optional<String> type,
+      List<Coordinate> witness,
+      List<Combination> kernel) {
+    return new Stratum(
+        name, equations, exclusions, codimension, 3, rank, derived, 3 - derived, 3 - rank, 3 - rank,
+        kind, type, RealPoints.YES, witness, List.of("X", "Y", "Z"), kernel, List.of());
+  }
+
+  /** A form of order n with dense entries of many terms; not the form of an algebra. */
+  static Analysis large(int n) {
+    Variables v = new Variables(List.of("a", "beta", "g12", "x_ab", "cos(t)", "sqrt(2)"));
+    Polynomial sum = Polynomial.constant(v, 1);
+    for (int k = 0; k < v.count(); k++) {
+      sum = sum.plus(Polynomial.variable(v, k).times(BigInteger.valueOf(k % 2 == 0 ? k + 1 : -k - 3)));
+    }
+    Polynomial longOne = sum.pow(3).minus(sum.pow(2));
+    List<String> basis = IntStream.range(0, n).mapToObj(k -> k % 3 == 0 ? "L" + k : k % 3 == 1 ? "J_" + k : "Lambda" + k).toList();
+    List<MatrixEntry> entries = new ArrayList<>();
+    List<StructureEntry> structure = new ArrayList<>();
+    for (int i = 0; i < n; i++) {
+      for (int j = i; j < n; j++) {
+        Polynomial x = Polynomial.variable(v, (i + j) % 6);
+        if ((i * j) % 3 != 1) {
+          entries.add(new MatrixEntry(i, j, j == i + 1 ? RationalFunction.of(sum, x) : whole(x.pow(2).times(BigInteger.valueOf(i - 7L)).minus(Polynomial.variable(v, 0)))));
+        }
+        if (i < j && j < i + 3) {
+          structure.add(new StructureEntry(i, j, (i + j) % n, RationalFunction.of(x, sum)));
+          structure.add(new StructureEntry(i, j, (i + j + 1) % n, whole(i == 2 ? longOne : sum)));
+        }
+      }
+    }
+    Component c =
+        new Component(
+            1, List.of(), 4, basis, structure,
+            new Killing(
+                entries, n, List.of(), List.of(), 
+                Optional.of(new Quotient(factored(-12345, new Factor(sum, 3), new Factor(longOne, 2)), factored(7, new Factor(Polynomial.variable(v, 1), 4)))),
+                Optional.empty()),
+            Optional.of(entries),
+            List.of(
+                new Condition(List.of(longOne), 2, n - 1, 1, List.of(new Combination(IntStream.range(0, n).mapToObj(k -> k % 4 == 0 ? Polynomial.variable(v, k % 6).minus(Polynomial.one(v)) : Polynomial.variable(v, k % 6)).toList())), RealPoints.UNKNOWN),
+                new Condition(List.of(sum, Polynomial.variable(v, 4).pow(2).minus(Polynomial.one(v))), 3, n - 3, 3, List.of(unit(v, n, 0), unit(v, n, 4), unit(v, n, 5)), RealPoints.NO)));
+    return new Analysis(
+        spec("large", "A dense form of order " + n + " in \u03b1 and \u03b2", "", List.of("a", "beta", "g12", "x_ab"), basis),
+        "0.1.0",
+        Status.INCOMPLETE,
+        "the time of 5 minutes ran out while factors were sought",
+        List.of(),
+        List.of("Whether condition 1 has real points: the budget of 5 minutes ran out."),
+        Optional.of(new Findings(basis, v.names(), List.of(), List.of(), List.of(c), List.of(), List.of(), List.of())));
+  }
+
+  /** As many strata as wanted in a lattice of coverings, for the diagram. */
+  static Analysis manyStrata(int count) {
+    Analysis a = stratified();
+    Findings f = a.findings().orElseThrow();
+    List<Stratum> strata = new ArrayList<>();
+    List<Covering> coverings = new ArrayList<>();
+    int perLayer = 6;
+    for (int k = 0; k < count; k++) {
+      Stratum s = f.strata().get(k % 4);
+      int layer = k == 0 ? 0 : 1 + (k - 1) / perLayer;
+      strata.add(
+          new Stratum(
+              "S" + (k + 1), s.equations(), s.exclusions(), layer, 3, s.rank(), s.derived(), s.centre(), s.radical(), s.nilradical(),
+              s.kind(), s.type(), s.realPoints(), s.witness(), s.basis(), s.kernel(), List.of()));
+      if (k > 0) {
+        int up = layer == 1 ? 0 : k - perLayer;
+        coverings.add(new Covering("S" + (k + 1), "S" + (up + 1)));
+        if (layer > 1 && k % 2 == 0 && up + 1 < k) {
+          coverings.add(new Covering("S" + (k + 1), "S" + (up + 2)));
+        }
+        if (layer == 3 && k % 5 == 0) {
+          coverings.add(new Covering("S" + (k + 1), "S1"));
+        }
+      }
+    }
+    return new Analysis(
+        a.spec(), a.version(), a.status(), a.message(), a.remarks(), a.undecided(),
+        Optional.of(new Findings(f.listed(), f.variables(), f.relations(), f.poles(), f.components(), strata, coverings, f.regions())));
+  }
+}
