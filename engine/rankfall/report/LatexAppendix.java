@@ -48,6 +48,7 @@ final class LatexAppendix {
 
   private void section(String title) {
     line("");
+    line(Latex.ROOM);
     line("\\subsection*{" + title + "}");
   }
 
@@ -65,7 +66,8 @@ final class LatexAppendix {
     line("% Rankfall " + analysis.version() + ", family " + family);
     line("% SHA-256 of the spec: " + analysis.spec().source().sha256());
     line("% For \\input in a document that loads amsmath, booktabs and longtable.");
-    line(Latex.DEFINITION);
+    line(Latex.DEFINITIONS);
+    line(Latex.ROOM);
     line("\\section{" + text(analysis.spec().title().orElse(family)) + "}");
     line("\\label{rankfall:" + family + "}");
     paragraph("\\noindent " + text(Words.status(analysis)));

@@ -32,7 +32,11 @@ public record SummaryRow(List<String> cells) {
           "type",
           "message");
 
-  /** Copies the cells and checks their number. */
+  /**
+   * Copies the cells and checks their number.
+   *
+   * @param cells one text a column
+   */
   public SummaryRow {
     cells = List.copyOf(cells);
     if (cells.size() != HEADER.size()) {
