@@ -58,27 +58,8 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
 
   /** Index sets, ascending, between which all entries are 0. */
   public List<List<Integer>> blocks() {
-    int n = matrix.size();
-    int[] block = new int[n];
-    for (int i = 0; i < n; i++) {
-      block[i] = i;
-    }
-    for (int i = 0; i < n; i++) {
-      for (int j = 0; j < n; j++) {
-        if (!matrix.get(i).get(j).isZero() && block[i] != block[j]) {
-          int from = Math.max(block[i], block[j]);
-          int to = Math.min(block[i], block[j]);
-          for (int m = 0; m < n; m++) {
-            block[m] = block[m] == from ? to : block[m];
-          }
-        }
-      }
-    }
-    SortedMap<Integer, List<Integer>> out = new TreeMap<>();
-    for (int i = 0; i < n; i++) {
-      out.computeIfAbsent(block[i], b -> new ArrayList<>()).add(i);
-    }
-    return List.copyOf(out.values());
+    return ZeroPattern.blocks(
+        matrix.size(), (i, j) -> !matrix.get(i).get(j).isZero());
   }
 
   /**
