@@ -180,10 +180,7 @@ class SpanTest {
             Specs.real("a", "b", "m")
                 .matrix("X", "0,m,0;0,0,b;0,0,0")
                 .matrix("Y", "0,1,0;0,0,a/m;0,0,0"));
-    Span.Open<Polynomial> open =
-        assertInstanceOf(Span.Open.class, Brackets.generic(f)).getClass().isInstance(null)
-            ? null
-            : (Span.Open<Polynomial>) Brackets.generic(f);
+    Span.Open<Polynomial> open = (Span.Open<Polynomial>) Brackets.generic(f);
     assertEquals(List.of("a - b"), open.conditions().stream().map(this::text).toList());
     assertEquals(List.of(0, 1), open.missing().get(0).generators());
     assertInstanceOf(Span.Open.class, rational(f, "a=1", "b=2", "m=1"));
