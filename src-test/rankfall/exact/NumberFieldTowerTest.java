@@ -20,7 +20,7 @@ class NumberFieldTowerTest {
   void factorIsChosenByTheRoot() {
     NumberFieldTower t =
         ROOT_OF_TWO.with("q", polynomial(-2, 0, 0, 0, 1), BigFraction.of(1)).tower();
-    assertEquals("q^2 - s", t.chain().rules().get(1).equation().toString().replace("-s + q^2", "q^2 - s"));
+    assertEquals("q^2 - s", t.chain().rules().get(1).equation().toString());
     NumberFieldTower.Extension minus =
         ROOT_OF_TWO.with("m", polynomial(-2, 0, 1), BigFraction.of(-1));
     assertEquals("-s", minus.value().toString());
