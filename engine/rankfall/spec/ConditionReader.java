@@ -70,7 +70,7 @@ final class ConditionReader {
     if (a.isEmpty() || b.isEmpty()) {
       return;
     }
-    int order = a.get().compareTo(b.get());
+    int order = a.get().subtract(b.get()).signum();
     boolean holds =
         switch (relation) {
           case EQUAL -> order == 0;
