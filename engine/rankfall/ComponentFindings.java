@@ -22,6 +22,7 @@ import rankfall.locus.Leaf;
 import rankfall.locus.Loci;
 import rankfall.locus.Meter;
 import rankfall.locus.Partition;
+import rankfall.locus.RealPoints;
 import rankfall.locus.Strata;
 import rankfall.spec.Spec;
 
@@ -83,11 +84,11 @@ record ComponentFindings(Spec spec, Family family, Partition partition, Meter me
         l.multiplicity(),
         l.rank(),
         l.algebra().map(a -> a.constants().dimension() - l.rank().orElseThrow()),
+        l.algebra().map(a -> a.basis()).orElse(List.of()),
         l.algebra().map(a -> a.kernel()).orElse(List.of()).stream()
             .map(Combination::new)
             .toList(),
-        l.algebra().map(a -> a.basis()).orElse(List.of()),
-        RealPoints.of(family, l.closure()));
+        StratumFindings.verdict(new RealPoints(family).onClosure(l.closure())));
   }
 
   private static List<StructureEntry> structure(ComponentForm c) {

@@ -6,10 +6,12 @@ import java.nio.file.Path;
 import java.util.List;
 import rankfall.Analysis;
 import rankfall.Budget;
+import rankfall.Engine;
 import rankfall.report.ReportWriter;
 import rankfall.report.SummaryRow;
 import rankfall.spec.Diagnostic;
 import rankfall.spec.Spec;
+import rankfall.spec.SpecException;
 import rankfall.spec.SpecReader;
 import rankfall.spec.SpecResult;
 import rankfall.spec.SpecSchema;
@@ -27,8 +29,8 @@ final class Program implements FrontDoors {
   }
 
   @Override
-  public Analysis analyse(Spec spec, Budget budget) {
-    throw absent("Engine");
+  public Analysis analyse(Spec spec, Budget budget) throws SpecException {
+    return Engine.analyse(spec, budget);
   }
 
   @Override

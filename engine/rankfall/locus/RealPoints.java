@@ -2,8 +2,10 @@ package rankfall.locus;
 
 import java.util.ArrayList;
 import java.util.List;
+import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.AlgebraicNumber;
 import rankfall.exact.Chain;
+import rankfall.exact.ConstantRoot;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RealZeros;
 import rankfall.lie.Family;
@@ -52,7 +54,28 @@ public final class RealPoints {
     family.poles()
         .forEach(p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));
     family.domain().forEach(c -> conditions.add(condition(c)));
+    conditions.addAll(rootsOfConstants());
     return RealZeros.exist(family.ring().variables(), all, conditions);
+  }
+
+  /** Intervals that tell the root of each algebraic number from its conjugates. */
+  private List<RealZeros.Condition> rootsOfConstants() {
+    List<RealZeros.Condition> out = new ArrayList<>();
+    List<ConstantRoot> roots = family.ring().tower().roots();
+    for (int k = 0; k < roots.size(); k++) {
+      int variable = family.ring().constants().rules().get(k).variable();
+      Polynomial x = Polynomial.variable(family.ring().variables(), variable);
+      out.add(above(x, roots.get(k).low()));
+      out.add(above(x.negate(), roots.get(k).high().negate()));
+    }
+    return out;
+  }
+
+  private static RealZeros.Condition above(Polynomial x, BigFraction bound) {
+    return new RealZeros.Condition(
+        x.times(bound.getDenominator())
+            .minus(Polynomial.constant(x.variables(), bound.getNumerator())),
+        RealZeros.Relation.POSITIVE);
   }
 
   private static RealZeros.Condition condition(FamilyCondition c) {

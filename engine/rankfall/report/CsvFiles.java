@@ -62,8 +62,8 @@ final class CsvFiles {
                 Integer.toString(c.number()),
                 equations(d.equations()),
                 Integer.toString(d.multiplicity()),
-                Integer.toString(d.rank()),
-                Integer.toString(d.kernelDimension()),
+                d.rank().map(r -> Integer.toString(r)).orElse(""),
+                d.kernelDimension().map(k -> Integer.toString(k)).orElse(""),
                 realPoints(d.realPoints())));
       }
     }

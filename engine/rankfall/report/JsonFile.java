@@ -130,7 +130,7 @@ final class JsonFile {
     } else {
       out.putNull("dual");
     }
-    out.set("conditions", array(c.conditions(), (node, d) -> condition(node, d, basis)));
+    out.set("conditions", array(c.conditions(), JsonFile::condition));
   }
 
   private static ObjectNode killing(Killing k, List<String> basis) {
@@ -156,12 +156,12 @@ final class JsonFile {
     return out;
   }
 
-  private static void condition(ObjectNode out, Condition d, List<String> basis) {
+  private static void condition(ObjectNode out, Condition d) {
     out.set("equations", polynomials(d.equations()));
     out.put("multiplicity", d.multiplicity());
-    out.put("rank", d.rank());
-    out.put("kernel_dimension", d.kernelDimension());
-    out.set("kernel", combinations(d.kernel(), basis));
+    out.put("rank", d.rank().orElse(null));
+    out.put("kernel_dimension", d.kernelDimension().orElse(null));
+    out.set("kernel", combinations(d.kernel(), d.basis()));
     out.put("real_points", word(d.realPoints()));
   }
 

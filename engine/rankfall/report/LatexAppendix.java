@@ -235,8 +235,8 @@ final class LatexAppendix {
       table.row(
           Latex.inline(formulas.vanishing(d.equations())),
           Integer.toString(d.multiplicity()),
-          Integer.toString(d.rank()),
-          Latex.inline(formulas.span(d.kernel(), c.basis())),
+          d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
+          d.rank().isEmpty() ? "" : Latex.inline(formulas.span(d.kernel(), d.basis())),
           Words.realPoints(d.realPoints()));
     }
     out.append(table.text());

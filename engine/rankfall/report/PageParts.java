@@ -69,7 +69,7 @@ final class PageParts {
         c.parameterDimension(),
         Words.general(c),
         Words.conditions(c, status),
-        c.conditions().stream().map(d -> condition(d, basis)).toList(),
+        c.conditions().stream().map(this::condition).toList(),
         FamilyNames.brackets(c, formulas).stream().map(PageParts::math).toList(),
         math(Formulas.sequence(basis.stream().map(formulas::text).toList())),
         basis.size(),
@@ -90,13 +90,14 @@ final class PageParts {
     return math(Formulas.sequence(block.stream().map(k -> formulas.text(basis.get(k))).toList()));
   }
 
-  private PageView.ConditionView condition(Condition d, List<String> basis) {
+  private PageView.ConditionView condition(Condition d) {
     return new PageView.ConditionView(
         math(formulas.vanishing(d.equations())),
         d.multiplicity(),
-        d.rank(),
-        d.kernelDimension(),
-        math(formulas.span(d.kernel(), basis)),
+        d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
+        d.rank().isEmpty()
+            ? new SafeString("&#8211;")
+            : math(formulas.span(d.kernel(), d.basis())),
         Words.realPoints(d.realPoints()));
   }
 

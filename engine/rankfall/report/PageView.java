@@ -69,8 +69,7 @@ record PageView(
   record ConditionView(
       SafeString formula,
       int multiplicity,
-      int rank,
-      int kernelDimension,
+      String rank,
       SafeString kernel,
       String realPoints) {}
 

@@ -15,6 +15,9 @@ final class Words {
   static final String NO_GENERAL_POINT =
       "Not decided: no general point of the parameter variety was analysed.";
 
+  /** What stands in place of the rank where the span is not closed. */
+  static final String NO_ALGEBRA = "no algebra";
+
   private Words() {}
 
   /** How far the analysis came, a sentence. */
