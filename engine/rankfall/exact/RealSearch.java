@@ -166,7 +166,7 @@ final class RealSearch {
         return NO;
       }
     }
-    Optional<Linear> linear = linear(equations);
+    Optional<Linear> linear = Linear.simplest(equations);
     if (linear.isPresent()) {
       return eliminated(linear.get(), equations, conditions, depth);
     }
@@ -178,25 +178,6 @@ final class RealSearch {
         : several(equations, conditions, depth);
   }
 
-  /** An equation {@code a*v + b}. */
-  private record Linear(Polynomial equation, int variable, Polynomial a, Polynomial b) {}
-
-  private static Optional<Linear> linear(List<Polynomial> equations) {
-    List<Linear> all = new ArrayList<>();
-    for (Polynomial f : equations) {
-      for (int v : f.support()) {
-        if (f.degree(v) == 1) {
-          all.add(new Linear(f, v, f.coefficient(v, 1), f.coefficient(v, 0)));
-        }
-      }
-    }
-    return all.stream()
-        .min(
-            Comparator.comparingInt((Linear l) -> l.a().isConstant() ? 0 : 1)
-                .thenComparingInt(l -> l.equation().termCount())
-                .thenComparingInt(l -> l.a().termCount()));
-  }
-
   private Found eliminated(
       Linear l, List<Polynomial> equations, List<Condition> conditions, int depth) {
     Branch solved =
@@ -204,13 +185,13 @@ final class RealSearch {
           List<Polynomial> eqs = new ArrayList<>();
           for (Polynomial f : equations) {
             if (!f.equals(l.equation())) {
-              eqs.add(put(l, f, 0));
+              eqs.add(l.into(f));
             }
           }
           List<Condition> conds = new ArrayList<>();
           for (Condition c : conditions) {
             Polynomial p = c.polynomial();
-            conds.add(new Condition(put(l, p, p.degree(l.variable()) % 2), c.relation()));
+            conds.add(new Condition(l.keepingSign(p), c.relation()));
           }
           conds.add(new Condition(l.a(), Relation.NON_ZERO));
           Found f = solve(eqs, conds, depth + 1);
@@ -229,19 +210,6 @@ final class RealSearch {
                     replaced(equations, l.equation(), List.of(l.a(), l.b())),
                     conditions,
                     depth + 1)));
-  }
-
-  /** {@code a^(degree + extra) * f} with -b/a in place of the variable. */
-  private Polynomial put(Linear l, Polynomial f, int extra) {
-    int d = f.degree(l.variable());
-    Polynomial sum = Polynomial.zero(ring);
-    Polynomial minus = l.b().negate();
-    for (int k = 0; k <= d; k++) {
-      sum =
-          sum.plus(
-              f.coefficient(l.variable(), k).times(minus.pow(k)).times(l.a().pow(d - k + extra)));
-    }
-    return sum;
   }
 
   private List<Integer> support(List<Polynomial> equations, List<Condition> conditions) {

@@ -12,15 +12,21 @@ public final class RealZeros {
 
   /** The three answers. */
   public enum Verdict {
+    /** There is a point. */
     YES,
+    /** There is none. */
     NO,
+    /** The bounds of the search were met first. */
     UNKNOWN
   }
 
   /** How a polynomial compares with 0. */
   public enum Relation {
+    /** Greater than 0. */
     POSITIVE,
+    /** 0 or greater. */
     NON_NEGATIVE,
+    /** Not 0. */
     NON_ZERO
   }
 
@@ -36,17 +42,23 @@ public final class RealZeros {
    * An answer.
    *
    * @param verdict whether there is a point
-   * @param point where one was found: a coordinate a variable of the ring; else empty
+   * @param point where one was found and all its coordinates lie in one field of degree at most
+   *     that of one root: a coordinate a variable of the ring; else empty
    */
   public record Answer(Verdict verdict, List<AlgebraicNumber> point) {
-    /** Copies the point. */
+    /**
+     * Copies the point.
+     *
+     * @param verdict whether there is a point
+     * @param point coordinates or empty
+     */
     public Answer {
       point = List.copyOf(point);
     }
   }
 
   /**
-   * Asks for a real zero.
+   * {@return whether there is a real point, and one where it was found}
    *
    * @param ring the ring of all polynomials
    * @param equations all are to vanish

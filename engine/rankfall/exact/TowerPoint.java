@@ -35,7 +35,7 @@ public final class TowerPoint {
   }
 
   /**
-   * The point at which every chosen tower variable is the real root nearest to a number.
+   * {@return the point at which every chosen tower variable is the real root nearest to a number}
    *
    * @param chain rules; those of the chosen variables hold no variable but chosen ones
    * @param near a number for each tower variable that is to have a value; tower variables left out
@@ -179,12 +179,16 @@ public final class TowerPoint {
     return sum;
   }
 
-  /** The values of the tower variables, by position. */
+  /** {@return the values of the tower variables, by position} */
   public SortedMap<Integer, AlgebraicNumber> coordinates() {
     return coordinates;
   }
 
-  /** Whether a polynomial holds only variables that have a value here. */
+  /**
+   * {@return whether a polynomial holds only variables that have a value here}
+   *
+   * @param p any
+   */
   public boolean covers(Polynomial p) {
     return p.support().stream()
         .allMatch(
@@ -201,7 +205,7 @@ public final class TowerPoint {
   }
 
   /**
-   * The exact sign of a polynomial: -1, 0 or 1.
+   * {@return the exact sign of a polynomial: -1, 0 or 1}
    *
    * @param p holds only variables that have a value here
    * @throws IllegalArgumentException if it holds another
@@ -227,7 +231,7 @@ public final class TowerPoint {
   }
 
   /**
-   * The exact sign of a quotient: -1, 0 or 1.
+   * {@return the exact sign of a quotient: -1, 0 or 1}
    *
    * @param f holds only variables that have a value here
    * @throws ArithmeticException if the denominator vanishes
@@ -292,7 +296,7 @@ public final class TowerPoint {
   }
 
   /**
-   * An interval that holds the value of a polynomial.
+   * {@return an interval that holds the value of a polynomial}
    *
    * @param p holds only variables that have a value here
    * @param width at most so wide; positive
@@ -310,7 +314,7 @@ public final class TowerPoint {
   }
 
   /**
-   * The greatest integer not above the value.
+   * {@return the greatest integer not above the value}
    *
    * @param p holds only variables that have a value here
    */
@@ -324,7 +328,7 @@ public final class TowerPoint {
   }
 
   /**
-   * The least integer not below the value.
+   * {@return the least integer not below the value}
    *
    * @param p holds only variables that have a value here
    */
@@ -333,7 +337,7 @@ public final class TowerPoint {
   }
 
   /**
-   * The value rounded to a decimal; halves are rounded up.
+   * {@return the value rounded to a decimal; halves are rounded up}
    *
    * @param p holds only variables that have a value here
    * @param digits after the point, 0 or more
@@ -349,7 +353,7 @@ public final class TowerPoint {
   }
 
   /**
-   * A short rational number strictly between two different values.
+   * {@return a short rational number strictly between two different values}
    *
    * @param p one polynomial
    * @param q another
