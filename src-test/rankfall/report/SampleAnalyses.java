@@ -403,8 +403,9 @@ final class SampleAnalyses {
                 new Condition(
                     List.of(longOne),
                     2,
-                    n - 1,
-                    1,
+                    Optional.of(n - 1),
+                    Optional.of(1),
+                    basis,
                     List.of(
                         new Combination(
                             IntStream.range(0, n)
@@ -418,8 +419,9 @@ final class SampleAnalyses {
                 new Condition(
                     List.of(sum, Polynomial.variable(v, 4).pow(2).minus(Polynomial.one(v))),
                     3,
-                    n - 3,
-                    3,
+                    Optional.of(n - 3),
+                    Optional.of(3),
+                    basis,
                     List.of(unit(v, n, 0), unit(v, n, 4), unit(v, n, 5)),
                     RealPoints.NO)));
     return new Analysis(
