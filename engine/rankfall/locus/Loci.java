@@ -80,8 +80,15 @@ public final class Loci {
         out.addAll(directly(component, f, determinant));
       }
     }
+    out.removeIf(l -> isRegular(l, profile));
     out.sort(Comparator.comparing((Locus l) -> sizeAndText(l.equations())));
     return out;
+  }
+
+  /** Whether only the basis degenerates there: generated ones may where the algebra does not. */
+  private static boolean isRegular(Locus l, Profile profile) {
+    return l.algebra().map(a -> a.constants().dimension()).equals(Optional.of(profile.dimension()))
+        && l.rank().equals(Optional.of(profile.rank()));
   }
 
   private static String sizeAndText(List<Polynomial> equations) {
