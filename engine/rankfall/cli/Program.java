@@ -6,10 +6,16 @@ import java.nio.file.Path;
 import java.util.List;
 import rankfall.Analysis;
 import rankfall.Budget;
+import rankfall.Points;
+import rankfall.report.PointCsv;
+import rankfall.report.PointJson;
+import rankfall.report.PointText;
+import rankfall.report.PointWriter;
 import rankfall.report.ReportWriter;
 import rankfall.report.SummaryRow;
 import rankfall.spec.Diagnostic;
 import rankfall.spec.Spec;
+import rankfall.spec.SpecException;
 import rankfall.spec.SpecReader;
 import rankfall.spec.SpecResult;
 import rankfall.spec.SpecSchema;
@@ -42,8 +48,17 @@ final class Program implements FrontDoors {
   }
 
   @Override
-  public PointAnswers points(Spec spec, PointForm form) {
-    throw absent("Engine");
+  public PointAnswers points(Spec spec, PointForm form) throws SpecException {
+    Points points = Points.of(spec);
+    return new ProgramPoints(points, writer(points, form));
+  }
+
+  private static PointWriter writer(Points points, PointForm form) {
+    return switch (form) {
+      case TEXT -> new PointText();
+      case JSON -> new PointJson();
+      case CSV -> new PointCsv(points.names());
+    };
   }
 
   private static SummaryRow row(Outcome outcome) {
