@@ -17,8 +17,7 @@ import rankfall.lie.FamilyRing;
  * @param coordinates those that determine the point
  * @param functions what a parameter that is an argument of functions stands for, by parameter
  */
-record PointNames(
-    List<String> all, List<String> coordinates, Map<String, List<String>> functions) {
+record PointNames(List<String> all, List<String> coordinates, Map<String, List<String>> functions) {
   static PointNames of(FamilyRing ring) {
     List<String> coordinates = new ArrayList<>(ring.variables().names());
     for (Chain.Rule r : ring.constants().rules()) {

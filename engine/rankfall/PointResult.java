@@ -15,8 +15,8 @@ public sealed interface PointResult {
   /**
    * The point.
    *
-   * @return values by name as exact fractions, in the order of the family; of a point that could not
-   *     be read the texts as given
+   * @return values by name as exact fractions, in the order of the family; of a point that could
+   *     not be read the texts as given
    */
   Map<String, String> parameters();
 

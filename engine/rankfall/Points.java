@@ -125,8 +125,7 @@ public final class Points {
     PointFacts facts(Span.Closed<E> closed);
   }
 
-  private <E> PointResult answer(
-      Map<String, BigFraction> point, Span<E> span, Analyst<E> analyst) {
+  private <E> PointResult answer(Map<String, BigFraction> point, Span<E> span, Analyst<E> analyst) {
     if (span instanceof Span.Closed<E> closed) {
       return facts(point, analyst.facts(closed));
     }
@@ -165,9 +164,7 @@ public final class Points {
         f.dimension(),
         new PointResult.Killing(
             f.killing().rank(),
-            f.killing()
-                .signature()
-                .map(s -> new Analysis.Signature(s.plus(), s.minus(), s.zero())),
+            f.killing().signature().map(s -> new Analysis.Signature(s.plus(), s.minus(), s.zero())),
             f.killing().determinant(),
             f.killing().matrix()),
         f.derivedSeries(),
@@ -189,10 +186,8 @@ public final class Points {
         strata.of(point));
   }
 
-  private PointResult failure(
-      Map<String, BigFraction> point, OptionalInt dimension, String error) {
-    return new PointResult.Failure(
-        family(), texts(point), family.names().size(), dimension, error);
+  private PointResult failure(Map<String, BigFraction> point, OptionalInt dimension, String error) {
+    return new PointResult.Failure(family(), texts(point), family.names().size(), dimension, error);
   }
 
   /** The values in the order of the family. */
@@ -218,7 +213,9 @@ public final class Points {
     if (jacobi) {
       return "Jacobi's identity fails for " + all;
     }
-    return "the span is not closed: " + all + (open.missing().size() == 1 ? " leaves" : " leave")
+    return "the span is not closed: "
+        + all
+        + (open.missing().size() == 1 ? " leaves" : " leave")
         + " it";
   }
 

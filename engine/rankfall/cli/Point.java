@@ -43,7 +43,8 @@ final class Point implements Callable<Integer> {
       index = "1..*",
       arity = "0..*",
       paramLabel = "NAME=VALUE",
-      description = "An exact value for each parameter, such as a=1 b=-3/2 c=0.25, or \"cos(t)=3/5\".")
+      description =
+          "An exact value for each parameter, such as a=1 b=-3/2 c=0.25, or \"cos(t)=3/5\".")
   private List<String> values = List.of();
 
   @Option(

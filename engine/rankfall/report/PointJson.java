@@ -34,9 +34,7 @@ public final class PointJson implements PointWriter {
     writer =
         new ObjectMapper()
             .writer(
-                new DefaultPrettyPrinter(spaced)
-                    .withObjectIndenter(flat)
-                    .withArrayIndenter(flat));
+                new DefaultPrettyPrinter(spaced).withObjectIndenter(flat).withArrayIndenter(flat));
   }
 
   @Override

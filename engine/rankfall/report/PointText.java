@@ -57,9 +57,7 @@ public final class PointText implements PointWriter {
     out.add(line("invariant forms", forms(f.invariantForms())));
     out.add(line("properties", properties(f)));
     f.name().ifPresent(n -> out.add(line("stratum", n.stratum())));
-    f.name()
-        .flatMap(StratumNames.Name::type)
-        .ifPresent(t -> out.add(line("type", t)));
+    f.name().flatMap(StratumNames.Name::type).ifPresent(t -> out.add(line("type", t)));
     return out;
   }
 

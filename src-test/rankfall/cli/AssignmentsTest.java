@@ -37,8 +37,7 @@ final class AssignmentsTest {
   void aWrongCallIsExplained(String call, String message) {
     IllegalArgumentException wrong =
         assertThrows(
-            IllegalArgumentException.class,
-            () -> Assignments.of(List.of(call.split(" "))));
+            IllegalArgumentException.class, () -> Assignments.of(List.of(call.split(" "))));
     assertEquals(message, wrong.getMessage());
   }
 }

@@ -78,7 +78,9 @@ final class RecordingDoors implements FrontDoors {
       public Iterator<Answer> atEach(Reader table) {
         return new BufferedReader(table)
             .lines()
-            .map(row -> row.equals("x") ? new Answer("error\n", false) : new Answer(row + "\n", true))
+            .map(
+                row ->
+                    row.equals("x") ? new Answer("error\n", false) : new Answer(row + "\n", true))
             .iterator();
       }
     };
