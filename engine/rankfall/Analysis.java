@@ -169,16 +169,19 @@ public record Analysis(
    *
    * @param equations one irreducible polynomial, or more where the component has equations
    * @param multiplicity of the polynomial in the determinant; 1 where there is no determinant
-   * @param rank of the form at the general point of the locus
+   * @param rank of the form at the general point of the locus; empty where there is no algebra, the
+   *     span not being closed
    * @param kernelDimension of the form there
+   * @param basis names of the basis of the algebra there
    * @param kernel a basis of the kernel there
    * @param realPoints of the closed locus
    */
   public record Condition(
       List<Polynomial> equations,
       int multiplicity,
-      int rank,
-      int kernelDimension,
+      Optional<Integer> rank,
+      Optional<Integer> kernelDimension,
+      List<String> basis,
       List<Combination> kernel,
       RealPoints realPoints) {}
 

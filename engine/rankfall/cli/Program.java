@@ -6,6 +6,7 @@ import java.nio.file.Path;
 import java.util.List;
 import rankfall.Analysis;
 import rankfall.Budget;
+import rankfall.Engine;
 import rankfall.Points;
 import rankfall.report.PointCsv;
 import rankfall.report.PointJson;
@@ -33,8 +34,8 @@ final class Program implements FrontDoors {
   }
 
   @Override
-  public Analysis analyse(Spec spec, Budget budget) {
-    throw absent("Engine");
+  public Analysis analyse(Spec spec, Budget budget) throws SpecException {
+    return Engine.analyse(spec, budget);
   }
 
   @Override
@@ -69,9 +70,5 @@ final class Program implements FrontDoors {
     Diagnostic first = faulty.diagnostics().get(0);
     return SummaryRow.failed(
         faulty.family().orElseGet(() -> first.place().file()), first.headline());
-  }
-
-  private static IllegalStateException absent(String room) {
-    return new IllegalStateException(room + " is not joined to the command line");
   }
 }

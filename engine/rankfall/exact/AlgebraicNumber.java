@@ -26,7 +26,7 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
   }
 
   /**
-   * A rational number.
+   * {@return a rational number}
    *
    * @param value any
    */
@@ -38,7 +38,7 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
   }
 
   /**
-   * The real roots of a polynomial, each once, ascending.
+   * {@return the real roots of a polynomial, each once, ascending}
    *
    * @param p not 0; at most one variable occurs in it
    */
@@ -76,28 +76,28 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
     return k.isPresent() ? Optional.of(roots.get(k.getAsInt())) : Optional.empty();
   }
 
-  /** The minimal polynomial in a variable x: primitive, leading coefficient positive. */
+  /** {@return the minimal polynomial in a variable x: primitive, leading coefficient positive} */
   public Polynomial minimalPolynomial() {
     return minimal.polynomial();
   }
 
-  /** The degree over the rational numbers; 1 for a rational number. */
+  /** {@return the degree over the rational numbers; 1 for a rational number} */
   public int degree() {
     return minimal.degree();
   }
 
-  /** Whether the degree is 1. */
+  /** {@return whether the degree is 1} */
   public boolean isRational() {
     return degree() == 1;
   }
 
-  /** The value of a rational number; empty for an irrational one. */
+  /** {@return the value of a rational number; empty for an irrational one} */
   public Optional<BigFraction> rational() {
     return isRational() ? Optional.of(isolating.lower()) : Optional.empty();
   }
 
   /**
-   * An interval that holds the number.
+   * {@return an interval that holds the number}
    *
    * @param width at most so wide; positive
    */
@@ -105,13 +105,13 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
     return RealRoots.refined(minimal, isolating, width);
   }
 
-  /** The sign: -1, 0 or 1. */
+  /** {@return the sign: -1, 0 or 1} */
   public int sign() {
     return compareTo(BigFraction.ZERO);
   }
 
   /**
-   * The sign of the difference to a rational number.
+   * {@return the sign of the difference to a rational number}
    *
    * @param value what is taken away
    */
@@ -145,7 +145,7 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
   }
 
   /**
-   * The exact sign of a polynomial at this number.
+   * {@return the exact sign of a polynomial at this number}
    *
    * @param p at most one variable occurs in it
    */
@@ -170,12 +170,12 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
     }
   }
 
-  /** The greatest integer not above the number. */
+  /** {@return the greatest integer not above the number} */
   public BigInteger floor() {
     return floorOf(BigInteger.ONE, BigFraction.ZERO);
   }
 
-  /** The least integer not below the number. */
+  /** {@return the least integer not below the number} */
   public BigInteger ceil() {
     return isRational() && Rationals.denominator(isolating.lower()).equals(BigInteger.ONE)
         ? floor()
@@ -200,7 +200,7 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
   }
 
   /**
-   * The number rounded to a decimal; halves are rounded up.
+   * {@return the number rounded to a decimal; halves are rounded up}
    *
    * @param digits after the point, 0 or more
    */
@@ -209,7 +209,7 @@ public final class AlgebraicNumber implements Comparable<AlgebraicNumber> {
   }
 
   /**
-   * A short rational number strictly between two different numbers.
+   * {@return a short rational number strictly between two different numbers}
    *
    * @param a one
    * @param b another

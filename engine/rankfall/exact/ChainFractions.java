@@ -77,15 +77,38 @@ public final class ChainFractions {
     Polynomial rest = a.value;
     Polynomial cofactor = a.cofactor;
     while (!rest.isZero() && rest.degree(v) >= degree) {
-      int e = rest.degree(v);
-      Polynomial q =
-          rest.coefficient(v, e)
-              .times(Polynomial.variable(chain.variables(), v).pow(e - degree));
+      Polynomial q = shifted(rest, v, degree);
       rest = rest.times(lead).minus(q.times(b.value));
       cofactor = cofactor.times(lead).minus(q.times(b.cofactor));
     }
     List<Polynomial> out = chain.normal(List.of(rest, cofactor)).entries();
     return new Pair(out.get(0), out.get(1));
+  }
+
+  /** The leading coefficient in a variable, times the power by which the degree is too high. */
+  private static Polynomial shifted(Polynomial p, int v, int degree) {
+    int e = p.degree(v);
+    return p.coefficient(v, e).times(Polynomial.variable(p.variables(), v).pow(e - degree));
+  }
+
+  private static Polynomial pseudoRemainder(Polynomial a, Polynomial b, int v) {
+    int degree = b.degree(v);
+    Polynomial lead = b.coefficient(v, degree);
+    Polynomial rest = a;
+    while (!rest.isZero() && rest.degree(v) >= degree) {
+      rest = rest.times(lead).minus(shifted(rest, v, degree).times(b));
+    }
+    return rest;
+  }
+
+  /** Reduced, its coefficients in a variable freed of a common factor. */
+  private static Polynomial primitive(Chain chain, Polynomial p, int v) {
+    List<Polynomial> c = chain.normal(p.coefficientsIn(v)).entries();
+    Polynomial out = chain.zero();
+    for (int k = 0; k < c.size(); k++) {
+      out = out.plus(c.get(k).times(Polynomial.variable(p.variables(), v).pow(k)));
+    }
+    return out;
   }
 
   /**
@@ -99,21 +122,21 @@ public final class ChainFractions {
    *     of the chain only, and no integer divides it
    */
   public static Polynomial gcd(Chain chain, Polynomial a, Polynomial b, int variable) {
-    Pair upper = new Pair(chain.reduced(a), chain.zero());
-    Pair lower = new Pair(chain.reduced(b), chain.zero());
-    while (!lower.value.isZero()) {
-      Pair next =
-          lower.value.contains(variable)
-              ? remainder(chain, upper, lower, variable)
-              : new Pair(chain.zero(), chain.zero());
+    Polynomial upper = chain.reduced(a);
+    Polynomial lower = chain.reduced(b);
+    while (!lower.isZero()) {
+      Polynomial next =
+          lower.contains(variable)
+              ? primitive(chain, pseudoRemainder(upper, lower, variable), variable)
+              : chain.zero();
       upper = lower;
       lower = next;
     }
-    Polynomial lead = upper.value.coefficient(variable, upper.value.degree(variable));
+    Polynomial lead = upper.coefficient(variable, upper.degree(variable));
     RationalFunction inverse = canonical(chain, chain.one(), lead);
     List<Polynomial> out =
         chain.reduced(
-            List.of(upper.value.times(inverse.numerator()), inverse.denominator()));
+            List.of(upper.times(inverse.numerator()), inverse.denominator()));
     return RationalFunction.of(out.get(0), out.get(1)).numerator().primitive();
   }
 }

@@ -2,6 +2,7 @@ package rankfall.exact;
 
 import java.math.BigInteger;
 import java.util.ArrayList;
+import java.util.Comparator;
 import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
 
@@ -13,6 +14,9 @@ import org.apache.commons.numbers.fraction.BigFraction;
  * @param high above the root, or the root itself if it is rational
  */
 public record ConstantRoot(List<BigInteger> coefficients, BigFraction low, BigFraction high) {
+  /** The order of the numbers; the library's own is wrong for two negative numbers (1.2). */
+  static final Comparator<BigFraction> ORDER = (a, b) -> a.subtract(b).signum();
+
   private static final BigFraction HALF = BigFraction.of(1, 2);
 
   /** Copies the coefficients. */
@@ -39,7 +43,7 @@ public record ConstantRoot(List<BigInteger> coefficients, BigFraction low, BigFr
     BigFraction most = BigFraction.ZERO;
     for (BigInteger c : f.subList(0, f.size() - 1)) {
       BigFraction q = BigFraction.of(c.abs(), lead);
-      most = q.compareTo(most) > 0 ? q : most;
+      most = ORDER.compare(q, most) > 0 ? q : most;
     }
     return most.add(BigFraction.ONE);
   }
@@ -138,15 +142,15 @@ public record ConstantRoot(List<BigInteger> coefficients, BigFraction low, BigFr
 
   /** The least distance of a point of the interval from x. */
   BigFraction leastDistance(BigFraction x) {
-    return x.compareTo(low) < 0
+    return ORDER.compare(x, low) < 0
         ? low.subtract(x)
-        : x.compareTo(high) > 0 ? x.subtract(high) : BigFraction.ZERO;
+        : ORDER.compare(x, high) > 0 ? x.subtract(high) : BigFraction.ZERO;
   }
 
   /** The greatest distance of a point of the interval from x. */
   BigFraction greatestDistance(BigFraction x) {
     BigFraction a = low.subtract(x).abs();
     BigFraction b = high.subtract(x).abs();
-    return a.compareTo(b) > 0 ? a : b;
+    return ORDER.compare(a, b) > 0 ? a : b;
   }
 }

@@ -13,7 +13,13 @@ import org.apache.commons.numbers.fraction.BigFraction;
 public record Interval(BigFraction lower, BigFraction upper) {
   private static final BigFraction HALF = BigFraction.of(1, 2);
 
-  /** Checks the order of the ends. */
+  /**
+   * Checks the order of the ends.
+   *
+   * @param lower the lower end
+   * @param upper the upper end
+   * @throws IllegalArgumentException if they stand in the wrong order
+   */
   public Interval {
     if (Rationals.compare(lower, upper) > 0) {
       throw new IllegalArgumentException("ends in wrong order: " + lower + " > " + upper);
@@ -21,7 +27,7 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * The interval that holds one number only.
+   * {@return the interval that holds one number only}
    *
    * @param value both ends
    */
@@ -29,23 +35,23 @@ public record Interval(BigFraction lower, BigFraction upper) {
     return new Interval(value, value);
   }
 
-  /** Whether both ends are equal. */
+  /** {@return whether both ends are equal} */
   public boolean isPoint() {
     return lower.equals(upper);
   }
 
-  /** The distance of the ends. */
+  /** {@return the distance of the ends} */
   public BigFraction width() {
     return upper.subtract(lower);
   }
 
-  /** The number halfway between the ends. */
+  /** {@return the number halfway between the ends} */
   public BigFraction middle() {
     return lower.add(upper).multiply(HALF);
   }
 
   /**
-   * Whether a number lies in the interval, ends included.
+   * {@return whether a number lies in the interval, ends included}
    *
    * @param value any
    */
@@ -53,14 +59,14 @@ public record Interval(BigFraction lower, BigFraction upper) {
     return Rationals.compare(lower, value) <= 0 && Rationals.compare(value, upper) <= 0;
   }
 
-  /** The sign that all its numbers have; empty if they differ in sign. */
+  /** {@return the sign that all its numbers have; empty if they differ in sign} */
   public OptionalInt sign() {
     int s = lower.signum();
     return s == upper.signum() && (s != 0 || isPoint()) ? OptionalInt.of(s) : OptionalInt.empty();
   }
 
   /**
-   * The sums.
+   * {@return the sums}
    *
    * @param b the other summand
    */
@@ -69,7 +75,7 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * The differences.
+   * {@return the differences}
    *
    * @param b what is taken away
    */
@@ -78,7 +84,7 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * The products.
+   * {@return the products}
    *
    * @param b the other factor
    */
@@ -93,7 +99,7 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * The powers; an even power is never negative.
+   * {@return the powers; an even power is never negative}
    *
    * @param exponent 0 or more
    */
@@ -107,7 +113,7 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * The quotients.
+   * {@return the quotients}
    *
    * @param b what is divided by; must not hold 0
    * @throws ArithmeticException if it does
@@ -120,7 +126,7 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * A slightly greater interval with short dyadic ends.
+   * {@return a slightly greater interval with short dyadic ends}
    *
    * @param bits the ends become multiples of {@code 2^-bits}
    */
@@ -132,8 +138,8 @@ public record Interval(BigFraction lower, BigFraction upper) {
   }
 
   /**
-   * The rational number of least denominator strictly between the ends, the one nearest to 0 among
-   * several integers (walk down the Stern-Brocot tree by continued fractions).
+   * {@return the rational number of least denominator strictly between the ends, the one nearest to
+   * 0 among several integers (walk down the Stern-Brocot tree by continued fractions)}
    *
    * @throws IllegalStateException if the interval is a point
    */

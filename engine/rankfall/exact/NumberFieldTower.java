@@ -2,7 +2,6 @@ package rankfall.exact;
 
 import java.math.BigInteger;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
 
@@ -136,12 +135,12 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
       BigFraction least =
           open.stream()
               .map(r -> r.greatestDistance(near))
-              .min(Comparator.naturalOrder())
+              .min(ConstantRoot.ORDER)
               .orElseThrow();
       open =
           new ArrayList<>(
               open.stream()
-                  .filter(r -> r.leastDistance(near).compareTo(least) <= 0)
+                  .filter(r -> ConstantRoot.ORDER.compare(r.leastDistance(near), least) <= 0)
                   .map(r -> r.refined(STEPS))
                   .toList());
     }
@@ -161,7 +160,7 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
     Polynomial x = Polynomial.variable(ring, v);
     for (int shift = 1; ; shift++) {
       Polynomial theta = Polynomial.zero(ring);
-      BigInteger factor = BigInteger.ONE;
+      BigInteger factor = BigInteger.valueOf(shift);
       for (Chain.Rule r : below.rules()) {
         theta = theta.plus(Polynomial.variable(ring, r.variable()).times(factor));
         factor = factor.multiply(BigInteger.valueOf(shift));
@@ -217,8 +216,8 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
                   l.multiply(at.get(k).high()),
                   h.multiply(at.get(k).low()),
                   h.multiply(at.get(k).high()));
-          l = ends.stream().min(Comparator.naturalOrder()).orElseThrow();
-          h = ends.stream().max(Comparator.naturalOrder()).orElseThrow();
+          l = ends.stream().min(ConstantRoot.ORDER).orElseThrow();
+          h = ends.stream().max(ConstantRoot.ORDER).orElseThrow();
         }
       }
       low = low.add(l);

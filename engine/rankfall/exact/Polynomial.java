@@ -6,7 +6,6 @@ import cc.redberry.rings.poly.multivar.MonomialOrder;
 import cc.redberry.rings.poly.multivar.MultivariateDivision;
 import cc.redberry.rings.poly.multivar.MultivariateGCD;
 import cc.redberry.rings.poly.multivar.MultivariatePolynomial;
-import cc.redberry.rings.poly.multivar.MultivariateResultants;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
@@ -35,8 +34,7 @@ public final class Polynomial {
   public static Polynomial zero(Variables variables) {
     return new Polynomial(
         variables,
-        MultivariatePolynomial.zero(
-            Math.max(1, variables.count()), Rings.Z, MonomialOrder.GRLEX));
+        MultivariatePolynomial.zero(Math.max(1, variables.count()), Rings.Z, MonomialOrder.GRLEX));
   }
 
   /** The polynomial 1 of a ring. */
@@ -323,7 +321,7 @@ public final class Polynomial {
   /** The resultant with respect to one variable, up to sign. */
   public Polynomial resultant(Polynomial q, int variable) {
     sameRing(q);
-    return with(MultivariateResultants.Resultant(p.clone(), q.p.clone(), variable));
+    return Resultants.of(this, q, variable);
   }
 
   /** This with a polynomial put in place of a variable. */
@@ -361,8 +359,7 @@ public final class Polynomial {
     BigInteger denominator = BigInteger.ONE;
     for (int k = 0; k < variables.count(); k++) {
       if (point.get(k).isPresent()) {
-        denominator =
-            denominator.multiply(point.get(k).get().getDenominator().pow(degree(k)));
+        denominator = denominator.multiply(point.get(k).get().getDenominator().pow(degree(k)));
       }
     }
     List<Term> out = new ArrayList<>();

@@ -25,7 +25,7 @@ public final class Rationals {
   }
 
   /**
-   * The lesser number.
+   * {@return the lesser number}
    *
    * @param a one number
    * @param b another
@@ -35,7 +35,7 @@ public final class Rationals {
   }
 
   /**
-   * The greater number.
+   * {@return the greater number}
    *
    * @param a one number
    * @param b another
@@ -45,7 +45,7 @@ public final class Rationals {
   }
 
   /**
-   * The greatest integer not above a number.
+   * {@return the greatest integer not above a number}
    *
    * @param q any
    */
@@ -55,7 +55,7 @@ public final class Rationals {
   }
 
   /**
-   * The least integer not below a number.
+   * {@return the least integer not below a number}
    *
    * @param q any
    */
@@ -64,7 +64,7 @@ public final class Rationals {
   }
 
   /**
-   * The numerator over a positive denominator.
+   * {@return the numerator over a positive denominator}
    *
    * @param q any
    */
@@ -73,7 +73,7 @@ public final class Rationals {
   }
 
   /**
-   * The positive denominator in lowest terms.
+   * {@return the positive denominator in lowest terms}
    *
    * @param q any
    */

@@ -28,7 +28,7 @@ public final class RealRoots {
   }
 
   /**
-   * The roots of a polynomial.
+   * {@return the roots of a polynomial}
    *
    * @param p not 0; at most one variable occurs in it
    * @throws ArithmeticException if p is 0
@@ -39,7 +39,7 @@ public final class RealRoots {
   }
 
   /**
-   * The roots of a polynomial.
+   * {@return the roots of a polynomial}
    *
    * @param coefficients the constant one first; not all 0
    * @throws ArithmeticException if all are 0
@@ -163,18 +163,18 @@ public final class RealRoots {
     return out;
   }
 
-  /** The number of different real roots. */
+  /** {@return the number of different real roots} */
   public int count() {
     return intervals.size();
   }
 
-  /** The isolating intervals, ascending; two may share an end. */
+  /** {@return the isolating intervals, ascending; two may share an end} */
   public List<Interval> intervals() {
     return intervals;
   }
 
   /**
-   * An isolating interval of at most the given width.
+   * {@return an isolating interval of at most the given width}
    *
    * @param root its number
    * @param width positive
@@ -209,7 +209,7 @@ public final class RealRoots {
   }
 
   /**
-   * The sign of a root minus a rational number.
+   * {@return the sign of a root minus a rational number}
    *
    * @param root its number
    * @param value any
@@ -233,7 +233,7 @@ public final class RealRoots {
   }
 
   /**
-   * The number of roots in a closed interval.
+   * {@return the number of roots in a closed interval}
    *
    * @param where ends included
    */

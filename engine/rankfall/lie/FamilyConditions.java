@@ -83,7 +83,10 @@ record FamilyConditions(
             (p, kinds) -> {
               if (kinds.contains(FamilyRing.Coordinates.EXPONENTIAL)) {
                 RationalFunction e = ring.variable("exp(" + p + ")");
-                addBound(e, ring.complex() ? Relation.UNEQUAL : Relation.GREATER, e + "");
+                domain.add(
+                    ring.complex()
+                        ? new FamilyCondition(e.numerator(), Relation.UNEQUAL, e + " != 0")
+                        : new FamilyCondition(e.numerator(), Relation.GREATER, e + " > 0"));
               }
               if (kinds.contains(FamilyRing.Coordinates.HYPERBOLIC) && !ring.complex()) {
                 RationalFunction c = ring.variable("cosh(" + p + ")");
@@ -94,11 +97,5 @@ record FamilyConditions(
                         c + " >= 1"));
               }
             });
-  }
-
-  private void addBound(RationalFunction f, Relation relation, String name) {
-    domain.add(
-        new FamilyCondition(
-            f.numerator(), relation, name + (relation == Relation.GREATER ? " > 0" : " != 0")));
   }
 }

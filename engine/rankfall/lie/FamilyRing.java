@@ -116,7 +116,8 @@ public record FamilyRing(
     if (unit) {
       names.add("i");
     }
-    Variables ring = new Variables(names);
+    int algebraic = tower.chain().variables().count() + (unit ? 1 : 0);
+    Variables ring = new Variables(names, algebraic);
     List<Chain.Rule> rules = new ArrayList<>();
     for (Chain.Rule r : tower.chain().rules()) {
       String name = tower.chain().variables().names().get(r.variable());

@@ -32,12 +32,38 @@ public record InvariantForms<E>(int dimension, Subspace<E> forms) {
         }
       }
     }
-    return new InvariantForms<>(
-        n,
-        Subspace.kernel(
-            bracket.domain(),
-            n * (n + 1) / 2,
-            withoutForcedZeros(new Vectors<>(bracket.domain()), rows)));
+    List<SortedMap<Integer, E>> system = withoutForcedZeros(new Vectors<>(bracket.domain()), rows);
+    return new InvariantForms<>(n, solutions(bracket.domain(), n * (n + 1) / 2, system));
+  }
+
+  /**
+   * The solutions of a system with far more rows than unknowns, a batch of rows at a time: each
+   * batch is asked only of the solutions of the batches before.
+   */
+  private static <E> Subspace<E> solutions(
+      Domain<E> domain, int unknowns, List<SortedMap<Integer, E>> rows) {
+    Vectors<E> vectors = new Vectors<>(domain);
+    int batch = Math.min(unknowns, Math.max(1, rows.size()));
+    Subspace<E> out =
+        Subspace.kernel(domain, unknowns, rows.subList(0, Math.min(batch, rows.size())));
+    for (int from = batch; from < rows.size() && out.dimension() > 0; from += batch) {
+      List<SortedMap<Integer, E>> basis = out.basis();
+      List<SortedMap<Integer, E>> asked = new ArrayList<>();
+      for (SortedMap<Integer, E> row : rows.subList(from, Math.min(from + batch, rows.size()))) {
+        asked.add(vectors.sparse(basis.stream().map(x -> vectors.pair(row, x)).toList()));
+      }
+      Subspace<E> weights = Subspace.kernel(domain, basis.size(), asked);
+      if (weights.dimension() < basis.size()) {
+        out =
+            new Subspace<>(
+                    domain,
+                    unknowns,
+                    vectors.combinations(weights.basis(), basis),
+                    weights.nonVanishing())
+                .assuming(out.nonVanishing());
+      }
+    }
+    return out;
   }
 
   private static <E> SortedMap<Integer, E> condition(LieBracket<E> bracket, int i, int j, int k) {

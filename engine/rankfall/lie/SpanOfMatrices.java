@@ -101,7 +101,7 @@ final class SpanOfMatrices<E> {
     if (e.rest().isEmpty()) {
       return new Span.Closed<>(constants(e, brackets), kept, names, nonVanishing);
     }
-    List<Span.Missing<E>> missing = missing(e, brackets, columns, nonVanishing);
+    List<Span.Missing<E>> missing = missing(e, brackets, columns);
     Set<E> conditions = new LinkedHashSet<>();
     missing.forEach(m -> conditions.addAll(m.rest().values()));
     return new Span.Open<>(
@@ -168,8 +168,7 @@ final class SpanOfMatrices<E> {
   private List<Span.Missing<E>> missing(
       Echelon<E> e,
       List<Bracket<E>> brackets,
-      List<SortedMap<Integer, E>> columns,
-      List<E> nonVanishing) {
+      List<SortedMap<Integer, E>> columns) {
     List<Span.Missing<E>> out = new ArrayList<>();
     for (int b = 0; b < brackets.size(); b++) {
       int column = basis.size() + b;
@@ -187,9 +186,8 @@ final class SpanOfMatrices<E> {
                   .forEach(
                       (p, v) ->
                           rest.merge(p, domain.negate(domain.times(x, v)), domain::plus)));
-      List<E> units = new ArrayList<>(nonVanishing);
-      units.add(basis.get(bracket.left).scale());
-      units.add(basis.get(bracket.right).scale());
+      List<E> units =
+          List.of(basis.get(bracket.left).scale(), basis.get(bracket.right).scale());
       SortedMap<Integer, E> freed = new TreeMap<>();
       SpanRows.kept(domain, rest)
           .forEach((p, v) -> freed.put(p, SpanRows.without(domain, v, units)));

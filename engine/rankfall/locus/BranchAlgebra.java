@@ -13,8 +13,8 @@ import rankfall.lie.StructureConstants;
 import rankfall.lie.StructureConstants.Pair;
 
 /**
- * The algebra at the general point of a branch: structure constants up to a common factor, and the
- * Killing matrix that belongs to them.
+ * The algebra at the general point of a branch: structure constants and scales, each up to a common
+ * factor, and the Killing matrix that belongs to the constants.
  *
  * @param constants over the chain of the branch
  * @param basis names of the basis
@@ -52,9 +52,8 @@ public record BranchAlgebra(
       }
       out.put(e.getKey(), row);
     }
-    int n = constants.dimension();
     return new StructureConstants<>(
-        chain, n, out, chain.one(), java.util.Collections.nCopies(n, chain.one()));
+        chain, constants.dimension(), out, chain.one(), chain.reduced(constants.scale()));
   }
 
   /** A common factor that is not a number may vanish at special points, so it stays. */
@@ -68,7 +67,7 @@ public record BranchAlgebra(
         .toList();
   }
 
-  private static List<List<Polynomial>> reducedMatrix(
+  static List<List<Polynomial>> reducedMatrix(
       Chain chain, List<List<Polynomial>> matrix) {
     List<Polynomial> all = new ArrayList<>();
     matrix.forEach(all::addAll);
@@ -81,6 +80,36 @@ public record BranchAlgebra(
       out.add(normal.subList(r * matrix.size(), (r + 1) * matrix.size()));
     }
     return out;
+  }
+
+  /**
+   * The kernel of the Killing form at the general point.
+   *
+   * @return vectors by basis element, 0 included, in the basis that {@link #basis} names
+   */
+  public List<List<Polynomial>> kernel() {
+    Chain chain = (Chain) constants.domain();
+    List<List<Polynomial>> out = new ArrayList<>();
+    for (SortedMap<Integer, Polynomial> v : killingRank(new KnownNonZero(chain, List.of())).kernel()) {
+      List<Polynomial> x = new ArrayList<>();
+      for (int i = 0; i < basis.size(); i++) {
+        Polynomial c = v.getOrDefault(i, chain.zero());
+        x.add(c.times(constants.scale().get(i)));
+      }
+      out.add(signed(chain.normal(x).entries()));
+    }
+    return out;
+  }
+
+  /** The vector or its negative: the first coefficient that is not 0 has a positive leading one. */
+  private static List<Polynomial> signed(List<Polynomial> x) {
+    boolean negative =
+        x.stream()
+            .filter(p -> !p.isZero())
+            .findFirst()
+            .map(p -> p.leadingCoefficient().signum() < 0)
+            .orElse(false);
+    return negative ? x.stream().map(Polynomial::negate).toList() : x;
   }
 
   /** The Killing matrix after row reduction. */

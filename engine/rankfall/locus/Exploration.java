@@ -2,13 +2,9 @@ package rankfall.locus;
 
 import java.util.ArrayDeque;
 import java.util.ArrayList;
-import java.util.Comparator;
 import java.util.Deque;
 import java.util.List;
-import java.util.SortedMap;
-import java.util.TreeMap;
 import rankfall.exact.Chain;
-import rankfall.exact.ChainFactoring;
 import rankfall.exact.Echelon;
 import rankfall.exact.Polynomial;
 
@@ -20,9 +16,9 @@ import rankfall.exact.Polynomial;
  * vanishes, the piece is cut and its part looked at anew.
  */
 public final class Exploration {
-  private final Chain constants;
   private final Algebras algebras;
   private final Splitter splitter;
+  private final Cutter cutter;
   private final Meter meter;
   private final Deque<Task> open = new ArrayDeque<>();
   private final List<Leaf> leaves = new ArrayList<>();
@@ -31,7 +27,7 @@ public final class Exploration {
   private record Task(Piece piece, List<BranchAlgebra> inherited) {}
 
   private Exploration(Chain constants, Algebras algebras, Meter meter) {
-    this.constants = constants;
+    this.cutter = new Cutter(constants, meter);
     this.algebras = algebras;
     this.meter = meter;
     this.splitter = new Splitter(constants, meter);
@@ -103,7 +99,7 @@ public final class Exploration {
   }
 
   private Leaf profiled(Piece piece, BranchAlgebra algebra, List<Task> cut) {
-    KnownNonZero domain = domain(piece);
+    KnownNonZero domain = KnownNonZero.on(piece);
     Echelon<Polynomial> derived = algebra.derivedRank(domain);
     Echelon<Polynomial> centre = algebra.centreRank(domain);
     Echelon<Polynomial> killing = algebra.killingRank(domain);
@@ -116,42 +112,11 @@ public final class Exploration {
     return new Leaf.Defined(cut(piece, watched, List.of(algebra), cut), profile, algebra);
   }
 
-  private static KnownNonZero domain(Piece piece) {
-    List<Polynomial> known = new ArrayList<>();
-    for (Polynomial p : piece.nonZero()) {
-      Polynomial r = piece.chain().reduced(p);
-      if (!r.isConstant()) {
-        known.add(r.equals(p) ? p : r.primitive());
-      }
-    }
-    return new KnownNonZero(piece.chain(), known);
-  }
-
-  /** Cuts off the zeros of polynomials, piece by piece, and returns what is left. */
+  /** Cuts off the zeros of polynomials and returns what is left. */
   private Piece cut(
       Piece piece, List<Polynomial> watched, List<BranchAlgebra> inherited, List<Task> cut) {
-    SortedMap<String, Polynomial> factors = new TreeMap<>();
-    for (Polynomial w : watched) {
-      Polynomial r = piece.chain().reduced(w);
-      if (!r.isConstant()) {
-        for (Polynomial f : ChainFactoring.irreducible(constants, r)) {
-          if (!piece.nonZero().contains(f)) {
-            factors.put(f.toString(), f);
-          }
-        }
-      }
-    }
-    List<Polynomial> order = new ArrayList<>(factors.values());
-    order.sort(
-        Comparator.comparing(Polynomial::totalDegree)
-            .thenComparing(Polynomial::termCount)
-            .thenComparing(Polynomial::toString));
-    for (int k = 0; k < order.size(); k++) {
-      for (Piece p :
-          splitter.within(piece, List.of(order.get(k)), order.subList(0, k))) {
-        cut.add(new Task(p, inherited));
-      }
-    }
-    return piece.without(order);
+    Cutter.Parts parts = cutter.cut(piece, watched);
+    parts.cut().forEach(p -> cut.add(new Task(p, inherited)));
+    return parts.rest();
   }
 }

@@ -1,5 +1,6 @@
 package rankfall.locus;
 
+import java.util.ArrayList;
 import java.util.List;
 import rankfall.exact.Chain;
 import rankfall.exact.Domain;
@@ -15,6 +16,18 @@ import rankfall.exact.Polynomial;
 record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Domain<Polynomial> {
   KnownNonZero {
     nonZero = List.copyOf(nonZero);
+  }
+
+  /** The ring on a piece. */
+  static KnownNonZero on(Piece piece) {
+    List<Polynomial> known = new ArrayList<>();
+    for (Polynomial p : piece.nonZero()) {
+      Polynomial r = piece.chain().reduced(p);
+      if (!r.isConstant()) {
+        known.add(r.primitive());
+      }
+    }
+    return new KnownNonZero(piece.chain(), known);
   }
 
   @Override

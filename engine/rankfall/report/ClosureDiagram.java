@@ -16,9 +16,9 @@ import rankfall.Analysis.Stratum;
  * their neighbours (Sugiyama, Tagawa, Toda 1981); a line over several layers gets a place in each.
  */
 final class ClosureDiagram {
-  private static final int BOX_WIDTH = 124;
+  private static final int BOX_WIDTH = 118;
   private static final int BOX_HEIGHT = 46;
-  private static final int GAP = 18;
+  private static final int GAP = 14;
   private static final int BEND_WIDTH = 14;
   private static final int LAYER_HEIGHT = 104;
   private static final int MARGIN = 12;
@@ -135,12 +135,17 @@ final class ClosureDiagram {
                 + " aria-labelledby=\"closure-title\" width=\"%d\" height=\"%d\" viewBox=\"0 0 %d"
                 + " %d\">\n<title id=\"closure-title\">Strata by codimension; a line joins a"
                 + " stratum to those directly in its closure</title>\n",
-            width, height, width, height));
+            width,
+            height,
+            width,
+            height));
     for (int k = 0; k < layers.size(); k++) {
       out.append(layerLabel(k, width));
     }
-    layers.forEach(layer -> layer.forEach(n -> n.down.forEach(m -> out.append(edge(n, m, origin)))));
-    layers.forEach(layer -> layer.forEach(n -> n.stratum.forEach(s -> out.append(box(n, s, origin)))));
+    layers.forEach(
+        layer -> layer.forEach(n -> n.down.forEach(m -> out.append(edge(n, m, origin)))));
+    layers.forEach(
+        layer -> layer.forEach(n -> n.stratum.forEach(s -> out.append(box(n, s, origin)))));
     return out.append("</svg>\n").toString();
   }
 
@@ -150,19 +155,34 @@ final class ClosureDiagram {
         Locale.ROOT,
         "<line class=\"level\" x1=\"0\" y1=\"%.1f\" x2=\"%d\" y2=\"%.1f\"></line>\n"
             + "<text class=\"level\" x=\"0\" y=\"%.1f\">codimension %d</text>\n",
-        y, width, y, y - 6, codimensions.get(k));
+        y,
+        width,
+        y,
+        y - 6,
+        codimensions.get(k));
   }
 
+  /** From box to box; within the layer of a bend the line runs straight down between the boxes. */
   private static String edge(Node n, Node m, double origin) {
     double x1 = origin + n.x;
-    double y1 = top(n) + (n.stratum.isEmpty() ? BOX_HEIGHT / 2.0 : BOX_HEIGHT);
+    double y1 = top(n) + BOX_HEIGHT;
     double x2 = origin + m.x;
-    double y2 = top(m) + (m.stratum.isEmpty() ? BOX_HEIGHT / 2.0 : 0);
-    double bend = (y2 - y1) / 2;
+    double y2 = top(m);
+    double middle = (y1 + y2) / 2;
+    String through =
+        m.stratum.isEmpty() ? String.format(Locale.ROOT, "V%.1f", y2 + BOX_HEIGHT) : "";
     return String.format(
         Locale.ROOT,
-        "<path class=\"edge\" d=\"M%.1f %.1fC%.1f %.1f %.1f %.1f %.1f %.1f\"></path>\n",
-        x1, y1, x1, y1 + bend, x2, y2 - bend, x2, y2);
+        "<path class=\"edge\" d=\"M%.1f %.1fC%.1f %.1f %.1f %.1f %.1f %.1f%s\"></path>\n",
+        x1,
+        y1,
+        x1,
+        middle,
+        x2,
+        middle,
+        x2,
+        y2,
+        through);
   }
 
   private static String box(Node n, Stratum s, double origin) {

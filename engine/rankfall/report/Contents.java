@@ -19,9 +19,7 @@ record Contents(boolean hasComponents, boolean hasStrata, boolean hasRegions) {
         .map(
             f ->
                 new Contents(
-                    !f.components().isEmpty(),
-                    !f.strata().isEmpty(),
-                    !f.regions().isEmpty()))
+                    !f.components().isEmpty(), !f.strata().isEmpty(), !f.regions().isEmpty()))
         .orElse(new Contents(false, false, false));
   }
 }

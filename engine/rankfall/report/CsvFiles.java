@@ -48,10 +48,7 @@ final class CsvFiles {
     return table(
         List.of("row", "column", "entry"),
         entries.stream()
-            .map(
-                e ->
-                    List.of(
-                        basis.get(e.row()), basis.get(e.column()), e.value().toString()))
+            .map(e -> List.of(basis.get(e.row()), basis.get(e.column()), e.value().toString()))
             .toList());
   }
 
@@ -65,13 +62,14 @@ final class CsvFiles {
                 Integer.toString(c.number()),
                 equations(d.equations()),
                 Integer.toString(d.multiplicity()),
-                Integer.toString(d.rank()),
-                Integer.toString(d.kernelDimension()),
+                d.rank().map(r -> Integer.toString(r)).orElse(""),
+                d.kernelDimension().map(k -> Integer.toString(k)).orElse(""),
                 realPoints(d.realPoints())));
       }
     }
     return table(
-        List.of("component", "condition", "multiplicity", "rank", "kernel_dimension", "real_points"),
+        List.of(
+            "component", "condition", "multiplicity", "rank", "kernel_dimension", "real_points"),
         rows);
   }
 
@@ -144,7 +142,7 @@ final class CsvFiles {
         : equations.stream().map(Polynomial::toString).collect(Collectors.joining("; "));
   }
 
-  /** Closed sets joined with {@code  | }. */
+  /** Closed sets joined with {@code | }. */
   static String exclusions(List<List<Polynomial>> sets) {
     return sets.stream().map(CsvFiles::equations).collect(Collectors.joining(" | "));
   }

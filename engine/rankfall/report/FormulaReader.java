@@ -8,12 +8,13 @@ import java.util.regex.Pattern;
 
 /**
  * Reads the text form of formulas back for setting: names of variables such as {@code cos(2*t)},
- * brackets such as {@code [X,Y]}, sign conditions such as {@code a*b - 1 > 0}. Text of another shape
- * is set as it stands.
+ * brackets such as {@code [X,Y]}, sign conditions such as {@code a*b - 1 > 0}. Text of another
+ * shape is set as it stands.
  */
 final class FormulaReader {
   private static final Pattern TOKEN =
-      Pattern.compile("\\s*(?:(\\d+(?:\\.\\d+)?)|([\\p{L}][\\p{L}\\p{N}_]*)|(!=|<=|>=|[-+*/^()\\[\\],=<>]))");
+      Pattern.compile(
+          "\\s*(?:(\\d+(?:\\.\\d+)?)|([\\p{L}][\\p{L}\\p{N}_]*)|(!=|<=|>=|[-+*/^()\\[\\],=<>]))");
   private static final List<String> FUNCTIONS =
       List.of("cos", "sin", "tan", "exp", "cosh", "sinh", "tanh");
   private static final int DEEPEST = 200;
@@ -109,7 +110,7 @@ final class FormulaReader {
       if (take("*")) {
         if (quotient.isPresent()) {
           factors.clear();
-          factors.add(quotient.get());
+          factors.add(Formulas.enclosed(quotient.get()));
           quotient = Optional.empty();
         }
         factors.add(power());

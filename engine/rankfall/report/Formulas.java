@@ -61,7 +61,8 @@ final class Formulas {
 
   /** Roots stand before letters, functions after them, as is the custom. */
   private static int place(Formula f) {
-    if (f instanceof Formula.Root || f instanceof Formula.Power p && p.base() instanceof Formula.Root) {
+    if (f instanceof Formula.Root
+        || f instanceof Formula.Power p && p.base() instanceof Formula.Root) {
       return 0;
     }
     return f instanceof Formula.Function ? 2 : 1;
@@ -196,13 +197,15 @@ final class Formulas {
     if (base instanceof Formula.Function f && f.exponent().isEmpty() && !f.name().equals("exp")) {
       return new Formula.Function(f.name(), exponent, f.argument());
     }
-    boolean symbol =
-        base instanceof Formula.Letter
-            || base instanceof Formula.Word
-            || base instanceof Formula.Subscript
-            || base instanceof Formula.Number
-            || base instanceof Formula.Root;
-    return symbol ? new Formula.Power(base, exponent) : new Formula.Group(base, exponent);
+    return isSymbol(base) ? new Formula.Power(base, exponent) : new Formula.Group(base, exponent);
+  }
+
+  private static boolean isSymbol(Formula f) {
+    return f instanceof Formula.Letter
+        || f instanceof Formula.Word
+        || f instanceof Formula.Subscript
+        || f instanceof Formula.Number
+        || f instanceof Formula.Root;
   }
 
   /** A quotient: a fraction where it is short, else in one line with a slash. */
@@ -210,9 +213,9 @@ final class Formulas {
     if (above.width() <= WIDEST_FRACTION && below.width() <= WIDEST_FRACTION) {
       return new Formula.Fraction(open(above), open(below));
     }
-    boolean simple = below instanceof Formula.Number || below instanceof Formula.Letter;
     return new Formula.Slash(
-        enclosed(above), simple || below instanceof Formula.Group ? below : new Formula.Group(below, ""));
+        enclosed(above),
+        isSymbol(below) || below instanceof Formula.Group ? below : new Formula.Group(below, ""));
   }
 
   private static Formula signedQuotient(Formula above, Formula below) {
@@ -227,7 +230,10 @@ final class Formulas {
   }
 
   static Formula enclosed(Formula f) {
-    return f instanceof Formula.Sum || f instanceof Formula.Relation || f instanceof Formula.Sequence
+    return f instanceof Formula.Sum
+            || f instanceof Formula.Slash
+            || f instanceof Formula.Relation
+            || f instanceof Formula.Sequence
         ? new Formula.Group(f, "")
         : f;
   }

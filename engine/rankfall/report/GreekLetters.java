@@ -29,7 +29,8 @@ enum GreekLetters {
   PSI("\u03c8", "\\psi"),
   OMEGA("\u03c9", "\\omega");
 
-  private static final String CAPITALS_OF_THEIR_OWN = "\u0393\u0394\u0398\u039b\u039e\u03a0\u03a3\u03a5\u03a6\u03a8\u03a9";
+  private static final String CAPITALS_OF_THEIR_OWN =
+      "\u0393\u0394\u0398\u039b\u039e\u03a0\u03a3\u03a5\u03a6\u03a8\u03a9";
 
   private final String small;
   private final String latex;

@@ -96,9 +96,7 @@ final class JsonFile {
       out.set("strata", array(f.strata(), JsonFile::stratum));
       out.set(
           "coverings",
-          array(
-              f.coverings(),
-              (node, c) -> node.put("lower", c.lower()).put("upper", c.upper())));
+          array(f.coverings(), (node, c) -> node.put("lower", c.lower()).put("upper", c.upper())));
     } else {
       out.putNull("strata").putNull("coverings");
     }
@@ -132,7 +130,7 @@ final class JsonFile {
     } else {
       out.putNull("dual");
     }
-    out.set("conditions", array(c.conditions(), (node, d) -> condition(node, d, basis)));
+    out.set("conditions", array(c.conditions(), JsonFile::condition));
   }
 
   private static ObjectNode killing(Killing k, List<String> basis) {
@@ -158,12 +156,12 @@ final class JsonFile {
     return out;
   }
 
-  private static void condition(ObjectNode out, Condition d, List<String> basis) {
+  private static void condition(ObjectNode out, Condition d) {
     out.set("equations", polynomials(d.equations()));
     out.put("multiplicity", d.multiplicity());
-    out.put("rank", d.rank());
-    out.put("kernel_dimension", d.kernelDimension());
-    out.set("kernel", combinations(d.kernel(), basis));
+    out.put("rank", d.rank().orElse(null));
+    out.put("kernel_dimension", d.kernelDimension().orElse(null));
+    out.set("kernel", combinations(d.kernel(), d.basis()));
     out.put("real_points", word(d.realPoints()));
   }
 
@@ -201,11 +199,7 @@ final class JsonFile {
   }
 
   private static ObjectNode signature(Signature s) {
-    return NODES
-        .objectNode()
-        .put("plus", s.plus())
-        .put("minus", s.minus())
-        .put("zero", s.zero());
+    return NODES.objectNode().put("plus", s.plus()).put("minus", s.minus()).put("zero", s.zero());
   }
 
   private static ArrayNode entries(List<MatrixEntry> entries, List<String> basis) {

@@ -12,8 +12,14 @@ final class Latex {
   /** A place at which a line may end, if there is no better one. */
   static final String BREAK = "\\rankfallbreak ";
 
-  /** The definition of {@link #BREAK}; harmless if it is given twice. */
-  static final String DEFINITION = "\\providecommand{\\rankfallbreak}{\\penalty900 }";
+  /** Asks for a new page unless some lines are left, so that a heading keeps its table. */
+  static final String ROOM = "\\rankfallroom";
+
+  /** The definitions of {@link #BREAK} and {@link #ROOM}; harmless if they are given twice. */
+  static final String DEFINITIONS =
+      "\\providecommand{\\rankfallbreak}{\\penalty900 }\n"
+          + "\\providecommand{\\rankfallroom}{\\par\\vskip 0pt plus 8\\baselineskip"
+          + "\\penalty-200\\vskip 0pt plus -8\\baselineskip}";
 
   private static final int DIGITS_IN_A_ROW = 24;
 
@@ -48,8 +54,7 @@ final class Latex {
       String d = f.digits();
       StringBuilder out = new StringBuilder();
       for (int k = 0; k < d.length(); k += DIGITS_IN_A_ROW) {
-        out.append(k == 0 ? "" : BREAK)
-            .append(d, k, Math.min(d.length(), k + DIGITS_IN_A_ROW));
+        out.append(k == 0 ? "" : BREAK).append(d, k, Math.min(d.length(), k + DIGITS_IN_A_ROW));
       }
       return out.toString();
     }
@@ -61,8 +66,9 @@ final class Latex {
 
     @Override
     public String word(Formula.Word f) {
-      boolean name = f.text().chars().allMatch(c -> c < 128 && (Character.isLetterOrDigit(c) || c == '_'));
-      return (name ? "\\mathit{" : "\\text{") + LatexText.escape(f.text()) + "}";
+      boolean name =
+          f.text().chars().allMatch(c -> c < 128 && (Character.isLetterOrDigit(c) || c == '_'));
+      return (name ? "\\mathrm{" : "\\text{") + LatexText.escape(f.text()) + "}";
     }
 
     @Override

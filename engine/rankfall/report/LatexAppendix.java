@@ -48,6 +48,7 @@ final class LatexAppendix {
 
   private void section(String title) {
     line("");
+    line(Latex.ROOM);
     line("\\subsection*{" + title + "}");
   }
 
@@ -65,7 +66,8 @@ final class LatexAppendix {
     line("% Rankfall " + analysis.version() + ", family " + family);
     line("% SHA-256 of the spec: " + analysis.spec().source().sha256());
     line("% For \\input in a document that loads amsmath, booktabs and longtable.");
-    line(Latex.DEFINITION);
+    line(Latex.DEFINITIONS);
+    line(Latex.ROOM);
     line("\\section{" + text(analysis.spec().title().orElse(family)) + "}");
     line("\\label{rankfall:" + family + "}");
     paragraph("\\noindent " + text(Words.status(analysis)));
@@ -89,6 +91,9 @@ final class LatexAppendix {
     paragraph("\\noindent " + text(Words.setting(analysis.spec())) + parameters());
     relations(f.relations());
     poles(f.poles());
+    if (f.components().isEmpty()) {
+      paragraph("\\noindent " + text(Words.NO_GENERAL_POINT));
+    }
     for (Component c : f.components()) {
       component(c, f.components().size() > 1);
     }
@@ -131,8 +136,7 @@ final class LatexAppendix {
   private Formula product(List<Polynomial> factors) {
     return factors.size() == 1
         ? formulas.of(factors.get(0))
-        : Formulas.product(
-            factors.stream().map(p -> Formulas.enclosed(formulas.of(p))).toList());
+        : Formulas.product(factors.stream().map(p -> Formulas.enclosed(formulas.of(p))).toList());
   }
 
   private void poles(List<Polynomial> poles) {
@@ -225,15 +229,14 @@ final class LatexAppendix {
       return;
     }
     LatexTable table =
-        new LatexTable(
-            "Where the Killing form degenerates", List.of(0.42, 0.1, 0.08, 0.26, 0.14));
+        new LatexTable("Where the Killing form degenerates", List.of(0.37, 0.12, 0.12, 0.26, 0.13));
     table.head("Condition", "Power", "Rank", "Kernel", "Real points");
     for (Condition d : c.conditions()) {
       table.row(
           Latex.inline(formulas.vanishing(d.equations())),
           Integer.toString(d.multiplicity()),
-          Integer.toString(d.rank()),
-          Latex.inline(formulas.span(d.kernel(), c.basis())),
+          d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
+          d.rank().isEmpty() ? "" : Latex.inline(formulas.span(d.kernel(), d.basis())),
           Words.realPoints(d.realPoints()));
     }
     out.append(table.text());
@@ -246,8 +249,8 @@ final class LatexAppendix {
             + " dimension of the derived algebra, $z$ of the centre.");
     LatexTable table =
         new LatexTable(
-            "Strata of the parameter variety", List.of(0.08, 0.44, 0.06, 0.06, 0.06, 0.06, 0.24));
-    table.head("Stratum", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
+            "Strata of the parameter variety", List.of(0.1, 0.4, 0.065, 0.065, 0.065, 0.065, 0.24));
+    table.head("", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
     for (Stratum s : strata) {
       table.row(
           subscripted(s.name()),
@@ -282,13 +285,11 @@ final class LatexAppendix {
   private void regions(List<Region> regions) {
     section("Real regions");
     LatexTable table =
-        new LatexTable(
-            "Real regions of the strata", List.of(0.08, 0.08, 0.40, 0.12, 0.18, 0.14));
-    table.head("Stratum", "Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
+        new LatexTable("Real regions of the strata", List.of(0.17, 0.34, 0.17, 0.18, 0.14));
+    table.head("Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
     for (Region r : regions) {
       table.row(
-          subscripted(r.stratum()),
-          subscripted(r.name()),
+          subscripted(r.stratum()) + ", " + subscripted(r.name()),
           r.conditions().isEmpty()
               ? "all points"
               : Latex.inline(

@@ -17,8 +17,7 @@ final class LatexTable {
   LatexTable(String caption, List<Double> widths) {
     out.append("\\begin{longtable}{@{}");
     for (double w : widths) {
-      out.append(
-          String.format(Locale.ROOT, "p{\\dimexpr%.2f\\linewidth-2\\tabcolsep\\relax}", w));
+      out.append(String.format(Locale.ROOT, "p{\\dimexpr%.3f\\linewidth-2\\tabcolsep\\relax}", w));
     }
     out.append("@{}}\n\\caption{").append(caption).append("}\\\\\n\\toprule\n");
   }

@@ -26,7 +26,7 @@ final class LatexText {
           Map.entry((int) '<', "\\ensuremath{<}"),
           Map.entry((int) '>', "\\ensuremath{>}"),
           Map.entry((int) '|', "\\ensuremath{|}"),
-          Map.entry((int) '"', "\\textquotedbl{}"),
+          Map.entry((int) '"', "{\\char34}"),
           Map.entry((int) '[', "{[}"),
           Map.entry((int) ']', "{]}"),
           Map.entry((int) '\t', " "),
@@ -109,7 +109,8 @@ final class LatexText {
   }
 
   private static Optional<String> accented(int c) {
-    int[] parts = Normalizer.normalize(Character.toString(c), Normalizer.Form.NFD).codePoints().toArray();
+    int[] parts =
+        Normalizer.normalize(Character.toString(c), Normalizer.Form.NFD).codePoints().toArray();
     if (parts.length != 2 || parts[0] >= 0x7f || !ACCENTS.containsKey(parts[1])) {
       return Optional.empty();
     }

@@ -58,8 +58,7 @@ final class MathMl {
                                 + whole(f.fold(new Renderer()))
                                 + "</mrow></mtd>")
                     .collect(Collectors.joining("", "<mtr>", "</mtr>\n")))
-        .collect(
-            Collectors.joining("", "<math display=\"block\"><mtable>\n", "</mtable></math>"));
+        .collect(Collectors.joining("", "<math display=\"block\"><mtable>\n", "</mtable></math>"));
   }
 
   private static final class Renderer implements Formula.Cases<String> {

@@ -52,7 +52,8 @@ final class Notation {
     List<Formula> below = new ArrayList<>();
     for (String part : m.group(2).split("_", -1)) {
       if (!part.isEmpty()) {
-        below.add(part.chars().allMatch(Character::isDigit) ? new Formula.Number(part) : letters(part));
+        below.add(
+            part.chars().allMatch(Character::isDigit) ? new Formula.Number(part) : letters(part));
       }
     }
     return name.endsWith("_")

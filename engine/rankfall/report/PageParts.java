@@ -2,6 +2,8 @@ package rankfall.report;
 
 import io.pebbletemplates.pebble.extension.escaper.SafeString;
 import java.util.List;
+import java.util.regex.Matcher;
+import java.util.regex.Pattern;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
@@ -17,6 +19,9 @@ import rankfall.exact.Polynomial;
 final class PageParts {
   /** Largest order of a matrix that is set as one; a browser is slow beyond. */
   private static final int LARGEST_ORDER = 48;
+
+  /** An irrational coordinate as the contract writes it. */
+  private static final Pattern ROOT = Pattern.compile("root\\((.*), *([^,]*)\\)");
 
   private final Analysis.Status status;
   private final Formulas formulas;
@@ -64,7 +69,7 @@ final class PageParts {
         c.parameterDimension(),
         Words.general(c),
         Words.conditions(c, status),
-        c.conditions().stream().map(d -> condition(d, basis)).toList(),
+        c.conditions().stream().map(this::condition).toList(),
         FamilyNames.brackets(c, formulas).stream().map(PageParts::math).toList(),
         math(Formulas.sequence(basis.stream().map(formulas::text).toList())),
         basis.size(),
@@ -76,21 +81,23 @@ final class PageParts {
         c.killing().blocks().size() < 2
             ? List.of()
             : c.killing().blocks().stream().map(b -> block(b, basis)).toList(),
-        c.dual().map(d -> matrix(basis, d)).stream().toList());
+        Words.withoutDeterminant(c),
+        c.dual().map(d -> matrix(basis, d)).stream().toList(),
+        Words.withoutInverse(c));
   }
 
   private SafeString block(List<Integer> block, List<String> basis) {
-    return math(
-        Formulas.sequence(block.stream().map(k -> formulas.text(basis.get(k))).toList()));
+    return math(Formulas.sequence(block.stream().map(k -> formulas.text(basis.get(k))).toList()));
   }
 
-  private PageView.ConditionView condition(Condition d, List<String> basis) {
+  private PageView.ConditionView condition(Condition d) {
     return new PageView.ConditionView(
         math(formulas.vanishing(d.equations())),
         d.multiplicity(),
-        d.rank(),
-        d.kernelDimension(),
-        math(formulas.span(d.kernel(), basis)),
+        d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
+        d.rank().isEmpty()
+            ? new SafeString("&#8211;")
+            : math(formulas.span(d.kernel(), d.basis())),
         Words.realPoints(d.realPoints()));
   }
 
@@ -135,9 +142,21 @@ final class PageParts {
   }
 
   private List<SafeString> witness(List<Coordinate> point) {
-    return point.stream()
-        .map(c -> math(Formulas.equal(formulas.text(c.variable()), formulas.text(c.value()))))
-        .toList();
+    return point.stream().map(this::coordinate).toList();
+  }
+
+  /** {@code a = -3/2}, or in words for a root of a polynomial. */
+  private SafeString coordinate(Coordinate c) {
+    Matcher root = ROOT.matcher(c.value());
+    if (!root.matches()) {
+      return math(Formulas.equal(formulas.text(c.variable()), formulas.text(c.value())));
+    }
+    return new SafeString(
+        text(c.variable())
+            + " the root near "
+            + Markup.escape(root.group(2))
+            + " of "
+            + text(root.group(1)));
   }
 
   SafeString diagram(Findings f) {

@@ -10,8 +10,8 @@ import rankfall.Analysis.Findings;
 import rankfall.spec.Spec;
 
 /**
- * What the page shows, in its order. A {@code SafeString} is finished markup, a {@code String} plain
- * text that the template escapes; a list is empty where there is nothing to show.
+ * What the page shows, in its order. A {@code SafeString} is finished markup, a {@code String}
+ * plain text that the template escapes; a list is empty where there is nothing to show.
  *
  * @param family its name
  * @param title its title, or its name
@@ -19,6 +19,7 @@ import rankfall.spec.Spec;
  * @param status {@code complete}, {@code incomplete} or {@code failed}
  * @param statusWords the same as a sentence
  * @param message the first thing to read of a family that is not complete; may be empty
+ * @param noGeneralPoint what stands in place of the answer where there are no components
  * @param undecided sentences
  * @param remarks sentences
  * @param notes plain text of the spec; may be empty
@@ -43,6 +44,7 @@ record PageView(
     String status,
     String statusWords,
     String message,
+    String noGeneralPoint,
     List<String> undecided,
     List<String> remarks,
     String notes,
@@ -67,8 +69,7 @@ record PageView(
   record ConditionView(
       SafeString formula,
       int multiplicity,
-      int rank,
-      int kernelDimension,
+      String rank,
       SafeString kernel,
       String realPoints) {}
 
@@ -96,7 +97,9 @@ record PageView(
       List<SafeString> determinant,
       List<SafeString> kernel,
       List<SafeString> blocks,
-      List<MatrixView> dual) {}
+      String withoutDeterminant,
+      List<MatrixView> dual,
+      String withoutInverse) {}
 
   /** A stratum. */
   record StratumView(
@@ -141,6 +144,7 @@ record PageView(
         a.status().name().toLowerCase(Locale.ROOT),
         Words.status(a),
         a.message(),
+        Words.NO_GENERAL_POINT,
         a.undecided(),
         a.remarks(),
         spec.notes().orElse("").strip(),

@@ -32,7 +32,11 @@ public record SummaryRow(List<String> cells) {
           "type",
           "message");
 
-  /** Copies the cells and checks their number. */
+  /**
+   * Copies the cells and checks their number.
+   *
+   * @param cells one text a column
+   */
   public SummaryRow {
     cells = List.copyOf(cells);
     if (cells.size() != HEADER.size()) {
@@ -53,7 +57,8 @@ public record SummaryRow(List<String> cells) {
   }
 
   /**
-   * The row of an analysis; {@code generic_rank} and the signature are those of the first component.
+   * The row of an analysis; {@code generic_rank} and the signature are those of the first
+   * component.
    *
    * @param analysis of any status
    * @return its row
@@ -76,8 +81,7 @@ public record SummaryRow(List<String> cells) {
             signature.map(s -> Integer.toString(s.minus())).orElse(""),
             count(
                 contents.hasComponents(),
-                found.map(
-                    f -> f.components().stream().mapToInt(c -> c.conditions().size()).sum())),
+                found.map(f -> f.components().stream().mapToInt(c -> c.conditions().size()).sum())),
             count(contents.hasStrata(), found.map(f -> f.strata().size())),
             count(contents.hasRegions(), found.map(f -> f.regions().size())),
             found.flatMap(f -> f.strata().stream().findFirst().flatMap(s -> s.type())).orElse(""),

@@ -11,16 +11,22 @@ import rankfall.spec.Spec;
 
 /** Sentences that the page and the appendix share. */
 final class Words {
+  /** What stands in place of the answer where no component was analysed. */
+  static final String NO_GENERAL_POINT =
+      "Not decided: no general point of the parameter variety was analysed.";
+
+  /** What stands in place of the rank where the span is not closed. */
+  static final String NO_ALGEBRA = "no algebra";
+
   private Words() {}
 
   /** How far the analysis came, a sentence. */
   static String status(Analysis a) {
     return switch (a.status()) {
-      case COMPLETE -> "Complete: everything this report states was decided exactly.";
+      case COMPLETE -> "Complete. Every statement below is exact unless it is marked otherwise.";
       case INCOMPLETE ->
-          "Incomplete: what is stated was decided exactly, but lists can lack entries; see what is"
-              + " undecided.";
-      case FAILED -> "Failed: this family has no results.";
+          "Incomplete. What is stated is exact, but lists can lack entries: see what is undecided.";
+      case FAILED -> "Failed. This family has no results.";
     };
   }
 
@@ -107,9 +113,18 @@ final class Words {
             : " where one of these holds (the list can lack entries):");
   }
 
-  /** A count with its noun. */
-  static String count(int n, String noun, String plural) {
-    return n + " " + (n == 1 ? noun : plural);
+  /** Why no determinant is shown, a sentence. */
+  static String withoutDeterminant(Component c) {
+    return c.killing().rank() < c.basis().size()
+        ? "The determinant vanishes for all parameter values."
+        : "The determinant was not computed.";
+  }
+
+  /** Why no inverse is shown, a sentence. */
+  static String withoutInverse(Component c) {
+    return c.killing().rank() < c.basis().size()
+        ? "There is none: the form is degenerate for all parameter values."
+        : "The form is invertible at a general point, but its inverse was not computed.";
   }
 
   /** A line by which the result is cited. */

@@ -6,7 +6,6 @@ import java.util.LinkedHashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalInt;
 import java.util.Set;
 
 /** Reads {@code brackets}: one equation {@code [X, Y] = a*Z} a line, with {@code #} comments. */
@@ -21,6 +20,7 @@ final class BracketReader {
   private final boolean listed;
   private final boolean open;
   private final Faults faults;
+  private final Scope anyBracket;
   private final Map<String, Place> pairNames = new LinkedHashMap<>();
   private final Map<String, Place> inOrder = new LinkedHashMap<>();
 
@@ -37,6 +37,7 @@ final class BracketReader {
     this.listed = listed;
     this.open = open;
     this.faults = faults;
+    anyBracket = Scope.ofScalars("a bracket", names.roles(), open || !listed).withGenerators();
   }
 
   /**
@@ -117,7 +118,8 @@ final class BracketReader {
   private void expect(List<Token> tokens, int index, String sign) {
     Token token = tokens.get(Math.min(index, tokens.size() - 1));
     if (!token.is(sign)) {
-      String found = token.kind() == Token.Kind.END ? "the line ends" : "'" + token.text() + "' stands";
+      String found =
+          token.kind() == Token.Kind.END ? "the line ends" : "'" + token.text() + "' stands";
       throw SpecFault.of(
           text.place(token.from(), token.to()), found + " where '" + sign + "' is due", EXAMPLE);
     }
@@ -158,9 +160,7 @@ final class BracketReader {
   }
 
   private Scope scope(String left, String right) {
-    String setting = "the bracket of " + left + " and " + right;
-    return Scope.ofScalars(setting, names.roles(), open || !listed)
-        .withVectors(OptionalInt.empty());
+    return anyBracket.withSetting("the bracket of " + left + " and " + right);
   }
 
   /** Checks the right side; an equation that says nothing is left out. */
@@ -194,8 +194,7 @@ final class BracketReader {
     }
     Map<String, Role> known = new LinkedHashMap<>(names.roles());
     pairNames.keySet().forEach(name -> known.putIfAbsent(name, Role.GENERATOR));
-    Scope scope =
-        Scope.ofScalars(line.scope().setting(), known, false).withVectors(OptionalInt.empty());
+    Scope scope = Scope.ofScalars(line.scope().setting(), known, false).withGenerators();
     Set<Expression.Name> strange = new LinkedHashSet<>();
     for (Expression.Name name : NameNodes.of(line.equation().value())) {
       if (!name.name().equals("i") && !known.containsKey(name.name())) {

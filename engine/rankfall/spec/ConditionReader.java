@@ -70,7 +70,7 @@ final class ConditionReader {
     if (a.isEmpty() || b.isEmpty()) {
       return;
     }
-    int order = a.get().compareTo(b.get());
+    int order = a.get().subtract(b.get()).signum();
     boolean holds =
         switch (relation) {
           case EQUAL -> order == 0;
@@ -81,8 +81,7 @@ final class ConditionReader {
           case GREATER_OR_EQUAL -> order >= 0;
         };
     if (!holds) {
-      throw SpecFault.of(
-          text.place(), "this condition never holds", "no parameter point is left");
+      throw SpecFault.of(text.place(), "this condition never holds", "no parameter point is left");
     }
   }
 }

@@ -11,9 +11,23 @@ import org.apache.commons.numbers.fraction.BigFraction;
 final class DocumentReader {
   static final List<String> KEYS =
       List.of(
-          "family", "title", "notes", "ground", "convention", "parameters", "where", "constants",
-          "abbreviations", "order", "matrices", "brackets", "generators", "closure", "torus",
-          "covectors", "scan");
+          "family",
+          "title",
+          "notes",
+          "ground",
+          "convention",
+          "parameters",
+          "where",
+          "constants",
+          "abbreviations",
+          "order",
+          "matrices",
+          "brackets",
+          "generators",
+          "closure",
+          "torus",
+          "covectors",
+          "scan");
 
   private static final Map<String, Spec.Ground> GROUNDS = grounds();
   private static final Map<String, Spec.Convention> CONVENTIONS = conventions();
@@ -91,7 +105,9 @@ final class DocumentReader {
     Optional<ScalarText> text = fields.text("family", "family: my-family");
     if (!fields.has("family")) {
       faults.add(
-          start(root.place()), "the spec has no 'family'", "add a line such as 'family: my-family'");
+          start(root.place()),
+          "the spec has no 'family'",
+          "add a line such as 'family: my-family'");
     }
     if (text.isPresent() && !text.get().value().matches(FAMILY)) {
       faults.add(

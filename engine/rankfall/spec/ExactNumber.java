@@ -55,8 +55,6 @@ public final class ExactNumber {
     BigInteger scale = BigInteger.TEN.pow(Math.abs(power.intValueExact()));
     BigInteger value = new BigInteger(digits);
     return Optional.of(
-        power.signum() < 0
-            ? BigFraction.of(value, scale)
-            : BigFraction.of(value.multiply(scale)));
+        power.signum() < 0 ? BigFraction.of(value, scale) : BigFraction.of(value.multiply(scale)));
   }
 }

@@ -29,32 +29,77 @@ public sealed interface Expression {
    * @param <T> the result
    */
   interface Cases<T> {
-    /** An exact rational number. */
+    /**
+     * An exact rational number.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T number(Number e);
 
-    /** A parameter, constant, abbreviation, generator or matrix, or the imaginary unit {@code i}. */
+    /**
+     * A parameter, constant, abbreviation, generator or matrix, or the imaginary unit {@code i}.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T name(Name e);
 
-    /** The positive square root of a non-negative rational number. */
+    /**
+     * The positive square root of a non-negative rational number.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T root(Root e);
 
-    /** A function of an integer combination of parameters. */
+    /**
+     * A function of an integer combination of parameters.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T function(Function e);
 
-    /** A matrix unit. */
+    /**
+     * A matrix unit.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T unit(MatrixUnit e);
 
-    /** A sum, difference, product or quotient. */
+    /**
+     * A sum, difference, product or quotient.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T binary(Binary e);
 
-    /** A negated expression. */
+    /**
+     * A negated expression.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T negation(Negation e);
 
-    /** An integer power. */
+    /**
+     * An integer power.
+     *
+     * @param e the node
+     * @return the result for it
+     */
     T power(Power e);
   }
 
-  /** Exact rational number. */
+  /**
+   * Exact rational number.
+   *
+   * @param value the number in lowest terms
+   * @param place where it stands
+   */
   record Number(BigFraction value, Place place) implements Expression {
     @Override
     public <T> T fold(Cases<T> cases) {
@@ -62,7 +107,13 @@ public sealed interface Expression {
     }
   }
 
-  /** Name of a parameter, constant, abbreviation, generator or matrix; {@code i} is the unit. */
+  /**
+   * Name of a parameter, constant, abbreviation, generator or matrix; {@code i} is the imaginary
+   * unit.
+   *
+   * @param name the name as written
+   * @param place where it stands
+   */
   record Name(String name, Place place) implements Expression {
     @Override
     public <T> T fold(Cases<T> cases) {
@@ -70,7 +121,12 @@ public sealed interface Expression {
     }
   }
 
-  /** Positive square root of {@code radicand >= 0}. */
+  /**
+   * Square root that is not negative.
+   *
+   * @param radicand the number under the root, {@code >= 0}; it may be a square
+   * @param place where it stands
+   */
   record Root(BigFraction radicand, Place place) implements Expression {
     @Override
     public <T> T fold(Cases<T> cases) {
@@ -78,7 +134,13 @@ public sealed interface Expression {
     }
   }
 
-  /** {@code kind} of the combination {@code sum argument[p] * p}; the map holds no zero. */
+  /**
+   * A function of the combination {@code sum argument[p] * p} over parameters p.
+   *
+   * @param kind which function
+   * @param argument coefficients by parameter, at least one, none 0
+   * @param place where it stands
+   */
   record Function(FunctionKind kind, SortedMap<String, BigInteger> argument, Place place)
       implements Expression {
     @Override
@@ -87,7 +149,13 @@ public sealed interface Expression {
     }
   }
 
-  /** The matrix with a single 1 at {@code row}, {@code column}, both from 1. */
+  /**
+   * The matrix with a single 1 and zeros elsewhere.
+   *
+   * @param row the row of the 1, from 1
+   * @param column the column of the 1, from 1
+   * @param place where it stands
+   */
   record MatrixUnit(int row, int column, Place place) implements Expression {
     @Override
     public <T> T fold(Cases<T> cases) {
@@ -95,7 +163,14 @@ public sealed interface Expression {
     }
   }
 
-  /** {@code left operator right}. */
+  /**
+   * {@code left operator right}.
+   *
+   * @param operator the operation
+   * @param left the first operand
+   * @param right the second operand; never a number expression of value 0 in a quotient
+   * @param place where it stands
+   */
   record Binary(Operator operator, Expression left, Expression right, Place place)
       implements Expression {
     @Override
@@ -104,7 +179,12 @@ public sealed interface Expression {
     }
   }
 
-  /** {@code -operand}. */
+  /**
+   * {@code -operand}.
+   *
+   * @param operand what is negated
+   * @param place where it stands
+   */
   record Negation(Expression operand, Place place) implements Expression {
     @Override
     public <T> T fold(Cases<T> cases) {
@@ -112,7 +192,13 @@ public sealed interface Expression {
     }
   }
 
-  /** {@code base^exponent}, {@code |exponent| <= 64}. */
+  /**
+   * {@code base^exponent}.
+   *
+   * @param base what is raised
+   * @param exponent the power, {@code -64 <= exponent <= 64}
+   * @param place where it stands
+   */
   record Power(Expression base, int exponent, Place place) implements Expression {
     @Override
     public <T> T fold(Cases<T> cases) {
@@ -122,20 +208,31 @@ public sealed interface Expression {
 
   /** The four operations between two expressions. */
   enum Operator {
+    /** {@code +}. */
     PLUS,
+    /** {@code -}. */
     MINUS,
+    /** {@code *}. */
     TIMES,
+    /** {@code /}. */
     OVER
   }
 
   /** The functions of a parameter that the format knows. */
   enum FunctionKind {
+    /** Cosine. */
     COS,
+    /** Sine. */
     SIN,
+    /** Tangent. */
     TAN,
+    /** Exponential function. */
     EXP,
+    /** Hyperbolic cosine. */
     COSH,
+    /** Hyperbolic sine. */
     SINH,
+    /** Hyperbolic tangent. */
     TANH
   }
 }

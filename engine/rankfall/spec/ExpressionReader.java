@@ -60,7 +60,8 @@ final class ExpressionReader {
   static Expression read(ScalarText text, List<Token> tokens, Scope scope) {
     ExpressionReader reader = new ExpressionReader(text, tokens, scope);
     if (reader.peek().kind() == Token.Kind.END) {
-      throw SpecFault.of(reader.placeOf(reader.peek()), "an expression is missing in " + scope.setting());
+      throw SpecFault.of(
+          reader.placeOf(reader.peek()), "an expression is missing in " + scope.setting());
     }
     Part part = reader.sum();
     if (reader.peek().kind() != Token.Kind.END) {
@@ -132,8 +133,7 @@ final class ExpressionReader {
       Part inner = signed();
       depth--;
       Place place = text.place(sign.from(), inner.to());
-      return new Part(
-          new Expression.Negation(inner.expression(), place), sign.from(), inner.to());
+      return new Part(new Expression.Negation(inner.expression(), place), sign.from(), inner.to());
     }
     if (takeIf("+")) {
       descend(sign);
@@ -156,8 +156,7 @@ final class ExpressionReader {
     int to = tokens.get(at - 1).to();
     Place place = text.place(base.from(), to);
     if (peek().is("^")) {
-      throw SpecFault.of(
-          placeOf(peek()), "a power of a power", "set parentheses, as in (a^2)^3");
+      throw SpecFault.of(placeOf(peek()), "a power of a power", "set parentheses, as in (a^2)^3");
     }
     Optional<BigFraction> value = RationalValue.of(base.expression());
     if (exponent <= 0 && value.isPresent() && value.get().signum() == 0) {
@@ -173,7 +172,9 @@ final class ExpressionReader {
     Token token = peek();
     if (token.kind() != Token.Kind.NUMBER || !token.text().chars().allMatch(Character::isDigit)) {
       throw SpecFault.of(
-          placeOf(token), "an exponent is an integer literal", "write a power such as a^2 or a^(-1)");
+          placeOf(token),
+          "an exponent is an integer literal",
+          "write a power such as a^2 or a^(-1)");
     }
     at++;
     boolean fits =
@@ -259,8 +260,11 @@ final class ExpressionReader {
 
   private Part named(Token token) {
     Optional<FunctionKind> kind = Names.function(token.text());
-    if (kind.isPresent() || token.text().equals("sqrt")) {
-      return called(token, kind);
+    if (kind.isPresent()) {
+      return function(token, kind.get());
+    }
+    if (token.text().equals("sqrt")) {
+      return root(token);
     }
     if (token.text().equals("E") && scope.units().isPresent()) {
       return unit(token, scope.units().getAsInt());
@@ -269,8 +273,7 @@ final class ExpressionReader {
       throw noFunction(token);
     }
     scope.check(token.text(), placeOf(token));
-    return new Part(
-        new Expression.Name(token.text(), placeOf(token)), token.from(), token.to());
+    return new Part(new Expression.Name(token.text(), placeOf(token)), token.from(), token.to());
   }
 
   private SpecFault noFunction(Token token) {
@@ -297,29 +300,37 @@ final class ExpressionReader {
             .orElse(all));
   }
 
-  private Part called(Token name, Optional<FunctionKind> kind) {
+  /** The argument of a function in its parentheses. */
+  private Part argument(Token name, String example) {
     Token open = peek();
     if (!takeIf("(")) {
       throw SpecFault.of(
           placeOf(name),
           "'" + name.text() + "' stands without its argument",
-          "write it in parentheses, as in " + name.text() + (kind.isPresent() ? "(t)" : "(2)"));
+          "write it in parentheses, as in " + example);
     }
     descend(open);
     Part inner = sum();
     close(open);
     depth--;
+    return inner;
+  }
+
+  private Part root(Token name) {
+    Part inner = argument(name, "sqrt(2)");
     int to = tokens.get(at - 1).to();
-    Place place = text.place(name.from(), to);
-    Place argument = text.place(inner.from(), inner.to());
-    if (kind.isEmpty()) {
-      BigFraction radicand = Radicand.of(inner.expression(), argument);
-      return new Part(new Expression.Root(radicand, place), name.from(), to);
-    }
+    BigFraction radicand = Radicand.of(inner.expression(), text.place(inner.from(), inner.to()));
+    return new Part(new Expression.Root(radicand, text.place(name.from(), to)), name.from(), to);
+  }
+
+  private Part function(Token name, FunctionKind kind) {
+    Part inner = argument(name, name.text() + "(t)");
+    int to = tokens.get(at - 1).to();
     SortedMap<String, BigInteger> combination =
-        IntegerCombination.of(inner.expression(), argument, name.text(), scope);
+        IntegerCombination.of(
+            inner.expression(), text.place(inner.from(), inner.to()), name.text(), scope);
     return new Part(
-        new Expression.Function(kind.get(), combination, place), name.from(), to);
+        new Expression.Function(kind, combination, text.place(name.from(), to)), name.from(), to);
   }
 
   private Part unit(Token name, int order) {
@@ -356,12 +367,12 @@ final class ExpressionReader {
   }
 
   private Token missing(String what) {
-    throw SpecFault.of(
-        placeOf(peek()), what + " is missing", "write a matrix unit as E(2,1)");
+    throw SpecFault.of(placeOf(peek()), what + " is missing", "write a matrix unit as E(2,1)");
   }
 
   private static boolean inside(Token index, int order) {
-    BigInteger value = new BigInteger(index.text().substring(0, Math.min(12, index.text().length())));
+    BigInteger value =
+        new BigInteger(index.text().substring(0, Math.min(12, index.text().length())));
     return value.signum() > 0
         && index.text().length() <= 12
         && value.compareTo(BigInteger.valueOf(order)) <= 0;

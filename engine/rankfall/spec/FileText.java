@@ -132,11 +132,14 @@ final class FileText {
   }
 
   Diagnostic diagnostic(SpecFault fault) {
-    return diagnostic(fault.place(), fault.getMessage(), fault.advice());
+    String line = lines.get(fault.place().line() - 1);
+    return new Diagnostic(
+        fault.place(), line, oneLine(fault.getMessage()), fault.advice().map(FileText::oneLine));
   }
 
-  Diagnostic diagnostic(Place place, String cause, Optional<String> advice) {
-    return new Diagnostic(place, lines.get(place.line() - 1), cause, advice);
+  /** Names in a message may hold line ends, where a key is quoted. */
+  private static String oneLine(String message) {
+    return message.replaceAll("\\R|\t", " ");
   }
 
   /** The first character that YAML does not allow, if there is one. */

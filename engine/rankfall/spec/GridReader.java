@@ -69,7 +69,7 @@ final class GridReader {
     BigFraction first = Scalars.number(from.get().value(), "'from'");
     BigFraction last = Scalars.number(to.get().value(), "'to'");
     int count = Scalars.integer(points.get(), "points", 2, MAX_POINTS);
-    if (first.compareTo(last) >= 0) {
+    if (first.subtract(last).signum() >= 0) {
       throw SpecFault.of(
           to.get().valuePlace(),
           "the scan of '" + entry.name() + "' does not go up: 'to' is not above 'from'",

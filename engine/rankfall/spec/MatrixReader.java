@@ -9,7 +9,9 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.Set;
 
-/** Reads {@code matrices}: rows of entries, or combinations of matrix units and earlier matrices. */
+/**
+ * Reads {@code matrices}: rows of entries, or combinations of matrix units and earlier matrices.
+ */
 final class MatrixReader {
   /** The largest order of matrices. */
   static final int MAX_ORDER = 1000;
@@ -35,24 +37,25 @@ final class MatrixReader {
   /**
    * Reads all matrices; what is faulty is left out.
    *
-   * @param given the key {@code order}, read already
-   * @param orderText where it stands
+   * @param given what the key {@code order} says
    */
-  Spec.Matrices read(
-      OptionalInt given, Optional<ScalarText> orderText, Spec.Closure closure) {
+  Spec.Matrices read(Order given, Spec.Closure closure) {
     Map<String, Role> scalars = names.roles();
     Set<String> declared = declare();
-    Order order = order(given, orderText);
+    Order order = order(given);
     List<Spec.NamedMatrix> matrices = new ArrayList<>();
     Map<String, Role> earlier = new LinkedHashMap<>(scalars);
     Map<String, Role> later = new LinkedHashMap<>();
     entries.forEach(e -> later.put(e.name(), Role.MATRIX));
     for (YamlNode.Entry entry : entries) {
       int before = matrices.size();
-      faults.gather(() -> body(entry, order, earlier, later).ifPresent(
-          body ->
-              matrices.add(
-                  new Spec.NamedMatrix(entry.name(), body, entry.key().place()))));
+      faults.gather(
+          () ->
+              body(entry, order, earlier, later)
+                  .ifPresent(
+                      body ->
+                          matrices.add(
+                              new Spec.NamedMatrix(entry.name(), body, entry.key().place()))));
       if (declared.contains(entry.name())) {
         earlier.put(entry.name(), Role.MATRIX);
         later.remove(entry.name());
@@ -75,12 +78,32 @@ final class MatrixReader {
     return declared;
   }
 
-  /** The order that all matrices have, and what gave it. */
-  private record Order(OptionalInt value, String giver) {}
+  /**
+   * The order that all matrices have.
+   *
+   * @param value empty where it is not known
+   * @param giver what gave it, as in "X has 3 rows"
+   */
+  record Order(OptionalInt value, String giver) {
+    /** The key {@code order} is not there. */
+    static Order unwritten() {
+      return new Order(OptionalInt.empty(), "");
+    }
 
-  private Order order(OptionalInt given, Optional<ScalarText> text) {
-    if (given.isPresent()) {
-      return new Order(given, "'order' is " + given.getAsInt());
+    /** The key {@code order} is there with a faulty value. */
+    static Order faulty() {
+      return new Order(OptionalInt.empty(), "'order' is faulty");
+    }
+
+    /** The key {@code order} is there. */
+    static Order written(int order) {
+      return new Order(OptionalInt.of(order), "'order' is " + order);
+    }
+  }
+
+  private Order order(Order given) {
+    if (given.value().isPresent()) {
+      return given;
     }
     for (YamlNode.Entry entry : entries) {
       if (entry.value() instanceof YamlNode.Sequence rows && !rows.items().isEmpty()) {
@@ -88,13 +111,13 @@ final class MatrixReader {
         return new Order(OptionalInt.of(count), entry.name() + " has " + count + " rows");
       }
     }
-    if (text.isEmpty() && !entries.isEmpty()) {
+    if (given.equals(Order.unwritten())) {
       faults.add(
           entries.get(0).key().place(),
           "the order of the matrices is not known: none is written in rows",
           "add a line such as 'order: 3'");
     }
-    return new Order(OptionalInt.empty(), "");
+    return given;
   }
 
   private Optional<Spec.MatrixBody> body(
@@ -113,7 +136,7 @@ final class MatrixReader {
     Scope scope =
         Scope.ofScalars(entry.name(), earlier, open)
             .withLater(later)
-            .withVectors(OptionalInt.of(order.value().orElse(MAX_ORDER)));
+            .withMatrices(order.value().orElse(MAX_ORDER));
     Expression value = ExpressionReader.read(text, scope);
     if (!open) {
       Linearity.check(value, scope, "matrices");
@@ -160,8 +183,13 @@ final class MatrixReader {
       if (length != count) {
         throw SpecFault.of(
             row.place(),
-            name + " is not square: row " + (k + 1) + " has " + counted(length, "entry", "entries")
-                + ", there are " + counted(count, "row", "rows"),
+            name
+                + " is not square: row "
+                + (k + 1)
+                + " has "
+                + counted(length, "entry", "entries")
+                + " and the matrix "
+                + counted(count, "row", "rows"),
             "give every row as many entries as there are rows");
       }
     }

@@ -6,7 +6,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.OptionalInt;
 
 /** Reads matrices or brackets, with the keys that go with them. */
 final class PresentationReader {
@@ -63,7 +62,11 @@ final class PresentationReader {
     boolean brackets = fields.has("brackets");
     if (matrices && brackets) {
       faults.add(
-          fields.entry("brackets").or(() -> fields.entry("matrices")).map(e -> e.key().place()).orElse(start),
+          fields
+              .entry("brackets")
+              .or(() -> fields.entry("matrices"))
+              .map(e -> e.key().place())
+              .orElse(start),
           "both 'matrices' and 'brackets' stand here",
           "give one of them");
       return Optional.empty();
@@ -77,8 +80,7 @@ final class PresentationReader {
       misplaced("closure", "matrices");
       return brackets();
     }
-    faults.add(
-        start, "neither 'matrices' nor 'brackets' stands in the spec", "give one of them");
+    faults.add(start, "neither 'matrices' nor 'brackets' stands in the spec", "give one of them");
     return Optional.empty();
   }
 
@@ -97,15 +99,7 @@ final class PresentationReader {
     Optional<YamlNode.Mapping> mapping =
         fields.mapping("matrices", "matrices: {X: [[0, 1], [-1, 0]]}");
     Spec.Closure closure = fields.choice("closure", CLOSURES);
-    Optional<ScalarText> orderText = fields.text("order", "order: 3");
-    OptionalInt[] order = {OptionalInt.empty()};
-    orderText.ifPresent(
-        text ->
-            faults.gather(
-                () ->
-                    order[0] =
-                        OptionalInt.of(
-                            Scalars.integer(text, "order", 1, MatrixReader.MAX_ORDER))));
+    MatrixReader.Order order = order();
     if (mapping.isEmpty()) {
       return Optional.empty();
     }
@@ -114,11 +108,25 @@ final class PresentationReader {
       faults.add(mapping.get().place(), "no matrix is given", "write at least one");
       return Optional.empty();
     }
-    if (tooMany(entries.size(), entries.get(entries.size() - 1).key().place())) {
+    if (tooMany(
+        entries.size(), entries.get(Math.min(entries.size() - 1, MAX_GENERATORS)).key().place())) {
       return Optional.empty();
     }
-    return Optional.of(
-        new MatrixReader(entries, names, open, faults).read(order[0], orderText, closure));
+    return Optional.of(new MatrixReader(entries, names, open, faults).read(order, closure));
+  }
+
+  private MatrixReader.Order order() {
+    Optional<ScalarText> text = fields.text("order", "order: 3");
+    if (text.isEmpty()) {
+      return fields.has("order") ? MatrixReader.Order.faulty() : MatrixReader.Order.unwritten();
+    }
+    try {
+      return MatrixReader.Order.written(
+          Scalars.integer(text.get(), "order", 1, MatrixReader.MAX_ORDER));
+    } catch (SpecFault fault) {
+      faults.add(fault);
+      return MatrixReader.Order.faulty();
+    }
   }
 
   private Optional<Spec.Presentation> brackets() {
@@ -158,7 +166,9 @@ final class PresentationReader {
   private boolean tooMany(int count, Place place) {
     if (count > MAX_GENERATORS) {
       faults.add(
-          place, "the family has " + count + " generators", "at most " + MAX_GENERATORS + " are read");
+          place,
+          "the family has " + count + " generators",
+          "at most " + MAX_GENERATORS + " are read");
       return true;
     }
     return false;

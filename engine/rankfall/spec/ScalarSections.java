@@ -113,8 +113,7 @@ final class ScalarSections {
                 Scope.ofScalars("the abbreviation " + entry.name(), names.roles(), open)
                     .withLater(later);
             Expression value = ExpressionReader.read(text, scope);
-            abbreviations.add(
-                new Spec.Abbreviation(entry.name(), value, entry.key().place()));
+            abbreviations.add(new Spec.Abbreviation(entry.name(), value, entry.key().place()));
           });
       faults.gather(() -> names.declare(entry.name(), Role.ABBREVIATION, entry.key().place()));
       later.remove(entry.name());

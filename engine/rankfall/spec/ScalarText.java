@@ -61,9 +61,7 @@ final class ScalarText {
   /** Nothing was written, or a plain {@code null}. */
   boolean isNull() {
     return isPlain()
-        && (value.isEmpty()
-            || value.equals("~")
-            || value.toLowerCase(Locale.ROOT).equals("null"));
+        && (value.isEmpty() || value.equals("~") || value.toLowerCase(Locale.ROOT).equals("null"));
   }
 
   int size() {

@@ -34,8 +34,7 @@ final class Scalars {
 
   static int integer(ScalarText text, String setting, int least, int most) {
     String digits = text.value();
-    boolean plain =
-        digits.matches("[0-9]{1," + MAX_INTEGER_DIGITS + "}");
+    boolean plain = digits.matches("[0-9]{1," + MAX_INTEGER_DIGITS + "}");
     Optional<Integer> value = plain ? Optional.of(Integer.parseInt(digits)) : Optional.empty();
     return value
         .filter(v -> least <= v && v <= most)

@@ -1,14 +1,12 @@
 package rankfall.spec;
 
-import java.util.Collections;
-import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
 
 /**
- * What may stand in an expression.
+ * What may stand in an expression. The maps are shared with the caller and not changed here.
  *
  * @param setting where the expression stands, as in "an entry of Lx"
  * @param known the known names
@@ -25,11 +23,6 @@ record Scope(
     OptionalInt units,
     boolean open) {
 
-  Scope {
-    known = Collections.unmodifiableMap(new LinkedHashMap<>(known));
-    later = Collections.unmodifiableMap(new LinkedHashMap<>(later));
-  }
-
   /** Numbers and the scalar names among those known. */
   static Scope ofScalars(String setting, Map<String, Role> known, boolean open) {
     return new Scope(setting, known, Map.of(), false, OptionalInt.empty(), open);
@@ -44,8 +37,16 @@ record Scope(
     return new Scope(setting, known, names, vectors, units, open);
   }
 
-  Scope withVectors(OptionalInt order) {
-    return new Scope(setting, known, later, true, order, open);
+  Scope withSetting(String words) {
+    return new Scope(words, known, later, vectors, units, open);
+  }
+
+  Scope withGenerators() {
+    return new Scope(setting, known, later, true, OptionalInt.empty(), open);
+  }
+
+  Scope withMatrices(int order) {
+    return new Scope(setting, known, later, true, OptionalInt.of(order), open);
   }
 
   boolean isParameter(String name) {
@@ -83,8 +84,8 @@ record Scope(
     if (later.containsKey(name)) {
       return SpecFault.of(
           place,
-          "'" + name + "' in " + setting + " is given only further down",
-          "move it before its use");
+          "'" + name + "' in " + setting + " is not given before it",
+          "only earlier ones can be used");
     }
     List<String> allowed =
         known.entrySet().stream()
@@ -98,7 +99,11 @@ record Scope(
     }
     String advice =
         Spelling.nearest(name, allowed)
-            .map(near -> "the nearest known name is '" + near + "'; a new one is listed under 'parameters'")
+            .map(
+                near ->
+                    "the nearest known name is '"
+                        + near
+                        + "'; a new one is listed under 'parameters'")
             .orElse("list it under 'parameters'");
     return SpecFault.of(place, cause, advice);
   }

@@ -42,36 +42,52 @@ public record Spec(
 
   /** The field over which the span is taken. */
   public enum Ground {
+    /** The span over the real numbers. */
     REAL,
+    /** The span over the complex numbers. */
     COMPLEX
   }
 
   /** {@code HERMITIAN}: the algebra is spanned by -i T for the listed T. */
   public enum Convention {
+    /** The algebra is spanned by the listed elements. */
     DIRECT,
+    /** The algebra is spanned by -i T for the listed T. */
     HERMITIAN
   }
 
   /** {@code GENERATE}: brackets are added as new generators until the span is closed. */
   public enum Closure {
+    /** The conditions for a closed span join the relations. */
     REQUIRE,
+    /** Brackets join the generators. */
     GENERATE
   }
 
   /** Order relations that a condition may state. */
   public enum Relation {
+    /** {@code =}. */
     EQUAL,
+    /** {@code !=}. */
     UNEQUAL,
+    /** {@code <}. */
     LESS,
+    /** {@code <=}. */
     LESS_OR_EQUAL,
+    /** {@code >}. */
     GREATER,
+    /** {@code >=}. */
     GREATER_OR_EQUAL
   }
 
   /**
    * {@code left relation right}.
    *
+   * @param left its left side, without generators
+   * @param relation the sign between the sides
+   * @param right its right side, without generators
    * @param text the condition as written
+   * @param place where it stands
    */
   public record Condition(
       Expression left, Relation relation, Expression right, String text, Place place) {}
@@ -79,12 +95,22 @@ public record Spec(
   /**
    * An algebraic number: the real root of {@code minimal} nearest to {@code near}.
    *
-   * @param coefficients of the polynomial, constant term first, last one not 0
+   * @param name its name
+   * @param coefficients of the polynomial, constant term first, last one not 0; the degree is 1 to
+   *     64. Whether it is irreducible, or has a real root, is not looked at here
+   * @param near a number near the root that is meant
+   * @param place where its name stands
    */
   public record Constant(
       String name, List<BigFraction> coefficients, BigFraction near, Place place) {}
 
-  /** A name for a longer expression. */
+  /**
+   * A name for a longer expression.
+   *
+   * @param name the name
+   * @param value what it stands for; it uses earlier abbreviations at most
+   * @param place where its name stands
+   */
   public record Abbreviation(String name, Expression value, Place place) {}
 
   /** Matrices or brackets. */
@@ -101,6 +127,7 @@ public record Spec(
    * Matrices of one order.
    *
    * @param order number of rows and of columns
+   * @param closure what is done where the span is not closed
    * @param matrices in the order of the text
    */
   public record Matrices(int order, Closure closure, List<NamedMatrix> matrices)
@@ -111,16 +138,30 @@ public record Spec(
     }
   }
 
-  /** A matrix with its name. */
+  /**
+   * A matrix with its name.
+   *
+   * @param name the name of the generator
+   * @param body its entries
+   * @param place where its name stands
+   */
   public record NamedMatrix(String name, MatrixBody body, Place place) {}
 
   /** A matrix by rows, or a combination of matrix units and earlier matrices. */
   public sealed interface MatrixBody {}
 
-  /** Rows of entries, square. */
+  /**
+   * Rows of entries, square.
+   *
+   * @param entries row by row
+   */
   public record Rows(List<List<Expression>> entries) implements MatrixBody {}
 
-  /** A combination of matrix units and of earlier matrices. */
+  /**
+   * A combination of matrix units and of earlier matrices.
+   *
+   * @param value linear in them by its form, or a number expression of value 0
+   */
   public record Combination(Expression value) implements MatrixBody {}
 
   /**
@@ -132,7 +173,14 @@ public record Spec(
   public record Brackets(List<String> generators, List<BracketEquation> equations)
       implements Presentation {}
 
-  /** {@code [left, right] = value}, a combination of generators. */
+  /**
+   * {@code [left, right] = value}.
+   *
+   * @param left the first generator
+   * @param right the second generator, another one
+   * @param value a combination of generators by its form, or a number expression of value 0
+   * @param place where the equation stands
+   */
   public record BracketEquation(String left, String right, Expression value, Place place) {}
 
   /**
@@ -147,6 +195,9 @@ public record Spec(
     /**
      * A fault at a place of this file.
      *
+     * @param place the stretch of text at fault
+     * @param cause what is wrong
+     * @param advice what would be right, where that can be said
      * @return the diagnostic with the line shown
      */
     public Diagnostic fault(Place place, String cause, Optional<String> advice) {

@@ -46,7 +46,9 @@ public final class SpecReader {
     if (results.isEmpty()) {
       SpecFault fault =
           SpecFault.of(
-              file.place(0, 0, 1), "the file holds no spec", "begin with a line such as 'family: my-family'");
+              file.place(0, 0, 1),
+              "the file holds no spec",
+              "begin with a line such as 'family: my-family'");
       results.add(faulty(file.diagnostic(fault)));
     }
     return List.copyOf(results);

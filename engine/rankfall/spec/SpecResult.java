@@ -20,7 +20,12 @@ public sealed interface SpecResult {
    * @param diagnostics the faults in the order of the text, 1 to 20
    */
   record Faulty(Optional<String> family, List<Diagnostic> diagnostics) implements SpecResult {
-    /** Copies the list. */
+    /**
+     * Copies the list.
+     *
+     * @param family the name of the family, where it could be read
+     * @param diagnostics the faults, at least one
+     */
     public Faulty {
       diagnostics = List.copyOf(diagnostics);
       if (diagnostics.isEmpty()) {

@@ -50,10 +50,7 @@ final class Spelling {
     boolean same = a.charAt(i - 1) == b.charAt(j - 1);
     int best = Math.min(d[i - 1][j - 1] + (same ? 0 : 1), 1 + Math.min(d[i - 1][j], d[i][j - 1]));
     boolean swap =
-        i > 1
-            && j > 1
-            && a.charAt(i - 1) == b.charAt(j - 2)
-            && a.charAt(i - 2) == b.charAt(j - 1);
+        i > 1 && j > 1 && a.charAt(i - 1) == b.charAt(j - 2) && a.charAt(i - 2) == b.charAt(j - 1);
     return swap ? Math.min(best, d[i - 2][j - 2] + 1) : best;
   }
 }

@@ -6,6 +6,9 @@ import java.util.Map;
 
 /** Cuts a text, or one line of it, into tokens. */
 final class Tokenizer {
+  /** A longer expression is refused. */
+  static final int MAX_TOKENS = 200_000;
+
   private static final List<String> LONG_SYMBOLS = List.of("!=", "<=", ">=");
   private static final String SHORT_SYMBOLS = "+-*/^()[],=<>";
 
@@ -42,6 +45,12 @@ final class Tokenizer {
     Tokenizer tokenizer = new Tokenizer(text, from, to);
     List<Token> tokens = new ArrayList<>();
     while (tokenizer.skipBlanks()) {
+      if (tokens.size() == MAX_TOKENS) {
+        throw SpecFault.of(
+            text.place(tokenizer.at, tokenizer.at + 1),
+            "an expression of over " + MAX_TOKENS + " numbers, names and signs",
+            "give parts of it names under 'abbreviations'");
+      }
       tokens.add(tokenizer.next());
     }
     tokens.add(new Token(Token.Kind.END, "", to, to));

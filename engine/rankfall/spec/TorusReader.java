@@ -53,7 +53,12 @@ final class TorusReader {
   private static SpecFault unknown(String name, Place place, String key, List<String> known) {
     return SpecFault.of(
         place,
-        "'" + name + "' in '" + key + "' is not " + (key.equals("torus") ? "a generator" : "in the torus"),
+        "'"
+            + name
+            + "' in '"
+            + key
+            + "' is not "
+            + (key.equals("torus") ? "a generator" : "in the torus"),
         Spelling.meant(name, known)
             .map(near -> "did you mean '" + near + "'?")
             .orElse("the names are " + String.join(", ", known)));

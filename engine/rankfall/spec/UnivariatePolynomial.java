@@ -17,8 +17,8 @@ final class UnivariatePolynomial implements Expression.Cases<Map<Integer, BigFra
   /**
    * The coefficients, constant term first, last one not 0.
    *
-   * @throws SpecFault if the expression is no polynomial in one name of degree 1 to 64 with rational
-   *     coefficients
+   * @throws SpecFault if the expression is no polynomial in one name of degree 1 to 64 with
+   *     rational coefficients
    */
   static List<BigFraction> coefficients(Expression e) {
     List<String> names =
@@ -26,7 +26,11 @@ final class UnivariatePolynomial implements Expression.Cases<Map<Integer, BigFra
     if (names.size() > 1) {
       throw SpecFault.of(
           e.place(),
-          "a minimal polynomial has one variable, not '" + names.get(0) + "' and '" + names.get(1) + "'");
+          "a minimal polynomial has one variable, not '"
+              + names.get(0)
+              + "' and '"
+              + names.get(1)
+              + "'");
     }
     Map<Integer, BigFraction> terms = e.fold(new UnivariatePolynomial());
     int degree = terms.keySet().stream().mapToInt(Integer::intValue).max().orElse(0);
@@ -66,8 +70,7 @@ final class UnivariatePolynomial implements Expression.Cases<Map<Integer, BigFra
             b.forEach(
                 (k, d) -> {
                   if (j + k > MAX_DEGREE) {
-                    throw SpecFault.of(
-                        at.place(), "the degree goes over " + MAX_DEGREE);
+                    throw SpecFault.of(at.place(), "the degree goes over " + MAX_DEGREE);
                   }
                   result.merge(j + k, c.multiply(d), BigFraction::add);
                 }));

@@ -34,6 +34,7 @@ final class YamlComposer {
   private final Iterator<Event> events;
   private final Map<Anchor, Counted> anchors = new HashMap<>();
   private int documentLine;
+  private int lastLine;
   private int repeated;
 
   YamlComposer(FileText file, int lineShift, Iterator<Event> events) {
@@ -45,7 +46,7 @@ final class YamlComposer {
   /** Moves to the next document; false at the end of the stream. */
   boolean findDocument() {
     while (events.hasNext()) {
-      Event event = events.next();
+      Event event = next();
       if (event instanceof DocumentStartEvent) {
         documentLine = place(event).line() - 1;
         return true;
@@ -59,11 +60,22 @@ final class YamlComposer {
     return documentLine;
   }
 
+  private Event next() {
+    Event event = events.next();
+    lastLine = event.getEndMark().orElseThrow().getLine() + lineShift;
+    return event;
+  }
+
+  /** The line up to which the text was used, from 0. */
+  int lastLine() {
+    return lastLine;
+  }
+
   /** The root of the document found. */
   YamlNode document() {
     anchors.clear();
     repeated = 0;
-    return node(events.next(), 0).node();
+    return node(next(), 0).node();
   }
 
   private Counted node(Event event, int depth) {
@@ -77,8 +89,7 @@ final class YamlComposer {
       if (depth >= MAX_DEPTH) {
         throw SpecFault.of(place(event), "lists and mappings nested over " + MAX_DEPTH + " deep");
       }
-      counted =
-          event instanceof MappingStartEvent ? mapping(event, depth) : sequence(event, depth);
+      counted = event instanceof MappingStartEvent ? mapping(event, depth) : sequence(event, depth);
     }
     checkTag(event);
     Optional<Anchor> anchor = ((NodeEvent) event).getAnchor();
@@ -108,12 +119,12 @@ final class YamlComposer {
   private Counted sequence(Event start, int depth) {
     List<YamlNode> items = new ArrayList<>();
     int size = 1;
-    Event event = events.next();
+    Event event = next();
     while (event.getEventId() != Event.ID.SequenceEnd) {
       Counted item = node(event, depth + 1);
       items.add(item.node());
       size += item.size();
-      event = events.next();
+      event = next();
     }
     return new Counted(new YamlNode.Sequence(items, place(start, event)), size);
   }
@@ -121,16 +132,16 @@ final class YamlComposer {
   private Counted mapping(Event start, int depth) {
     List<YamlNode.Entry> entries = new ArrayList<>();
     int size = 1;
-    Event event = events.next();
+    Event event = next();
     while (event.getEventId() != Event.ID.MappingEnd) {
       Counted key = node(event, depth + 1);
-      Counted value = node(events.next(), depth + 1);
+      Counted value = node(next(), depth + 1);
       if (!(key.node() instanceof YamlNode.Text text)) {
         throw SpecFault.of(key.node().place(), "a key is to be a name, not " + key.node().kind());
       }
       entries.add(new YamlNode.Entry(text.text(), value.node()));
       size += key.size() + value.size();
-      event = events.next();
+      event = next();
     }
     return new Counted(new YamlNode.Mapping(entries, place(start, event)), size);
   }
@@ -174,9 +185,7 @@ final class YamlComposer {
     Mark end = last.getEndMark().orElseThrow();
     int line = start.getLine() + lineShift;
     int length =
-        start.getLine() == end.getLine()
-            ? end.getColumn() - start.getColumn()
-            : Integer.MAX_VALUE;
+        start.getLine() == end.getLine() ? end.getColumn() - start.getColumn() : Integer.MAX_VALUE;
     return file.place(line, start.getColumn(), length);
   }
 }

@@ -46,12 +46,12 @@ final class YamlReader {
     LoadSettings settings = LoadSettings.builder().setCodePointLimit(Integer.MAX_VALUE).build();
     int start = firstLine;
     try {
-      Iterator<Event> events =
-          new Parse(settings).parseString(file.from(firstLine)).iterator();
+      Iterator<Event> events = new Parse(settings).parseString(file.from(firstLine)).iterator();
       YamlComposer composer = new YamlComposer(file, firstLine, events);
       while (composer.findDocument()) {
         start = composer.documentLine();
         documents.add(new YamlDocument.Tree(composer.document()));
+        start = Math.min(composer.lastLine(), file.lineCount() - 1);
       }
       return file.lineCount();
     } catch (SpecFault fault) {
@@ -59,29 +59,29 @@ final class YamlReader {
     } catch (MarkedYamlEngineException e) {
       return breakOff(start, syntaxFault(e, firstLine));
     } catch (YamlEngineException e) {
-      return breakOff(start, SpecFault.of(file.place(start, 0, 1), "not YAML 1.2: " + oneLine(e.getMessage())));
+      return breakOff(
+          start, SpecFault.of(file.place(start, 0, 1), "not YAML 1.2: " + oneLine(e.getMessage())));
     }
   }
 
-  private int breakOff(int start, SpecFault fault) {
+  private int breakOff(int documentLine, SpecFault fault) {
     broken++;
-    int end = Math.max(start, fault.place().line() - 1);
-    Optional<String> family = Optional.empty();
-    for (int line = start; line <= end && family.isEmpty(); line++) {
-      if (line > start && opensDocument(line)) {
-        start = line;
-      }
-      Matcher matcher = FAMILY_LINE.matcher(file.lines().get(line));
-      if (matcher.matches()) {
-        family = Optional.of(matcher.group(1));
-      }
-    }
-    documents.add(new YamlDocument.Broken(family, file.diagnostic(fault)));
-    int next = opensDocument(end) && end > start ? end : end + 1;
+    int faultLine = Math.max(documentLine, fault.place().line() - 1);
+    int next = opensDocument(faultLine) && faultLine > documentLine ? faultLine : faultLine + 1;
     while (next < file.lineCount() && !opensDocument(next)) {
       next++;
     }
+    documents.add(
+        new YamlDocument.Broken(familyBetween(documentLine, next), file.diagnostic(fault)));
     return next;
+  }
+
+  private Optional<String> familyBetween(int from, int to) {
+    return file.lines().subList(from, to).stream()
+        .map(FAMILY_LINE::matcher)
+        .filter(Matcher::matches)
+        .map(matcher -> matcher.group(1))
+        .findFirst();
   }
 
   private boolean opensDocument(int line) {

@@ -10,9 +10,9 @@
  * square and of one order; matrix units lie inside it; right-hand sides of brackets and
  * combinations of matrices are linear in generators; every number is exact; lists and maps cannot
  * be changed. What may not: that conditions can be met, that denominators differ from 0 (other than
- * literal ones), that minimal polynomials are irreducible, that a pair of generators given twice has
- * equal brackets, that Jacobi's identity holds. Those questions need arithmetic and belong to later
- * rooms.
+ * literal ones), that minimal polynomials are irreducible, that a pair of generators given twice
+ * has equal brackets, that Jacobi's identity holds. Those questions need arithmetic and belong to
+ * later rooms.
  *
  * <p>Nothing here evaluates, prints, or opens a file. Imports: java.base, snakeyaml-engine and
  * commons-numbers-fraction; no other room.

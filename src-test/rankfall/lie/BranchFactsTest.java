@@ -87,7 +87,7 @@ class BranchFactsTest {
     return polynomials.stream().anyMatch(chain::vanishes);
   }
 
-  /** A condition that holds only because of the equations must not strike out an unknown. */
+  /** Where the only constant vanishes on the chain, every form is invariant. */
   @Test
   void invariantFormsOnAChain() {
     List<Integer> counts = new ArrayList<>();
@@ -103,5 +103,25 @@ class BranchFactsTest {
       counts.add(InvariantForms.of(LieBracket.of(constants)).count());
     }
     assertEquals(List.of(3, 3, 6), counts);
+  }
+
+  /**
+   * [x,y] = a y, [x,z] = m z, [y,z] = n t on a + m = 0: class A_{4,8}, which has an invariant form
+   * of rank 4. The condition (a + m) B(y,z) = 0 says nothing there, though it looks like a lone
+   * unknown.
+   */
+  @Test
+  void conditionThatVanishesOnTheChainStrikesOutNothing() {
+    Chain chain = where(1, A.plus(M));
+    SortedMap<StructureConstants.Pair, SortedMap<Integer, Polynomial>> c = new TreeMap<>();
+    c.put(new StructureConstants.Pair(0, 1), new TreeMap<>(java.util.Map.of(1, A)));
+    c.put(new StructureConstants.Pair(0, 2), new TreeMap<>(java.util.Map.of(2, M)));
+    c.put(new StructureConstants.Pair(1, 2), new TreeMap<>(java.util.Map.of(3, N)));
+    Polynomial one = chain.one();
+    InvariantForms<Polynomial> forms =
+        InvariantForms.of(
+            LieBracket.of(new StructureConstants<>(chain, 4, c, one, List.of(one, one, one, one))));
+    assertEquals(2, forms.count());
+    assertEquals(new MaximalRank(4, true), forms.maximalRank());
   }
 }

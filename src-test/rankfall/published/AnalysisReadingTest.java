@@ -57,7 +57,14 @@ class AnalysisReadingTest {
                       RationalFunction.of(
                           Polynomial.one(T), VARIABLE.times(Polynomial.constant(T, 4)))),
                   new MatrixEntry(2, 2, RationalFunction.of(T, BigFraction.of(1, 8))))),
-          List.of(new Analysis.Condition(List.of(VARIABLE), 2, 1, 2, List.of(), RealPoints.YES)));
+          List.of(new Analysis.Condition(
+                  List.of(VARIABLE),
+                  2,
+                  Optional.of(1),
+                  Optional.of(2),
+                  List.of("e", "f", "h"),
+                  List.of(),
+                  RealPoints.YES)));
 
   @Test
   void aComponentIsReadAsTheTablesWriteIt() {

@@ -39,7 +39,8 @@ final class SampleAnalyses {
 
   static final String SHA = "0123456789abcdef".repeat(4);
 
-  static Spec spec(String family, String title, String notes, List<String> parameters, List<String> generators) {
+  static Spec spec(
+      String family, String title, String notes, List<String> parameters, List<String> generators) {
     Place place = new Place("sample.yaml", 1, 9, family.length());
     return new Spec(
         family,
@@ -95,8 +96,7 @@ final class SampleAnalyses {
             List.of(),
             List.of(List.of(0), List.of(1, 2)),
             Optional.of(
-                new Quotient(
-                    factored(-128, new Factor(a, 2)), factored(1, new Factor(b, 2)))),
+                new Quotient(factored(-128, new Factor(a, 2)), factored(1, new Factor(b, 2)))),
             Optional.of(new Signature(2, 1, 0)));
     Component c =
         new Component(
@@ -115,17 +115,26 @@ final class SampleAnalyses {
                     new MatrixEntry(1, 2, RationalFunction.of(b, a.times(BigInteger.valueOf(4)))))),
             List.of(
                 new Condition(
-                    List.of(a), 2, 1, 2, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
+                    List.of(a), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
     return new Analysis(
         spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
         "0.1.0",
         status,
         status == Status.COMPLETE ? "" : "the time ran out",
         List.of(),
-        status == Status.COMPLETE ? List.of() : List.of("Factors of the determinant: time ran out."),
+        status == Status.COMPLETE
+            ? List.of()
+            : List.of("Factors of the determinant: time ran out."),
         Optional.of(
             new Findings(
-                basis, v.names(), List.of(), List.of(b), List.of(c), List.of(), List.of(), List.of())));
+                basis,
+                v.names(),
+                List.of(),
+                List.of(b),
+                List.of(c),
+                List.of(),
+                List.of(),
+                List.of())));
   }
 
   static Analysis scaled() {
@@ -183,20 +192,77 @@ final class SampleAnalyses {
             killing,
             Optional.empty(),
             List.of(
-                new Condition(List.of(a), 2, 1, 2, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
-                new Condition(List.of(b), 2, 1, 2, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
-                new Condition(List.of(c), 2, 1, 2, List.of(unit(v, 3, 0), unit(v, 3, 1)), RealPoints.UNKNOWN)));
+                new Condition(
+                    List.of(a), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
+                new Condition(
+                    List.of(b), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
+                new Condition(
+                    List.of(c),
+                    2,
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 0), unit(v, 3, 1)),
+                    RealPoints.UNKNOWN)));
     List<Coordinate> origin = point("0", "0", "0");
     List<Stratum> strata =
         List.of(
-            stratum("S1", List.of(), List.of(List.of(a), List.of(b), List.of(c)), 0, 3, 3, "simple", Optional.of("sl(2,C)"), point("1", "1", "1"), List.of()),
-            stratum("S2", List.of(a), List.of(List.of(b), List.of(c)), 1, 1, 2, "solvable", Optional.empty(), point("0", "1", "-3/2"), all.subList(1, 3)),
-            stratum("S3", List.of(a, b), List.of(List.of(c)), 2, 0, 1, "nilpotent", Optional.of("Heisenberg"), point("0", "0", "1"), all),
-            stratum("S4", List.of(a, b, c), List.of(), 3, 0, 0, "abelian", Optional.of("R^3"), origin, all));
+            stratum(
+                "S1",
+                List.of(),
+                List.of(List.of(a), List.of(b), List.of(c)),
+                0,
+                3,
+                3,
+                "simple",
+                Optional.of("sl(2,C)"),
+                point("1", "1", "1"),
+                List.of()),
+            stratum(
+                "S2",
+                List.of(a),
+                List.of(List.of(b), List.of(c)),
+                1,
+                1,
+                2,
+                "solvable",
+                Optional.empty(),
+                point("0", "1", "-3/2"),
+                all.subList(1, 3)),
+            stratum(
+                "S3",
+                List.of(a, b),
+                List.of(List.of(c)),
+                2,
+                0,
+                1,
+                "nilpotent",
+                Optional.of("Heisenberg"),
+                point("0", "0", "1"),
+                all),
+            stratum(
+                "S4",
+                List.of(a, b, c),
+                List.of(),
+                3,
+                0,
+                0,
+                "abelian",
+                Optional.of("R^3"),
+                origin,
+                all));
     List<Region> regions =
         List.of(
-            new Region("S1", "R1", List.of("a > 0", "b*c - 2*a^2 < 0"), new Signature(2, 1, 0), Optional.of("sl(2,R)"), true, point("1", "1", "root(x^2 - 2, 1.41421356)")),
-            new Region("S4", "R1", List.of(), new Signature(0, 0, 3), Optional.empty(), false, origin));
+            new Region(
+                "S1",
+                "R1",
+                List.of("a > 0", "b*c - 2*a^2 < 0"),
+                new Signature(2, 1, 0),
+                Optional.of("sl(2,R)"),
+                true,
+                point("1", "1", "root(x^2 - 2, 1.41421356)")),
+            new Region(
+                "S4", "R1", List.of(), new Signature(0, 0, 3), Optional.empty(), false, origin));
     return new Analysis(
         spec("stretched-rotor", "Rotations, stretched", "", List.of("a", "b", "c"), basis),
         "0.1.0",
@@ -208,12 +274,39 @@ final class SampleAnalyses {
             new Findings(
                 basis,
                 v.names(),
-                List.of(new Relation(a.times(b).minus(c), List.of(a.times(b).minus(c)), Origin.JACOBI)),
+                List.of(
+                    new Relation(a.times(b).minus(c), List.of(a.times(b).minus(c)), Origin.JACOBI)),
                 List.of(),
                 List.of(component),
                 strata,
-                List.of(new Covering("S2", "S1"), new Covering("S3", "S2"), new Covering("S4", "S3")),
+                List.of(
+                    new Covering("S2", "S1"), new Covering("S3", "S2"), new Covering("S4", "S3")),
                 regions)));
+  }
+
+  /** A family that closes on a locus only, which was not decomposed. */
+  static Analysis undecomposed() {
+    Analysis a = stratified();
+    Findings f = a.findings().orElseThrow();
+    Polynomial p = f.components().get(0).conditions().get(0).equations().get(0);
+    Polynomial q = f.components().get(0).conditions().get(1).equations().get(0);
+    return new Analysis(
+        a.spec(),
+        a.version(),
+        Status.INCOMPLETE,
+        "the parameter variety was not decomposed",
+        List.of(),
+        List.of("The components of the parameter variety."),
+        Optional.of(
+            new Findings(
+                f.listed(),
+                f.variables(),
+                List.of(new Relation(p.times(p.minus(q)), List.of(p, p.minus(q)), Origin.CLOSURE)),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of(),
+                List.of())));
   }
 
   private static List<Coordinate> point(String a, String b, String c) {
@@ -232,8 +325,23 @@ final class SampleAnalyses {
       List<Coordinate> witness,
       List<Combination> kernel) {
     return new Stratum(
-        name, equations, exclusions, codimension, 3, rank, derived, 3 - derived, 3 - rank, 3 - rank,
-        kind, type, RealPoints.YES, witness, List.of("X", "Y", "Z"), kernel, List.of());
+        name,
+        equations,
+        exclusions,
+        codimension,
+        3,
+        rank,
+        derived,
+        3 - derived,
+        3 - rank,
+        3 - rank,
+        kind,
+        type,
+        RealPoints.YES,
+        witness,
+        List.of("X", "Y", "Z"),
+        kernel,
+        List.of());
   }
 
   /** A form of order n with dense entries of many terms; not the form of an algebra. */
@@ -241,17 +349,31 @@ final class SampleAnalyses {
     Variables v = new Variables(List.of("a", "beta", "g12", "x_ab", "cos(t)", "sqrt(2)"));
     Polynomial sum = Polynomial.constant(v, 1);
     for (int k = 0; k < v.count(); k++) {
-      sum = sum.plus(Polynomial.variable(v, k).times(BigInteger.valueOf(k % 2 == 0 ? k + 1 : -k - 3)));
+      sum =
+          sum.plus(
+              Polynomial.variable(v, k).times(BigInteger.valueOf(k % 2 == 0 ? k + 1 : -k - 3)));
     }
     Polynomial longOne = sum.pow(3).minus(sum.pow(2));
-    List<String> basis = IntStream.range(0, n).mapToObj(k -> k % 3 == 0 ? "L" + k : k % 3 == 1 ? "J_" + k : "Lambda" + k).toList();
+    List<String> basis =
+        IntStream.range(0, n)
+            .mapToObj(k -> k % 3 == 0 ? "L" + k : k % 3 == 1 ? "J_" + k : "Lambda" + k)
+            .toList();
     List<MatrixEntry> entries = new ArrayList<>();
     List<StructureEntry> structure = new ArrayList<>();
     for (int i = 0; i < n; i++) {
       for (int j = i; j < n; j++) {
         Polynomial x = Polynomial.variable(v, (i + j) % 6);
         if ((i * j) % 3 != 1) {
-          entries.add(new MatrixEntry(i, j, j == i + 1 ? RationalFunction.of(sum, x) : whole(x.pow(2).times(BigInteger.valueOf(i - 7L)).minus(Polynomial.variable(v, 0)))));
+          entries.add(
+              new MatrixEntry(
+                  i,
+                  j,
+                  j == i + 1
+                      ? RationalFunction.of(sum, x)
+                      : whole(
+                          x.pow(2)
+                              .times(BigInteger.valueOf(i - 7L))
+                              .minus(Polynomial.variable(v, 0)))));
         }
         if (i < j && j < i + 3) {
           structure.add(new StructureEntry(i, j, (i + j) % n, RationalFunction.of(x, sum)));
@@ -261,23 +383,69 @@ final class SampleAnalyses {
     }
     Component c =
         new Component(
-            1, List.of(), 4, basis, structure,
+            1,
+            List.of(),
+            4,
+            basis,
+            structure,
             new Killing(
-                entries, n, List.of(), List.of(), 
-                Optional.of(new Quotient(factored(-12345, new Factor(sum, 3), new Factor(longOne, 2)), factored(7, new Factor(Polynomial.variable(v, 1), 4)))),
+                entries,
+                n,
+                List.of(),
+                List.of(),
+                Optional.of(
+                    new Quotient(
+                        factored(-12345, new Factor(sum, 3), new Factor(longOne, 2)),
+                        factored(7, new Factor(Polynomial.variable(v, 1), 4)))),
                 Optional.empty()),
             Optional.of(entries),
             List.of(
-                new Condition(List.of(longOne), 2, n - 1, 1, List.of(new Combination(IntStream.range(0, n).mapToObj(k -> k % 4 == 0 ? Polynomial.variable(v, k % 6).minus(Polynomial.one(v)) : Polynomial.variable(v, k % 6)).toList())), RealPoints.UNKNOWN),
-                new Condition(List.of(sum, Polynomial.variable(v, 4).pow(2).minus(Polynomial.one(v))), 3, n - 3, 3, List.of(unit(v, n, 0), unit(v, n, 4), unit(v, n, 5)), RealPoints.NO)));
+                new Condition(
+                    List.of(longOne),
+                    2,
+                    Optional.of(n - 1),
+                    Optional.of(1),
+                    basis,
+                    List.of(
+                        new Combination(
+                            IntStream.range(0, n)
+                                .mapToObj(
+                                    k ->
+                                        k % 4 == 0
+                                            ? Polynomial.variable(v, k % 6).minus(Polynomial.one(v))
+                                            : Polynomial.variable(v, k % 6))
+                                .toList())),
+                    RealPoints.UNKNOWN),
+                new Condition(
+                    List.of(sum, Polynomial.variable(v, 4).pow(2).minus(Polynomial.one(v))),
+                    3,
+                    Optional.of(n - 3),
+                    Optional.of(3),
+                    basis,
+                    List.of(unit(v, n, 0), unit(v, n, 4), unit(v, n, 5)),
+                    RealPoints.NO)));
     return new Analysis(
-        spec("large", "A dense form of order " + n + " in \u03b1 and \u03b2", "", List.of("a", "beta", "g12", "x_ab"), basis),
+        spec(
+            "large",
+            "A dense form of order " + n + " in \u03b1 and \u03b2",
+            "",
+            List.of("a", "beta", "g12", "x_ab"),
+            basis),
         "0.1.0",
         Status.INCOMPLETE,
         "the time of 5 minutes ran out while factors were sought",
         List.of(),
         List.of("Whether condition 1 has real points: the budget of 5 minutes ran out."),
-        Optional.of(new Findings(basis, v.names(), List.of(), List.of(), List.of(c), List.of(), List.of(), List.of())));
+        Optional.of(
+            new Findings(
+                basis,
+                v.names(),
+                List.of(),
+                List.of(),
+                List.of(c),
+                List.of(),
+                List.of(),
+                List.of())));
   }
 
   /** As many strata as wanted in a lattice of coverings, for the diagram. */
@@ -292,12 +460,27 @@ final class SampleAnalyses {
       int layer = k == 0 ? 0 : 1 + (k - 1) / perLayer;
       strata.add(
           new Stratum(
-              "S" + (k + 1), s.equations(), s.exclusions(), layer, 3, s.rank(), s.derived(), s.centre(), s.radical(), s.nilradical(),
-              s.kind(), s.type(), s.realPoints(), s.witness(), s.basis(), s.kernel(), List.of()));
+              "S" + (k + 1),
+              s.equations(),
+              s.exclusions(),
+              layer,
+              3,
+              s.rank(),
+              s.derived(),
+              s.centre(),
+              s.radical(),
+              s.nilradical(),
+              s.kind(),
+              s.type(),
+              s.realPoints(),
+              s.witness(),
+              s.basis(),
+              s.kernel(),
+              List.of()));
       if (k > 0) {
         int up = layer == 1 ? 0 : k - perLayer;
         coverings.add(new Covering("S" + (k + 1), "S" + (up + 1)));
-        if (layer > 1 && k % 2 == 0 && up + 1 < k) {
+        if (layer > 1 && k % 2 == 0 && (up % perLayer) != 0) {
           coverings.add(new Covering("S" + (k + 1), "S" + (up + 2)));
         }
         if (layer == 3 && k % 5 == 0) {
@@ -306,7 +489,21 @@ final class SampleAnalyses {
       }
     }
     return new Analysis(
-        a.spec(), a.version(), a.status(), a.message(), a.remarks(), a.undecided(),
-        Optional.of(new Findings(f.listed(), f.variables(), f.relations(), f.poles(), f.components(), strata, coverings, f.regions())));
+        a.spec(),
+        a.version(),
+        a.status(),
+        a.message(),
+        a.remarks(),
+        a.undecided(),
+        Optional.of(
+            new Findings(
+                f.listed(),
+                f.variables(),
+                f.relations(),
+                f.poles(),
+                f.components(),
+                strata,
+                coverings,
+                f.regions())));
   }
 }

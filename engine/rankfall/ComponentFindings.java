@@ -1,0 +1,120 @@
+package rankfall;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import rankfall.Analysis.Combination;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
+import rankfall.Analysis.Killing;
+import rankfall.Analysis.MatrixEntry;
+import rankfall.Analysis.Quotient;
+import rankfall.Analysis.StructureEntry;
+import rankfall.exact.Factorization.Factor;
+import rankfall.exact.Polynomial;
+import rankfall.exact.RationalFunction;
+import rankfall.lie.DualForm;
+import rankfall.lie.Family;
+import rankfall.lie.KillingForm;
+import rankfall.locus.ComponentForm;
+import rankfall.locus.FamilyAlgebras;
+import rankfall.locus.Leaf;
+import rankfall.locus.Loci;
+import rankfall.locus.Meter;
+import rankfall.locus.Partition;
+import rankfall.locus.RealPoints;
+import rankfall.locus.Strata;
+import rankfall.spec.Spec;
+
+/** What is known at the general point of each component of a family. */
+record ComponentFindings(Spec spec, Family family, Partition partition, Meter meter) {
+
+  List<Component> all() {
+    List<Component> out = new ArrayList<>();
+    if (partition.strata().isPresent()) {
+      Strata.Result strata = partition.strata().get();
+      for (int k : strata.components()) {
+        Strata.Stratum s = strata.strata().get(k);
+        out.add(component(out.size() + 1, s.leaves().get(0), s.equations()));
+      }
+    }
+    return out;
+  }
+
+  private Component component(int number, Leaf.Defined leaf, List<Polynomial> equations) {
+    ComponentForm c = ComponentForm.of(family, leaf.piece(), seed());
+    Optional<KillingForm.FactoredQuotient> determinant = c.form().determinant();
+    List<Factor> zeros = determinant.map(KillingForm::zeros).orElse(List.of());
+    Loci loci = new Loci(family.ring().constants(), new FamilyAlgebras(family), meter);
+    List<Condition> conditions =
+        loci.in(c.chain(), leaf.profile(), partition.leaves(), zeros).stream()
+            .map(this::condition)
+            .toList();
+    Killing killing =
+        new Killing(
+            entries(c.form().matrix()),
+            leaf.profile().rank(),
+            leaf.algebra().kernel().stream().map(Combination::new).toList(),
+            c.form().blocks(),
+            determinant.map(d -> new Quotient(d.numerator(), d.denominator())),
+            Optional.empty());
+    Optional<List<MatrixEntry>> dual =
+        determinant.isPresent() && c.basis().size() > 0
+            ? DualForm.of(c.chain(), c.form().matrix()).map(d -> entries(d.matrix()))
+            : Optional.empty();
+    return new Component(
+        number,
+        equations,
+        c.chain().dimension(),
+        c.basis(),
+        structure(c),
+        killing,
+        dual,
+        conditions);
+  }
+
+  /** Depends on the text of the spec alone. */
+  private long seed() {
+    return Long.parseUnsignedLong(spec.source().sha256().substring(0, 15), 16);
+  }
+
+  private Condition condition(Loci.Locus l) {
+    return new Condition(
+        l.equations(),
+        l.multiplicity(),
+        l.rank(),
+        l.algebra().map(a -> a.constants().dimension() - l.rank().orElseThrow()),
+        l.algebra().map(a -> a.basis()).orElse(List.of()),
+        l.algebra().map(a -> a.kernel()).orElse(List.of()).stream()
+            .map(Combination::new)
+            .toList(),
+        StratumFindings.verdict(new RealPoints(family).onClosure(l.closure())));
+  }
+
+  private static List<StructureEntry> structure(ComponentForm c) {
+    List<StructureEntry> out = new ArrayList<>();
+    for (int i = 0; i < c.basis().size(); i++) {
+      for (int j = i + 1; j < c.basis().size(); j++) {
+        for (int k : c.targets(i, j)) {
+          RationalFunction f = c.structure(i, j, k);
+          if (!f.isZero()) {
+            out.add(new StructureEntry(i, j, k, f));
+          }
+        }
+      }
+    }
+    return out;
+  }
+
+  private static List<MatrixEntry> entries(List<List<RationalFunction>> matrix) {
+    List<MatrixEntry> out = new ArrayList<>();
+    for (int i = 0; i < matrix.size(); i++) {
+      for (int j = i; j < matrix.size(); j++) {
+        if (!matrix.get(i).get(j).isZero()) {
+          out.add(new MatrixEntry(i, j, matrix.get(i).get(j)));
+        }
+      }
+    }
+    return out;
+  }
+}

@@ -1,0 +1,104 @@
+package rankfall.locus;
+
+import java.util.ArrayList;
+import java.util.List;
+import java.util.Optional;
+import rankfall.exact.Chain;
+import rankfall.exact.ChainFractions;
+import rankfall.exact.Polynomial;
+import rankfall.exact.RationalFunction;
+import rankfall.lie.AdjointTraces;
+import rankfall.lie.Family;
+import rankfall.lie.FamilySite;
+import rankfall.lie.FormCheck;
+import rankfall.lie.KillingForm;
+import rankfall.lie.LieBracket;
+import rankfall.lie.Span;
+import rankfall.lie.StructureConstants;
+
+/**
+ * The algebra and its Killing form at the general point of an irreducible set, with exact values in the
+ * basis of the listed generators; checked before anybody sees it.
+ *
+ * @param chain the set
+ * @param basis names of the basis
+ * @param constants the brackets
+ * @param form the Killing form
+ * @param nonVanishing what was assumed not to vanish
+ */
+public record ComponentForm(
+    Chain chain,
+    List<String> basis,
+    StructureConstants<Polynomial> constants,
+    KillingForm form,
+    List<Polynomial> nonVanishing) {
+
+  /** A self-check found that two ways to the same form differ. */
+  public static final class Mismatch extends IllegalStateException {
+    private static final long serialVersionUID = 1L;
+
+    Mismatch(String what) {
+      super("self-check failed: " + what);
+    }
+  }
+
+  /**
+   * The form at the general point of a piece.
+   *
+   * @param family the family
+   * @param piece the span is closed at its general point
+   * @param seed of the random elements and points of the checks
+   * @throws Mismatch if a self-check fails
+   */
+  public static ComponentForm of(Family family, Piece piece, long seed) {
+    Chain chain = piece.chain();
+    if (!(family.on(chain) instanceof FamilySite.Algebraic at)
+        || !(Span.of(at.input()) instanceof Span.Closed<Polynomial> closed)) {
+      throw new IllegalArgumentException("no algebra at the general point of " + chain.rules());
+    }
+    StructureConstants<Polynomial> constants = closed.constants();
+    List<List<Polynomial>> traces = new AdjointTraces(chain.variables()).of(constants);
+    ComponentForm out =
+        new ComponentForm(
+            chain,
+            closed.names(),
+            constants,
+            KillingForm.of(chain, constants, traces),
+            closed.nonVanishing());
+    out.verify(family, piece, traces, seed);
+    return out;
+  }
+
+  /** The laws of the form on random elements, and the plain recomputation at a random point. */
+  private void verify(Family family, Piece piece, List<List<Polynomial>> traces, long seed) {
+    Optional<FormCheck.Mismatch> law =
+        new FormCheck<>(LieBracket.of(constants), traces).all(seed);
+    if (law.isPresent()) {
+      throw new Mismatch(law.get().law() + " does not hold");
+    }
+    Optional<String> difference =
+        SecondPath.difference(family, piece, basis, form, nonVanishing, seed);
+    if (difference.isPresent()) {
+      throw new Mismatch(difference.get());
+    }
+  }
+
+  /**
+   * A structure constant of the basis.
+   *
+   * @return the coefficient of the k-th element in the bracket of the i-th with the j-th
+   */
+  public RationalFunction structure(int i, int j, int k) {
+    Polynomial c = constants.bracket(i, j).getOrDefault(k, chain.zero());
+    List<Polynomial> s = constants.scale();
+    return ChainFractions.canonical(
+        chain,
+        c.times(s.get(k)),
+        constants.denominator().times(s.get(i)).times(s.get(j)));
+  }
+
+  /** The positions k at which {@link #structure} is not 0. */
+  public List<Integer> targets(int i, int j) {
+    return new ArrayList<>(constants.bracket(i, j).keySet());
+  }
+}
