@@ -28,8 +28,7 @@ final class PointsTest {
   void signaturesOfTheRotorAreThoseOfItsDiagonal(
       String a, String b, int plus, int minus, int zero, boolean compact) throws SpecException {
     PointResult.Facts f = facts(PointSpecs.ROTOR, "a=" + a + " b=" + b);
-    assertEquals(
-        Optional.of(new Analysis.Signature(plus, minus, zero)), f.killing().signature());
+    assertEquals(Optional.of(new Analysis.Signature(plus, minus, zero)), f.killing().signature());
     assertEquals(3 - zero, f.killing().rank());
     assertEquals(compact, f.compact());
     assertEquals(zero == 0, f.semisimple());
@@ -112,8 +111,7 @@ final class PointsTest {
     assertTrue(points.at(PointSpecs.point("c=1 d=1")) instanceof PointResult.Failure);
   }
 
-  private static void assertOutside(String error, String spec, String point)
-      throws SpecException {
+  private static void assertOutside(String error, String spec, String point) throws SpecException {
     PointResult.Failure f = failure(spec, point);
     assertEquals(error, f.error());
     assertFalse(f.open());

@@ -27,8 +27,7 @@ final class PointVerbTest {
   @BeforeEach
   void layOutTwoFamilies() throws IOException {
     spec =
-        Files.writeString(
-                folder.resolve("s.yaml"), PointSpecs.ROTOR + "---\n" + PointSpecs.ANGLE)
+        Files.writeString(folder.resolve("s.yaml"), PointSpecs.ROTOR + "---\n" + PointSpecs.ANGLE)
             .toString();
   }
 

@@ -58,8 +58,7 @@ final class PointFormsTest {
   @Test
   void aRankThatIsNotProvedIsNoNumber() throws SpecException {
     PointResult.Facts f =
-        (PointResult.Facts)
-            PointSpecs.points(PointSpecs.ROTOR).at(PointSpecs.point("a=1 b=1"));
+        (PointResult.Facts) PointSpecs.points(PointSpecs.ROTOR).at(PointSpecs.point("a=1 b=1"));
     PointResult.Facts open =
         new PointResult.Facts(
             f.family(),
@@ -134,8 +133,7 @@ final class PointFormsTest {
   @Test
   void badRowsAreAnsweredInTheirPlace() throws Exception {
     List<String> errors =
-        errors(
-            "\uFEFFb, a\r\n1,0.5\r\n\r\nx,1\r\n1\r\n1,2,3\r\n\"1,1\r\n1e-1,1/0\r\n\"2\",-1\r\n");
+        errors("\uFEFFb, a\r\n1,0.5\r\n\r\nx,1\r\n1\r\n1,2,3\r\n\"1,1\r\n1e-1,1/0\r\n\"2\",-1\r\n");
     assertEquals(
         List.of(
             "",
@@ -163,8 +161,7 @@ final class PointFormsTest {
             return super.read(to, from, length);
           }
         };
-    Iterator<PointResult> rows =
-        PointTable.answers(PointSpecs.points(PointSpecs.ROTOR), broken);
+    Iterator<PointResult> rows = PointTable.answers(PointSpecs.points(PointSpecs.ROTOR), broken);
     assertThrows(UncheckedIOException.class, rows::next);
   }
 
