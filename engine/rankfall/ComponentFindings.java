@@ -27,7 +27,8 @@ import rankfall.locus.Strata;
 import rankfall.spec.Spec;
 
 /** What is known at the general point of each component of a family. */
-record ComponentFindings(Spec spec, Family family, Partition partition, Meter meter) {
+record ComponentFindings(
+    Spec spec, Family family, Partition partition, List<Component> known, Meter meter) {
 
   List<Component> all() {
     List<Component> out = new ArrayList<>();
@@ -37,19 +38,29 @@ record ComponentFindings(Spec spec, Family family, Partition partition, Meter me
         Strata.Stratum s = strata.strata().get(k);
         out.add(component(out.size() + 1, s.leaves().get(0), s.equations()));
       }
+    } else {
+      for (Leaf leaf : partition.leaves()) {
+        if (leaf instanceof Leaf.Defined d
+            && d.piece().chain().equals(family.ring().constants())) {
+          out.add(component(1, d, List.of()));
+        }
+      }
     }
     return out;
   }
 
   private Component component(int number, Leaf.Defined leaf, List<Polynomial> equations) {
+    for (Component k : known) {
+      if (k.equations().equals(equations)) {
+        List<Factor> zeros =
+            k.killing().determinant().map(d -> d.numerator().factors()).orElse(List.of());
+        return withConditions(k, number, conditions(leaf, zeros));
+      }
+    }
     ComponentForm c = ComponentForm.of(family, leaf.piece(), seed());
     Optional<KillingForm.FactoredQuotient> determinant = c.form().determinant();
     List<Factor> zeros = determinant.map(KillingForm::zeros).orElse(List.of());
-    Loci loci = new Loci(family.ring().constants(), new FamilyAlgebras(family), meter);
-    List<Condition> conditions =
-        loci.in(c.chain(), leaf.profile(), partition.leaves(), zeros).stream()
-            .map(this::condition)
-            .toList();
+    List<Condition> conditions = conditions(leaf, zeros);
     Killing killing =
         new Killing(
             entries(c.form().matrix()),
@@ -70,6 +81,26 @@ record ComponentFindings(Spec spec, Family family, Partition partition, Meter me
         structure(c),
         killing,
         dual,
+        conditions);
+  }
+
+  private List<Condition> conditions(Leaf.Defined leaf, List<Factor> zeros) {
+    return new Loci(family.ring().constants(), new FamilyAlgebras(family), meter)
+        .in(leaf.piece().chain(), leaf.profile(), partition.leaves(), zeros).stream()
+            .map(this::condition)
+            .toList();
+  }
+
+  /** A component that is known, its conditions told anew from all leaves. */
+  private static Component withConditions(Component c, int number, List<Condition> conditions) {
+    return new Component(
+        number,
+        c.equations(),
+        c.parameterDimension(),
+        c.basis(),
+        c.structure(),
+        c.killing(),
+        c.dual(),
         conditions);
   }
 

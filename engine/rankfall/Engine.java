@@ -1,27 +1,32 @@
 package rankfall;
 
-import java.util.ArrayList;
-import java.util.List;
-import java.util.Optional;
-import rankfall.Analysis.Findings;
-import rankfall.Analysis.Origin;
-import rankfall.Analysis.Relation;
-import rankfall.exact.ChainFactoring;
-import rankfall.exact.Polynomial;
+import java.time.Duration;
+import java.util.concurrent.ExecutionException;
+import java.util.concurrent.FutureTask;
+import java.util.concurrent.TimeUnit;
+import java.util.concurrent.TimeoutException;
+import java.util.concurrent.atomic.AtomicReference;
+import rankfall.lie.AdjointTraces;
 import rankfall.lie.Family;
-import rankfall.lie.FamilyRelation;
 import rankfall.locus.Meter;
-import rankfall.locus.Partition;
 import rankfall.spec.Spec;
 import rankfall.spec.SpecException;
 
 /**
  * The front door of the library: a spec in, an analysis out.
  *
- * <p>One call uses one thread; calls may run side by side.
+ * <p>Calls may run side by side. Each works on a thread of its own, which is left behind where a
+ * computation that cannot be interrupted does not end in time.
  */
 public final class Engine {
+  private static final Duration GRACE = Duration.ofSeconds(2);
+
   private Engine() {}
+
+  /** Loads what the first analysis needs, so that it may happen while specs are read. */
+  public static void warmUp() {
+    AdjointTraces.warmUp();
+  }
 
   /**
    * Analyses a family.
@@ -34,7 +39,29 @@ public final class Engine {
   public static Analysis analyse(Spec spec, Budget budget) throws SpecException {
     Family family = Family.of(spec);
     Meter meter = new Meter(budget.time(), budget.branches());
-    Partition partition = Partition.of(family, meter);
-    return new FamilyFindings(spec, family, partition, meter).analysis();
+    AtomicReference<Analysis> latest =
+        new AtomicReference<>(FamilyFindings.nothingYet(spec, family));
+    FutureTask<Analysis> task =
+        new FutureTask<>(() -> FamilyFindings.of(spec, family, meter, latest::set));
+    Thread thread = new Thread(task, "analysis");
+    thread.setDaemon(true);
+    thread.start();
+    try {
+      return task.get(budget.time().plus(GRACE).toMillis(), TimeUnit.MILLISECONDS);
+    } catch (TimeoutException e) {
+      return latest.get();
+    } catch (InterruptedException e) {
+      Thread.currentThread().interrupt();
+      return latest.get();
+    } catch (ExecutionException e) {
+      throw unchecked(e.getCause());
+    }
+  }
+
+  private static RuntimeException unchecked(Throwable cause) {
+    if (cause instanceof Error error) {
+      throw error;
+    }
+    return cause instanceof RuntimeException r ? r : new IllegalStateException(cause);
   }
 }

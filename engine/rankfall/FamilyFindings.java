@@ -1,8 +1,10 @@
 package rankfall;
 
+import java.time.Duration;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Consumer;
 import java.util.stream.Collectors;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Covering;
@@ -24,13 +26,54 @@ import rankfall.spec.Spec;
 /** Gathers what the rooms found of one family. */
 record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter) {
 
-  Analysis analysis() {
-    if (partition.strata().map(s -> s.strata().isEmpty()).orElse(false)) {
-      return failed(nothingLeft());
+  /**
+   * Analyses a family step by step.
+   *
+   * @param published takes what is known after a step, for the case that the next one does not end
+   */
+  static Analysis of(Spec spec, Family family, Meter meter, Consumer<Analysis> published) {
+    FamilyFindings start = new FamilyFindings(spec, family, Partition.notYet(family), meter);
+    List<Component> general = start.components(List.of());
+    published.accept(start.analysis(general));
+    FamilyFindings done =
+        new FamilyFindings(spec, family, Partition.of(family, meter), meter);
+    if (done.partition.strata().isEmpty()) {
+      return done.analysis(general);
     }
+    if (done.partition.strata().get().strata().isEmpty()) {
+      return done.failed(done.nothingLeft());
+    }
+    return done.analysis(done.components(general));
+  }
+
+  /** What is known before anything was computed. */
+  static Analysis nothingYet(Spec spec, Family family) {
+    Partition partition = Partition.unknown(family);
+    return new FamilyFindings(spec, family, partition, new Meter(Duration.ZERO, 1))
+        .analysis(List.of());
+  }
+
+  private List<Component> components(List<Component> known) {
+    try {
+      return new ComponentFindings(spec, family, partition, known, meter).all();
+    } catch (Meter.Exhausted e) {
+      return List.of();
+    }
+  }
+
+  private Analysis analysis(List<Component> components) {
     List<String> undecided = new ArrayList<>(openPieces());
-    List<Component> components = new ComponentFindings(spec, family, partition, meter).all();
-    Optional<Strata.Result> strata = partition.strata();
+    List<Analysis.Stratum> strata = List.of();
+    if (partition.strata().isPresent()) {
+      if (components.isEmpty()) {
+        undecided.add("not decided (out of budget): the components and their conditions");
+      }
+      try {
+        strata = new StratumFindings(family, partition.strata().get(), meter).all();
+      } catch (Meter.Exhausted e) {
+        undecided.add("not decided (" + e.getMessage() + "): the strata");
+      }
+    }
     Findings findings =
         new Findings(
             family.names(),
@@ -38,8 +81,10 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             relations(),
             family.poles(),
             components,
-            strata.map(s -> new StratumFindings(family, s, meter).all()).orElse(List.of()),
-            strata.map(FamilyFindings::coverings).orElse(List.of()),
+            strata,
+            strata.isEmpty()
+                ? List.of()
+                : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
             List.of());
     return new Analysis(
         spec,

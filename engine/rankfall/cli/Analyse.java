@@ -52,6 +52,12 @@ final class Analyse implements Callable<Integer> {
       description = "Time for each family, such as 60s, 5m, 1h (default: ${DEFAULT-VALUE}).")
   private Duration time;
 
+  @Option(
+      names = "--max-branches",
+      paramLabel = "N",
+      description = "How many cases of each family are looked at (default: ${DEFAULT-VALUE}).")
+  private int branches = Budget.DEFAULT.branches();
+
   @Mixin private CommonOptions common;
 
   @picocli.CommandLine.Spec private CommandSpec self;
@@ -65,9 +71,13 @@ final class Analyse implements Callable<Integer> {
     if (threads < 1) {
       throw wrongCall("--threads wants a number from 1");
     }
+    if (branches < 1) {
+      throw wrongCall("--max-branches wants a number from 1");
+    }
     if (Files.exists(out) && !Files.isDirectory(out)) {
       throw wrongCall("--out wants a folder, and '" + out + "' is a file");
     }
+    doors.warmUp();
     Messages messages = new Messages(self.commandLine().getErr());
     List<SpecResult> documents =
         FamilyNames.distinct(SpecDocuments.of(doors, specs, self.commandLine()));
@@ -79,7 +89,7 @@ final class Analyse implements Callable<Integer> {
   }
 
   private Analysis one(Spec spec) throws Exception {
-    Analysis analysis = doors.analyse(spec, new Budget(time, Budget.DEFAULT.branches()));
+    Analysis analysis = doors.analyse(spec, new Budget(time, branches));
     doors.writeFamily(out, analysis);
     return analysis;
   }

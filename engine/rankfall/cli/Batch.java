@@ -11,6 +11,7 @@ import java.util.function.Consumer;
 import rankfall.Analysis;
 import rankfall.Version;
 import rankfall.spec.Spec;
+import rankfall.spec.SpecException;
 import rankfall.spec.SpecResult;
 
 /** Families side by side, each on one thread; what goes wrong in one never reaches another. */
@@ -66,6 +67,9 @@ final class Batch {
     if (document instanceof SpecResult.Read read) {
       try {
         return new Outcome.Analysed(work.on(read.spec()));
+      } catch (SpecException e) {
+        return new Outcome.Refused(
+            new SpecResult.Faulty(Optional.of(read.spec().family()), e.diagnostics()));
       } finally {
         done.accept(read.spec().family());
       }

@@ -23,6 +23,9 @@ interface FrontDoors {
   /** The JSON schema of the spec format, ending with a line feed. */
   String schema();
 
+  /** Starts to load what an analysis needs, without waiting for it. */
+  void warmUp();
+
   /** Analyses one family; called on several threads at once. */
   Analysis analyse(Spec spec, Budget budget) throws SpecException;
 

@@ -3,11 +3,13 @@ package rankfall.cli;
 import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
+import java.time.Duration;
 import java.util.List;
 import rankfall.Analysis;
 import rankfall.Budget;
 import rankfall.Engine;
 import rankfall.Points;
+import rankfall.StratumLookup;
 import rankfall.report.PointCsv;
 import rankfall.report.PointJson;
 import rankfall.report.PointText;
@@ -23,6 +25,10 @@ import rankfall.spec.SpecSchema;
 
 /** The rooms of the program itself behind the verbs. */
 final class Program implements FrontDoors {
+  /** What may be spent to learn the names of strata before points are answered. */
+  private static final Budget FOR_NAMES =
+      new Budget(Duration.ofSeconds(30), Budget.DEFAULT.branches());
+
   @Override
   public List<SpecResult> read(Path file) throws IOException {
     return SpecReader.read(file.toString(), Files.readAllBytes(file));
@@ -31,6 +37,13 @@ final class Program implements FrontDoors {
   @Override
   public String schema() {
     return SpecSchema.text();
+  }
+
+  @Override
+  public void warmUp() {
+    Thread thread = new Thread(Engine::warmUp, "warm-up");
+    thread.setDaemon(true);
+    thread.start();
   }
 
   @Override
@@ -50,7 +63,7 @@ final class Program implements FrontDoors {
 
   @Override
   public PointAnswers points(Spec spec, PointForm form) throws SpecException {
-    Points points = Points.of(spec);
+    Points points = Points.of(spec, StratumLookup.of(spec, Engine.analyse(spec, FOR_NAMES)));
     return new ProgramPoints(points, writer(points, form));
   }
 

@@ -98,6 +98,20 @@ public final class Exploration {
     cut.forEach(open::push);
   }
 
+  /** The leaf of the general point of a piece; what it assumes not to vanish is not cut off. */
+  static Leaf.Defined general(Piece piece, BranchAlgebra algebra) {
+    KnownNonZero domain = KnownNonZero.on(piece);
+    int n = algebra.constants().dimension();
+    return new Leaf.Defined(
+        piece,
+        new Profile(
+            n,
+            algebra.killingRank(domain).rank(),
+            algebra.derivedRank(domain).rank(),
+            n - algebra.centreRank(domain).rank()),
+        algebra);
+  }
+
   private Leaf profiled(Piece piece, BranchAlgebra algebra, List<Task> cut) {
     KnownNonZero domain = KnownNonZero.on(piece);
     Echelon<Polynomial> derived = algebra.derivedRank(domain);

@@ -35,6 +35,32 @@ public record Partition(
     undecided = List.copyOf(undecided);
   }
 
+  /** A family of which nothing is known yet. */
+  public static Partition unknown(Family family) {
+    Piece all = new Piece(family.ring().constants(), List.of());
+    return new Partition(List.of(), List.of(), Optional.empty(), List.of(all), "out of budget");
+  }
+
+  /**
+   * A family of which only the general point of the whole space was looked at.
+   *
+   * @param family the family
+   * @return no leaf, unless every choice of parameters is a point; then that of the general point
+   */
+  public static Partition notYet(Family family) {
+    Chain constants = family.ring().constants();
+    Piece all = new Piece(constants, List.of());
+    List<Polynomial> conditions = generalConditions(family);
+    List<Leaf> leaves = new ArrayList<>();
+    if (conditions.isEmpty()
+        && family.relations().isEmpty()
+        && new FamilyAlgebras(family).on(all) instanceof Algebras.Closed closed) {
+      leaves.add(Exploration.general(all, closed.algebra()));
+    }
+    return new Partition(
+        conditions, leaves, Optional.empty(), List.of(all), "out of budget");
+  }
+
   /**
    * Cuts up the points of a family.
    *

@@ -23,6 +23,7 @@ final class RecordingDoors implements FrontDoors {
   final List<String> written = Collections.synchronizedList(new ArrayList<>());
   Analysis.Status status = Analysis.Status.COMPLETE;
   boolean broken;
+  boolean warm;
 
   @Override
   public List<SpecResult> read(Path file) {
@@ -32,6 +33,11 @@ final class RecordingDoors implements FrontDoors {
   @Override
   public String schema() {
     return "{}\n";
+  }
+
+  @Override
+  public void warmUp() {
+    warm = true;
   }
 
   @Override
