@@ -9,6 +9,7 @@ import rankfall.Analysis.Condition;
 import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
+import rankfall.Analysis.Signature;
 import rankfall.Analysis.StructureEntry;
 import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
@@ -54,7 +55,8 @@ record ComponentFindings(
       if (k.equations().equals(equations)) {
         List<Factor> zeros =
             k.killing().determinant().map(d -> d.numerator().factors()).orElse(List.of());
-        return withConditions(k, number, conditions(leaf, zeros));
+        List<Condition> conditions = conditions(leaf, zeros);
+        return withConditions(k, number, conditions, signature(leaf, conditions));
       }
     }
     ComponentForm c = ComponentForm.of(family, leaf.piece(), seed());
@@ -68,7 +70,7 @@ record ComponentFindings(
             leaf.algebra().kernel().stream().map(Combination::new).toList(),
             c.form().blocks(),
             determinant.map(d -> new Quotient(d.numerator(), d.denominator())),
-            Optional.empty());
+            signature(leaf, conditions));
     Optional<List<MatrixEntry>> dual =
         determinant.isPresent() && c.basis().size() > 0
             ? DualForm.of(c.chain(), c.form().matrix()).map(d -> entries(d.matrix()))
@@ -92,16 +94,25 @@ record ComponentFindings(
   }
 
   /** A component that is known, its conditions told anew from all leaves. */
-  private static Component withConditions(Component c, int number, List<Condition> conditions) {
+  private static Component withConditions(
+      Component c, int number, List<Condition> conditions, Optional<Signature> signature) {
+    Killing k = c.killing();
     return new Component(
         number,
         c.equations(),
         c.parameterDimension(),
         c.basis(),
         c.structure(),
-        c.killing(),
+        new Killing(k.entries(), k.rank(), k.kernel(), k.blocks(), k.determinant(), signature),
         c.dual(),
         conditions);
+  }
+
+  /** Only a complete exploration tells that nothing cuts the space. */
+  private Optional<Signature> signature(Leaf.Defined leaf, List<Condition> conditions) {
+    return partition.strata().isEmpty()
+        ? Optional.empty()
+        : new GeneralSignature(family, leaf.profile(), partition.leaves()).of(conditions);
   }
 
   /** Depends on the text of the spec alone. */

@@ -33,6 +33,11 @@ public final class RealPoints {
         .orElseGet(() -> ask(closures.ideal(chain), List.of()));
   }
 
+  /** Whether a polynomial has a real zero within the domain. */
+  public RealZeros.Answer onZeros(Polynomial p) {
+    return ask(List.of(p), List.of());
+  }
+
   /** Whether a stratum has a real point within the domain: one of its leaves has. */
   public RealZeros.Answer on(Strata.Stratum stratum) {
     boolean unknown = false;
@@ -64,7 +69,8 @@ public final class RealPoints {
     List<RealZeros.Condition> conditions = new ArrayList<>();
     nonZero.forEach(
         p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));
-    family.poles()
+    family.poles().stream()
+        .filter(p -> !equations.contains(p))
         .forEach(p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));
     family.domain().forEach(c -> conditions.add(condition(c)));
     conditions.addAll(rootsOfConstants());
