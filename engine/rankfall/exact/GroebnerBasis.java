@@ -47,6 +47,21 @@ public final class GroebnerBasis {
 
   private Ideal<Monomial<BigInteger>, MultivariatePolynomial<BigInteger>> ideal(
       List<Polynomial> generators) {
+    return ideal(generators, order);
+  }
+
+  /** For all but bases: the library's quotients and intersections are wrong in a block order. */
+  private Ideal<Monomial<BigInteger>, MultivariatePolynomial<BigInteger>> graded(
+      List<Polynomial> generators) {
+    return ideal(generators, MonomialOrder.GREVLEX);
+  }
+
+  private static MultivariatePolynomial<BigInteger> graded(Polynomial p) {
+    return p.copy().setOrdering(MonomialOrder.GREVLEX);
+  }
+
+  private Ideal<Monomial<BigInteger>, MultivariatePolynomial<BigInteger>> ideal(
+      List<Polynomial> generators, Comparator<DegreeVector> order) {
     List<MultivariatePolynomial<BigInteger>> g = new ArrayList<>();
     for (Polynomial p : generators) {
       if (!p.isZero()) {
@@ -58,6 +73,19 @@ public final class GroebnerBasis {
       return Ideal.empty(Polynomial.zero(variables).copy().setOrdering(order));
     }
     return Ideal.create(g, order);
+  }
+
+  private List<Polynomial> ordered(
+      Ideal<Monomial<BigInteger>, MultivariatePolynomial<BigInteger>> ideal) {
+    return numbers.isEmpty()
+        ? basis(ideal)
+        : reduced(
+            ideal.getGroebnerBasis().stream()
+                .map(
+                    p ->
+                        new Polynomial(
+                            variables, p.clone().setOrdering(MonomialOrder.GRLEX)))
+                .toList());
   }
 
   private List<Polynomial> basis(
@@ -95,19 +123,19 @@ public final class GroebnerBasis {
    * @param factors whose product is saturated by
    */
   public List<Polynomial> saturated(List<Polynomial> generators, List<Polynomial> factors) {
-    var ideal = ideal(generators);
+    var ideal = graded(generators);
     boolean changed = true;
     while (changed) {
       changed = false;
       for (Polynomial f : factors) {
-        var next = ideal.quotient(f.copy().setOrdering(order));
+        var next = ideal.quotient(graded(f));
         if (!ideal.contains(next)) {
           ideal = next;
           changed = true;
         }
       }
     }
-    return basis(ideal);
+    return ordered(ideal);
   }
 
   /**
@@ -128,13 +156,23 @@ public final class GroebnerBasis {
                 .toList());
   }
 
+  /**
+   * Whether a polynomial lies in the ideal over the rationals.
+   *
+   * @param generators of the ideal
+   * @param p any
+   */
+  public boolean contains(List<Polynomial> generators, Polynomial p) {
+    return p.isZero() || graded(generators).contains(graded(p));
+  }
+
   /** Whether a power of a polynomial lies in the ideal. */
   public boolean radicalContains(List<Polynomial> generators, Polynomial p) {
-    return ideal(generators).radicalContains(p.copy().setOrdering(order));
+    return graded(generators).radicalContains(graded(p));
   }
 
   /** The intersection of two ideals. */
   public List<Polynomial> intersection(List<Polynomial> a, List<Polynomial> b) {
-    return basis(ideal(a).intersection(ideal(b)));
+    return ordered(graded(a).intersection(graded(b)));
   }
 }
