@@ -50,12 +50,8 @@ record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
       require(isPrime(c.chain()), "is not irreducible", c);
       require(c.equations().stream().allMatch(c.chain()::vanishes), "has a wrong basis", c);
       require(
-          c.chain().rules().stream().allMatch(r -> bases.contains(c.equations(), r.equation())),
-          "has too small an ideal",
-          c);
-      require(
-          equations.stream().allMatch(p -> bases.contains(c.equations(), p)),
-          "holds points that are no zeros",
+          bases.outside(c.equations(), together(c.chain(), equations)).isEmpty(),
+          "has too small an ideal, or holds points that are no zeros",
           c);
       require(nonZero.stream().noneMatch(c.chain()::vanishes), "is excluded", c);
       for (Component d : components) {
@@ -66,6 +62,12 @@ record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
       }
     }
     return covering(equations, nonZero, components);
+  }
+
+  private static List<Polynomial> together(Chain chain, List<Polynomial> equations) {
+    List<Polynomial> out = new ArrayList<>(equations);
+    chain.rules().forEach(r -> out.add(r.equation()));
+    return out;
   }
 
   private static void require(boolean holds, String fault, Component c) {
@@ -138,6 +140,8 @@ record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
               ? c.equations()
               : bases.intersection(shared, c.equations());
     }
-    return shared.stream().allMatch(p -> bases.radicalContains(equations, p.times(off)));
+    List<Polynomial> products = shared.stream().map(off::times).toList();
+    return bases.outside(equations, products).stream()
+        .allMatch(p -> bases.radicalContains(equations, p));
   }
 }
