@@ -16,6 +16,7 @@ import rankfall.exact.ChainFactoring;
 import rankfall.exact.Polynomial;
 import rankfall.lie.Family;
 import rankfall.lie.FamilyRelation;
+import rankfall.locus.Decomposition;
 import rankfall.locus.Leaf;
 import rankfall.locus.Meter;
 import rankfall.locus.Partition;
@@ -180,6 +181,18 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     } else if (open) {
       out.add("There are points at which the span is not closed; they belong to no stratum.");
     }
+    partition
+        .variety()
+        .map(Decomposition::certificate)
+        .filter(c -> c instanceof Decomposition.NotCertified)
+        .map(c -> ((Decomposition.NotCertified) c).reason())
+        .ifPresent(
+            reason ->
+                out.add(
+                    "That the components cover all zeros of the relations was not checked a second"
+                        + " time: "
+                        + reason
+                        + "."));
     List<String> names =
         partition.leaves().stream()
             .filter(l -> l instanceof Leaf.Defined)

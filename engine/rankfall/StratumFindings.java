@@ -8,12 +8,14 @@ import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis.Combination;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Stratum;
-import rankfall.exact.AlgebraicNumber;
+import rankfall.exact.ComplexNumber;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RealZeros;
 import rankfall.lie.Family;
+import rankfall.locus.ComplexPoint;
 import rankfall.locus.IdealDimensions;
 import rankfall.locus.IdealDimensions.Dimensions;
+import rankfall.locus.Leaf;
 import rankfall.locus.Meter;
 import rankfall.locus.Profile;
 import rankfall.locus.RealPoints;
@@ -35,6 +37,7 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
     IdealDimensions ideals =
         IdealDimensions.of(s, family.ring().constants(), meter);
     RealZeros.Answer real = new RealPoints(family).on(s);
+    Witness witness = witness(s, real);
     int parameters = family.ring().variables().indeterminates();
     return new Stratum(
         name,
@@ -49,8 +52,8 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
         ideals.general().nilradical(),
         kind(p, ideals.general()),
         Optional.empty(),
-        verdict(real),
-        witness(real.point()),
+        witness.isReal() ? Analysis.RealPoints.YES : verdict(real),
+        witness.coordinates(),
         s.leaves().get(0).algebra().basis(),
         s.leaves().get(0).algebra().kernel().stream().map(Combination::new).toList(),
         remarks(p, ideals));
@@ -99,7 +102,36 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
         .toList();
   }
 
-  private List<Coordinate> witness(List<AlgebraicNumber> point) {
+  /**
+   * A point of a stratum.
+   *
+   * @param isReal whether it is a real point within the domain
+   */
+  private record Witness(List<Coordinate> coordinates, boolean isReal) {}
+
+  /** The real point that was found; else a real one of higher degree; else a complex one. */
+  private Witness witness(Strata.Stratum s, RealZeros.Answer real) {
+    if (!real.point().isEmpty()) {
+      return new Witness(coordinates(real.point()), true);
+    }
+    if (real.verdict() != RealZeros.Verdict.NO) {
+      for (Leaf.Defined leaf : s.leaves()) {
+        Optional<List<ComplexNumber>> point = ComplexPoint.realOn(family, leaf.piece());
+        if (point.isPresent()) {
+          return new Witness(coordinates(point.get()), true);
+        }
+      }
+    }
+    for (Leaf.Defined leaf : s.leaves()) {
+      Optional<List<ComplexNumber>> point = ComplexPoint.on(family, leaf.piece());
+      if (point.isPresent()) {
+        return new Witness(coordinates(point.get()), false);
+      }
+    }
+    return new Witness(List.of(), false);
+  }
+
+  private List<Coordinate> coordinates(List<?> point) {
     List<Coordinate> out = new ArrayList<>();
     int parameters = family.ring().variables().indeterminates();
     for (int v = 0; v < Math.min(parameters, point.size()); v++) {

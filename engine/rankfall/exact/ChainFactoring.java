@@ -193,9 +193,10 @@ public final class ChainFactoring {
     Polynomial n = f;
     for (int k = tower.size() - 1; k >= 0; k--) {
       Chain.Rule r = tower.get(k);
-      if (n.contains(r.variable())) {
-        n = chain.reduced(r.equation().resultant(n, r.variable())).primitive();
-      }
+      n =
+          n.contains(r.variable())
+              ? chain.reduced(r.equation().resultant(n, r.variable())).primitive()
+              : n.pow(r.degree());
     }
     return n.contains(x) ? n : chain.one();
   }

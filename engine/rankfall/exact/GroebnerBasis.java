@@ -1,10 +1,13 @@
 package rankfall.exact;
 
+import cc.redberry.rings.Rational;
+import cc.redberry.rings.Rings;
 import cc.redberry.rings.bigint.BigInteger;
 import cc.redberry.rings.poly.multivar.DegreeVector;
-import cc.redberry.rings.poly.multivar.Ideal;
+import cc.redberry.rings.poly.multivar.GroebnerBases;
 import cc.redberry.rings.poly.multivar.Monomial;
 import cc.redberry.rings.poly.multivar.MonomialOrder;
+import cc.redberry.rings.poly.multivar.MultivariateDivision;
 import cc.redberry.rings.poly.multivar.MultivariatePolynomial;
 import java.util.ArrayList;
 import java.util.Comparator;
@@ -15,6 +18,11 @@ import java.util.Set;
 /**
  * Reduced Groebner bases over the rationals, in graded reverse lexicographic order; algebraic numbers
  * of the ring stand in a block below the other variables, so that a basis never solves for them.
+ *
+ * <p>Saturations and intersections are eliminations of one more variable (Cox, Little, O'Shea, Ideals,
+ * Varieties, and Algorithms, ch. 4). The library's own quotients are wrong in a block order, and its
+ * modular bases spend a tenth of a second looking for primes; so its plain Buchberger algorithm runs
+ * over the rationals.
  */
 public final class GroebnerBasis {
   private final Variables variables;
@@ -29,51 +37,96 @@ public final class GroebnerBasis {
   public GroebnerBasis(Chain constants) {
     this.variables = constants.variables();
     this.numbers = ChainFactoring.numbers(constants);
-    this.order = order(variables, numbers.size());
+    this.order = order(variables.count(), numbers.size());
     int first = variables.count() - numbers.size();
     if (numbers.stream().anyMatch(r -> r.variable() < first)) {
       throw new IllegalArgumentException("algebraic numbers come last in " + variables.names());
     }
   }
 
-  private static Comparator<DegreeVector> order(Variables variables, int numbers) {
-    int others = variables.count() - numbers;
-    if (numbers == 0 || others == 0) {
-      return MonomialOrder.GREVLEX;
-    }
-    return MonomialOrder.product(
-        MonomialOrder.GREVLEX, others, MonomialOrder.GREVLEX, numbers);
+  /** One more variable first, above all others. */
+  private static Comparator<DegreeVector> order(int variables, int numbers) {
+    int all = Math.max(1, variables);
+    return MonomialOrder.product(MonomialOrder.GREVLEX, 1, blocks(all - numbers, numbers), all);
   }
 
-  private Ideal<Monomial<BigInteger>, MultivariatePolynomial<BigInteger>> ideal(
-      List<Polynomial> generators) {
-    List<MultivariatePolynomial<BigInteger>> g = new ArrayList<>();
-    for (Polynomial p : generators) {
-      if (!p.isZero()) {
-        g.add(p.copy().setOrdering(order));
+  private static Comparator<DegreeVector> blocks(int others, int numbers) {
+    return numbers == 0 || others == 0
+        ? MonomialOrder.GREVLEX
+        : MonomialOrder.product(MonomialOrder.GREVLEX, others, MonomialOrder.GREVLEX, numbers);
+  }
+
+  /** A polynomial in the ring with one more variable, times a power of that variable. */
+  private MultivariatePolynomial<Rational<BigInteger>> lifted(Polynomial p, int power) {
+    int n = Math.max(1, variables.count());
+    var out = MultivariatePolynomial.zero(n + 1, Rings.Q, order);
+    for (Term t : p.terms()) {
+      int[] e = new int[n + 1];
+      e[0] = power;
+      for (int k = 0; k < t.exponents().size(); k++) {
+        e[k + 1] = t.exponents().get(k);
       }
+      out.add(
+          new Monomial<>(e, new Rational<>(Rings.Z, Polynomial.ring(t.coefficient()))));
     }
-    numbers.forEach(r -> g.add(r.equation().copy().setOrdering(order)));
-    if (g.isEmpty()) {
-      return Ideal.empty(Polynomial.zero(variables).copy().setOrdering(order));
-    }
-    return Ideal.create(g, order);
+    return out;
   }
 
-  private List<Polynomial> basis(
-      Ideal<Monomial<BigInteger>, MultivariatePolynomial<BigInteger>> ideal) {
+  /** What does not hold the additional variable, brought back. */
+  private Polynomial lowered(MultivariatePolynomial<Rational<BigInteger>> p) {
+    BigInteger denominator = BigInteger.ONE;
+    for (var m : p) {
+      BigInteger d = m.coefficient.denominator();
+      denominator = denominator.divideExact(denominator.gcd(d)).multiply(d);
+    }
+    List<Term> out = new ArrayList<>();
+    for (var m : p) {
+      List<Integer> e = new ArrayList<>();
+      for (int k = 0; k < variables.count(); k++) {
+        e.add(m.exponents[k + 1]);
+      }
+      BigInteger c =
+          m.coefficient
+              .numerator()
+              .multiply(denominator.divideExact(m.coefficient.denominator()));
+      out.add(new Term(Polynomial.java(c), e));
+    }
+    return Polynomial.of(variables, out).primitive();
+  }
+
+  private List<MultivariatePolynomial<Rational<BigInteger>>> lifted(List<Polynomial> generators) {
+    List<MultivariatePolynomial<Rational<BigInteger>>> out = new ArrayList<>();
+    generators.stream().filter(p -> !p.isZero()).forEach(p -> out.add(lifted(p, 0)));
+    numbers.forEach(r -> out.add(lifted(r.equation(), 0)));
+    return out;
+  }
+
+  private List<MultivariatePolynomial<Rational<BigInteger>>> basis(
+      List<MultivariatePolynomial<Rational<BigInteger>>> generators) {
+    return generators.isEmpty() ? List.of() : GroebnerBases.BuchbergerGB(generators, order);
+  }
+
+  /** The members of a basis that are free of the additional variable. */
+  private List<Polynomial> eliminated(
+      List<MultivariatePolynomial<Rational<BigInteger>>> generators) {
     Set<Integer> own = new HashSet<>(numbers.stream().map(Chain.Rule::variable).toList());
     List<Polynomial> out = new ArrayList<>();
-    for (var p : ideal.getGroebnerBasis()) {
-      Polynomial q =
-          new Polynomial(variables, p.clone().setOrdering(MonomialOrder.GRLEX)).primitive();
-      if (q.isConstant() ? !q.isZero() : !own.containsAll(q.support())) {
-        out.add(q);
+    for (var p : basis(generators)) {
+      if (!p.isZero() && p.degree(0) == 0) {
+        Polynomial q = lowered(p);
+        if (q.isConstant() || !own.containsAll(q.support())) {
+          out.add(q);
+        }
       }
     }
     out.sort(
         Comparator.comparing(Polynomial::totalDegree).thenComparing(Polynomial::toString));
     return out;
+  }
+
+  /** {@code 1 - t*p} for the additional variable t. */
+  private MultivariatePolynomial<Rational<BigInteger>> inverse(Polynomial p) {
+    return lifted(Polynomial.one(variables), 0).subtract(lifted(p, 1));
   }
 
   /**
@@ -84,7 +137,7 @@ public final class GroebnerBasis {
    *     algebraic numbers alone are left out
    */
   public List<Polynomial> reduced(List<Polynomial> generators) {
-    return basis(ideal(generators));
+    return eliminated(lifted(generators));
   }
 
   /**
@@ -95,19 +148,13 @@ public final class GroebnerBasis {
    * @param factors whose product is saturated by
    */
   public List<Polynomial> saturated(List<Polynomial> generators, List<Polynomial> factors) {
-    var ideal = ideal(generators);
-    boolean changed = true;
-    while (changed) {
-      changed = false;
-      for (Polynomial f : factors) {
-        var next = ideal.quotient(f.copy().setOrdering(order));
-        if (!ideal.contains(next)) {
-          ideal = next;
-          changed = true;
-        }
-      }
+    List<Polynomial> out = generators;
+    for (Polynomial f : factors) {
+      var more = lifted(out);
+      more.add(inverse(f));
+      out = eliminated(more);
     }
-    return basis(ideal);
+    return factors.isEmpty() ? reduced(generators) : out;
   }
 
   /**
@@ -118,23 +165,41 @@ public final class GroebnerBasis {
    */
   public List<Polynomial> of(Chain chain) {
     List<Polynomial> equations = chain.rules().stream().map(Chain.Rule::equation).toList();
-    return chain.initials().isEmpty()
-        ? reduced(equations)
-        : saturated(
-            equations,
-            chain.initials().stream()
-                .flatMap(p -> Factoring.irreducible(p).stream())
-                .distinct()
-                .toList());
+    return saturated(
+        equations,
+        chain.initials().stream()
+            .flatMap(p -> Factoring.irreducible(p).stream())
+            .distinct()
+            .toList());
   }
 
-  /** Whether a power of a polynomial lies in the ideal. */
+  /**
+   * Those polynomials that do not lie in the ideal over the rationals.
+   *
+   * @param generators of the ideal
+   * @param polynomials any
+   */
+  public List<Polynomial> outside(List<Polynomial> generators, List<Polynomial> polynomials) {
+    var basis = basis(lifted(generators));
+    return polynomials.stream()
+        .filter(
+            p -> !p.isZero() && !MultivariateDivision.remainder(lifted(p, 0), basis).isZero())
+        .toList();
+  }
+
+  /** Whether a power of a polynomial lies in the ideal (Rabinowitsch 1929). */
   public boolean radicalContains(List<Polynomial> generators, Polynomial p) {
-    return ideal(generators).radicalContains(p.copy().setOrdering(order));
+    var more = lifted(generators);
+    more.add(inverse(p));
+    return eliminated(more).stream().anyMatch(Polynomial::isConstant);
   }
 
   /** The intersection of two ideals. */
   public List<Polynomial> intersection(List<Polynomial> a, List<Polynomial> b) {
-    return basis(ideal(a).intersection(ideal(b)));
+    List<MultivariatePolynomial<Rational<BigInteger>>> parts = new ArrayList<>();
+    a.forEach(p -> parts.add(lifted(p, 1)));
+    b.forEach(p -> parts.add(lifted(p, 0).subtract(lifted(p, 1))));
+    numbers.forEach(r -> parts.add(lifted(r.equation(), 0)));
+    return eliminated(parts);
   }
 }

@@ -17,6 +17,7 @@ import rankfall.lie.SpanInput;
  *
  * @param conditions what the general point of the whole space fails: closure or Jacobi conditions,
  *     primitive; empty if it fails nothing
+ * @param variety the components of the relations' zeros, checked; empty if the budget ended before
  * @param leaves those that are done
  * @param strata assembled from the leaves; empty if not all leaves are done
  * @param undecided pieces that were not looked at to the end
@@ -24,6 +25,7 @@ import rankfall.lie.SpanInput;
  */
 public record Partition(
     List<Polynomial> conditions,
+    Optional<Decomposition> variety,
     List<Leaf> leaves,
     Optional<Strata.Result> strata,
     List<Piece> undecided,
@@ -78,16 +80,18 @@ public record Partition(
       equations.addAll(conditions);
     }
     try {
-      List<Piece> start = new Splitter(constants, meter).zeros(equations, excluded);
-      Exploration.Result e = Exploration.of(constants, algebras, start, meter);
+      Decomposition variety = Decomposition.of(constants, equations, excluded, meter);
+      Exploration.Result e = Exploration.of(constants, algebras, variety.pieces(), meter);
       Optional<Strata.Result> strata =
           e.undecided().isEmpty()
               ? Optional.of(Strata.of(constants, e.leaves(), excluded, meter))
               : Optional.empty();
-      return new Partition(conditions, e.leaves(), strata, e.undecided(), e.reason());
+      return new Partition(
+          conditions, Optional.of(variety), e.leaves(), strata, e.undecided(), e.reason());
     } catch (Meter.Exhausted e) {
       return new Partition(
           conditions,
+          Optional.empty(),
           List.of(),
           Optional.empty(),
           List.of(new Piece(constants, List.of())),

@@ -97,7 +97,7 @@ public final class RealPoints {
         RealZeros.Relation.POSITIVE);
   }
 
-  private static RealZeros.Condition condition(FamilyCondition c) {
+  static RealZeros.Condition condition(FamilyCondition c) {
     Polynomial p = c.polynomial();
     return switch (c.relation()) {
       case UNEQUAL -> new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO);

@@ -318,7 +318,8 @@ public final class Splitter {
       split(s.with(degenerate), out);
     }
     addFactors(off, initial);
-    if (factors.size() > 1) {
+    boolean splits = factors.size() > 1 || factors.get(0).degree(x) < e.degree(x);
+    if (splits) {
       Polynomial leading =
           factors.stream()
               .map(g -> g.coefficient(x, g.degree(x)))
@@ -332,7 +333,7 @@ public final class Splitter {
       }
       addFactors(off, leading);
     }
-    for (Polynomial g : factors.size() > 1 ? factors : List.of(e)) {
+    for (Polynomial g : splits ? factors : List.of(e)) {
       split(moved(s.with(others).off(off), raised(s.chain(), x, g)), out);
       addFactors(off, g);
     }

@@ -3,7 +3,7 @@ package rankfall.exact;
 import java.math.BigInteger;
 
 /** Reads polynomials that tests write as text: integers, names, {@code + - * ^ ( )}. */
-final class Read {
+public final class Read {
   private final Variables ring;
   private final String text;
   private int at;
@@ -13,7 +13,8 @@ final class Read {
     this.text = text.replace(" ", "");
   }
 
-  static Polynomial polynomial(Variables ring, String text) {
+  /** The polynomial that a text means. */
+  public static Polynomial polynomial(Variables ring, String text) {
     Read r = new Read(ring, text);
     Polynomial p = r.sum();
     if (r.at != r.text.length()) {
