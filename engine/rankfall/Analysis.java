@@ -168,7 +168,8 @@ public record Analysis(
    * A locus on which the Killing form degenerates, or falls further in rank.
    *
    * @param equations one irreducible polynomial, or more where the component has equations
-   * @param multiplicity of the polynomial in the determinant; 1 where there is no determinant
+   * @param multiplicity of the locus in the determinant; empty where there is no determinant, or where
+   *     it was not determined
    * @param rank of the form at the general point of the locus; empty where there is no algebra, the
    *     span not being closed
    * @param kernelDimension of the form there
@@ -178,7 +179,7 @@ public record Analysis(
    */
   public record Condition(
       List<Polynomial> equations,
-      int multiplicity,
+      Optional<Integer> multiplicity,
       Optional<Integer> rank,
       Optional<Integer> kernelDimension,
       List<String> basis,

@@ -59,7 +59,7 @@ record ComponentFindings(
         return withConditions(k, number, conditions, signature(leaf, conditions));
       }
     }
-    ComponentForm c = ComponentForm.of(family, leaf.piece(), seed());
+    ComponentForm c = ComponentForm.of(family, leaf.piece(), equations, seed());
     Optional<KillingForm.FactoredQuotient> determinant = c.form().determinant();
     List<Factor> zeros = determinant.map(KillingForm::zeros).orElse(List.of());
     List<Condition> conditions = conditions(leaf, zeros);

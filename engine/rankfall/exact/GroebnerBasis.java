@@ -187,6 +187,37 @@ public final class GroebnerBasis {
         .toList();
   }
 
+  /**
+   * The normal form of a polynomial modulo an ideal over the rationals: the one polynomial that differs
+   * from it by a member of the ideal and holds no monomial that a leading monomial of the ideal divides.
+   *
+   * @param generators of the ideal
+   * @param p any
+   * @return a polynomial over a positive integer
+   */
+  public RationalFunction normalForm(List<Polynomial> generators, Polynomial p) {
+    if (p.isZero()) {
+      return RationalFunction.of(p);
+    }
+    var rest = MultivariateDivision.remainder(lifted(p, 0), basis(lifted(generators)));
+    RationalFunction sum = RationalFunction.of(Polynomial.zero(variables));
+    for (var m : rest) {
+      List<Integer> e = new ArrayList<>();
+      for (int k = 0; k < variables.count(); k++) {
+        e.add(m.exponents[k + 1]);
+      }
+      Polynomial term =
+          Polynomial.of(
+              variables, List.of(new Term(Polynomial.java(m.coefficient.numerator()), e)));
+      sum =
+          sum.plus(
+              RationalFunction.of(
+                  term,
+                  Polynomial.constant(variables, Polynomial.java(m.coefficient.denominator()))));
+    }
+    return sum;
+  }
+
   /** Whether a power of a polynomial lies in the ideal (Rabinowitsch 1929). */
   public boolean radicalContains(List<Polynomial> generators, Polynomial p) {
     var more = lifted(generators);

@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import rankfall.exact.Chain;
 import rankfall.exact.ChainFractions;
+import rankfall.exact.GroebnerBasis;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
 import rankfall.lie.AdjointTraces;
@@ -14,6 +15,7 @@ import rankfall.lie.FormCheck;
 import rankfall.lie.KillingForm;
 import rankfall.lie.LieBracket;
 import rankfall.lie.Span;
+import rankfall.lie.SpanInput;
 import rankfall.lie.StructureConstants;
 
 /**
@@ -23,6 +25,8 @@ import rankfall.lie.StructureConstants;
  * @param chain the set
  * @param basis names of the basis
  * @param constants the brackets
+ * @param solved the equations that are solved where constants are printed: those of the algebraic
+ *     numbers alone where the spec lists the brackets, so that they print as listed
  * @param form the Killing form
  * @param nonVanishing what was assumed not to vanish
  */
@@ -30,6 +34,7 @@ public record ComponentForm(
     Chain chain,
     List<String> basis,
     StructureConstants<Polynomial> constants,
+    Chain solved,
     KillingForm form,
     List<Polynomial> nonVanishing) {
 
@@ -50,8 +55,14 @@ public record ComponentForm(
    * @param seed of the random elements and points of the checks
    * @throws Mismatch if a self-check fails
    */
-  public static ComponentForm of(Family family, Piece piece, long seed) {
+  public static ComponentForm of(
+      Family family, Piece piece, List<Polynomial> equations, long seed) {
     Chain chain = piece.chain();
+    if (family.on(family.ring().constants()) instanceof FamilySite.Algebraic whole
+        && whole.input() instanceof SpanInput.Table<Polynomial> table
+        && !equations.isEmpty()) {
+      return ofTable(family, piece, equations, table, seed);
+    }
     if (!(family.on(chain) instanceof FamilySite.Algebraic at)
         || !(Span.of(at.input()) instanceof Span.Closed<Polynomial> closed)) {
       throw new IllegalArgumentException("no algebra at the general point of " + chain.rules());
@@ -63,8 +74,53 @@ public record ComponentForm(
             chain,
             closed.names(),
             constants,
+            chain,
             KillingForm.of(chain, constants, traces),
             closed.nonVanishing());
+    out.verify(family, piece, traces, seed);
+    return out;
+  }
+
+  /**
+   * Of brackets that the spec lists nothing is solved for: constants and form keep their polynomials,
+   * in normal form modulo the equations of the set.
+   */
+  private static ComponentForm ofTable(
+      Family family,
+      Piece piece,
+      List<Polynomial> equations,
+      SpanInput.Table<Polynomial> table,
+      long seed) {
+    Chain numbers = family.ring().constants();
+    StructureConstants<Polynomial> given = table.table();
+    StructureConstants<Polynomial> constants =
+        new StructureConstants<>(
+            piece.chain(),
+            given.dimension(),
+            given.brackets(),
+            given.denominator(),
+            given.scale());
+    List<List<Polynomial>> traces = new AdjointTraces(numbers.variables()).of(constants);
+    GroebnerBasis bases = new GroebnerBasis(numbers);
+    List<List<RationalFunction>> matrix = new ArrayList<>();
+    for (List<RationalFunction> row : KillingForm.of(numbers, given, traces).matrix()) {
+      matrix.add(
+          row.stream()
+              .map(
+                  f ->
+                      bases
+                          .normalForm(equations, f.numerator())
+                          .over(RationalFunction.of(f.denominator())))
+              .toList());
+    }
+    ComponentForm out =
+        new ComponentForm(
+            piece.chain(),
+            table.names(),
+            constants,
+            numbers,
+            new KillingForm(piece.chain(), matrix),
+            List.of());
     out.verify(family, piece, traces, seed);
     return out;
   }
@@ -92,7 +148,7 @@ public record ComponentForm(
     Polynomial c = constants.bracket(i, j).getOrDefault(k, chain.zero());
     List<Polynomial> s = constants.scale();
     return ChainFractions.canonical(
-        chain,
+        solved,
         c.times(s.get(k)),
         constants.denominator().times(s.get(i)).times(s.get(j)));
   }

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
 import rankfall.exact.Chain;
+import rankfall.exact.ChainFactoring;
 import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
 
@@ -36,13 +37,14 @@ public final class Loci {
    *
    * @param closure its general point
    * @param equations those of its prime ideal that do not hold on the whole component
-   * @param multiplicity in the determinant; 1 where there is no determinant
+   * @param multiplicity in the determinant; empty where there is none, or where the coordinates of the
+   *     component do not tell it
    * @param algebra at its general point; empty where the span is not closed there
    */
   public record Locus(
       Chain closure,
       List<Polynomial> equations,
-      int multiplicity,
+      Optional<Integer> multiplicity,
       Optional<BranchAlgebra> algebra) {
     /** The rank of the Killing form at the general point. */
     public Optional<Integer> rank() {
@@ -100,12 +102,23 @@ public final class Loci {
 
   private Locus locus(
       Chain component, Chain w, List<Factor> determinant, Optional<BranchAlgebra> algebra) {
-    int multiplicity =
-        determinant.stream()
-            .filter(f -> w.vanishes(f.base()))
-            .mapToInt(Factor::multiplicity)
-            .sum();
-    return new Locus(w, equations(component, w), Math.max(1, multiplicity), algebra);
+    return new Locus(
+        w, equations(component, w), multiplicity(component, w, determinant), algebra);
+  }
+
+  /**
+   * The exponent of the one factor that vanishes on w. It counts only where the free coordinates of the
+   * component are coordinates near w too: off the zeros of the initials, and without a tower.
+   */
+  private static Optional<Integer> multiplicity(
+      Chain component, Chain w, List<Factor> determinant) {
+    boolean coordinates =
+        component.initials().stream().noneMatch(w::vanishes)
+            && component.tower().size() == ChainFactoring.numbers(component).size();
+    List<Factor> own = determinant.stream().filter(f -> w.vanishes(f.base())).toList();
+    return coordinates && own.size() == 1
+        ? Optional.of(own.get(0).multiplicity())
+        : Optional.empty();
   }
 
   private List<Polynomial> equations(Chain component, Chain w) {

@@ -40,7 +40,8 @@ public record Partition(
   /** A family of which nothing is known yet. */
   public static Partition unknown(Family family) {
     Piece all = new Piece(family.ring().constants(), List.of());
-    return new Partition(List.of(), List.of(), Optional.empty(), List.of(all), "out of budget");
+    return new Partition(
+        List.of(), Optional.empty(), List.of(), Optional.empty(), List.of(all), "out of budget");
   }
 
   /**
@@ -60,7 +61,7 @@ public record Partition(
       leaves.add(Exploration.general(all, closed.algebra()));
     }
     return new Partition(
-        conditions, leaves, Optional.empty(), List.of(all), "out of budget");
+        conditions, Optional.empty(), leaves, Optional.empty(), List.of(all), "out of budget");
   }
 
   /**

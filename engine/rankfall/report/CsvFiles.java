@@ -61,7 +61,7 @@ final class CsvFiles {
             List.of(
                 Integer.toString(c.number()),
                 equations(d.equations()),
-                Integer.toString(d.multiplicity()),
+                d.multiplicity().map(m -> Integer.toString(m)).orElse(""),
                 d.rank().map(r -> Integer.toString(r)).orElse(""),
                 d.kernelDimension().map(k -> Integer.toString(k)).orElse(""),
                 realPoints(d.realPoints())));

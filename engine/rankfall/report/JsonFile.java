@@ -158,7 +158,7 @@ final class JsonFile {
 
   private static void condition(ObjectNode out, Condition d) {
     out.set("equations", polynomials(d.equations()));
-    out.put("multiplicity", d.multiplicity());
+    out.put("multiplicity", d.multiplicity().orElse(null));
     out.put("rank", d.rank().orElse(null));
     out.put("kernel_dimension", d.kernelDimension().orElse(null));
     out.set("kernel", combinations(d.kernel(), d.basis()));

@@ -234,7 +234,7 @@ final class LatexAppendix {
     for (Condition d : c.conditions()) {
       table.row(
           Latex.inline(formulas.vanishing(d.equations())),
-          Integer.toString(d.multiplicity()),
+          d.multiplicity().map(m -> Integer.toString(m)).orElse(""),
           d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
           d.rank().isEmpty() ? "" : Latex.inline(formulas.span(d.kernel(), d.basis())),
           Words.realPoints(d.realPoints()));

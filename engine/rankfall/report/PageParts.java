@@ -93,7 +93,7 @@ final class PageParts {
   private PageView.ConditionView condition(Condition d) {
     return new PageView.ConditionView(
         math(formulas.vanishing(d.equations())),
-        d.multiplicity(),
+        d.multiplicity().map(m -> Integer.toString(m)).orElse("\u2013"),
         d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
         d.rank().isEmpty()
             ? new SafeString("&#8211;")

@@ -68,7 +68,7 @@ record PageView(
   /** A locus of degeneration. */
   record ConditionView(
       SafeString formula,
-      int multiplicity,
+      String multiplicity,
       String rank,
       SafeString kernel,
       String realPoints) {}

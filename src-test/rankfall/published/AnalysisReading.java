@@ -80,6 +80,6 @@ final class AnalysisReading {
 
   private static Condition condition(Analysis.Condition condition) {
     List<String> equations = condition.equations().stream().map(Polynomial::toString).toList();
-    return new Condition(String.join("; ", equations), condition.multiplicity());
+    return new Condition(String.join("; ", equations), condition.multiplicity().orElse(0));
   }
 }

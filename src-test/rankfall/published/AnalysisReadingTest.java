@@ -59,7 +59,7 @@ class AnalysisReadingTest {
                   new MatrixEntry(2, 2, RationalFunction.of(T, BigFraction.of(1, 8))))),
           List.of(new Analysis.Condition(
                   List.of(VARIABLE),
-                  2,
+                  Optional.of(2),
                   Optional.of(1),
                   Optional.of(2),
                   List.of("e", "f", "h"),

@@ -115,7 +115,7 @@ final class SampleAnalyses {
                     new MatrixEntry(1, 2, RationalFunction.of(b, a.times(BigInteger.valueOf(4)))))),
             List.of(
                 new Condition(
-                    List.of(a), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
+                    List.of(a), Optional.of(2), Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
     return new Analysis(
         spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
         "0.1.0",
@@ -193,12 +193,12 @@ final class SampleAnalyses {
             Optional.empty(),
             List.of(
                 new Condition(
-                    List.of(a), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
+                    List.of(a), Optional.of(2), Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
                 new Condition(
-                    List.of(b), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
+                    List.of(b), Optional.of(2), Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
                 new Condition(
                     List.of(c),
-                    2,
+                    Optional.of(2),
                     Optional.of(1),
                     Optional.of(2),
                     basis,
@@ -402,7 +402,7 @@ final class SampleAnalyses {
             List.of(
                 new Condition(
                     List.of(longOne),
-                    2,
+                    Optional.of(2),
                     Optional.of(n - 1),
                     Optional.of(1),
                     basis,
@@ -418,7 +418,7 @@ final class SampleAnalyses {
                     RealPoints.UNKNOWN),
                 new Condition(
                     List.of(sum, Polynomial.variable(v, 4).pow(2).minus(Polynomial.one(v))),
-                    3,
+                    Optional.of(3),
                     Optional.of(n - 3),
                     Optional.of(3),
                     basis,
