@@ -55,14 +55,16 @@ record ComponentFindings(
       if (k.equations().equals(equations)) {
         List<Factor> zeros =
             k.killing().determinant().map(d -> d.numerator().factors()).orElse(List.of());
-        List<Condition> conditions = conditions(leaf, zeros);
+        List<Condition> conditions = conditions(leaf, zeros, List.of());
         return withConditions(k, number, conditions, signature(leaf, conditions));
       }
     }
     ComponentForm c = ComponentForm.of(family, leaf.piece(), equations, seed());
     Optional<KillingForm.FactoredQuotient> determinant = c.form().determinant();
     List<Factor> zeros = determinant.map(KillingForm::zeros).orElse(List.of());
-    List<Condition> conditions = conditions(leaf, zeros);
+    List<Polynomial> blocks =
+        equations.isEmpty() || zeros.isEmpty() ? List.of() : c.blockDeterminants();
+    List<Condition> conditions = conditions(leaf, zeros, blocks);
     Killing killing =
         new Killing(
             entries(c.form().matrix()),
@@ -86,9 +88,10 @@ record ComponentFindings(
         conditions);
   }
 
-  private List<Condition> conditions(Leaf.Defined leaf, List<Factor> zeros) {
+  private List<Condition> conditions(
+      Leaf.Defined leaf, List<Factor> zeros, List<Polynomial> blocks) {
     return new Loci(family.ring().constants(), new FamilyAlgebras(family), meter)
-        .in(leaf.piece().chain(), leaf.profile(), partition.leaves(), zeros).stream()
+        .in(leaf.piece().chain(), leaf.profile(), partition.leaves(), zeros, blocks).stream()
             .map(this::condition)
             .toList();
   }

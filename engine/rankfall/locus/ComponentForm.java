@@ -5,6 +5,7 @@ import java.util.List;
 import java.util.Optional;
 import rankfall.exact.Chain;
 import rankfall.exact.ChainFractions;
+import rankfall.exact.Determinant;
 import rankfall.exact.GroebnerBasis;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
@@ -151,6 +152,43 @@ public record ComponentForm(
         solved,
         c.times(s.get(k)),
         constants.denominator().times(s.get(i)).times(s.get(j)));
+  }
+
+  /**
+   * Polynomials whose product is the determinant, up to a number.
+   *
+   * @return one a block; empty if an entry of the form has a denominator
+   */
+  public List<Polynomial> blockDeterminants() {
+    List<Polynomial> out = new ArrayList<>();
+    for (List<Integer> block : form.blocks()) {
+      List<List<Polynomial>> rows = new ArrayList<>();
+      for (int i : block) {
+        List<Polynomial> row = new ArrayList<>();
+        for (int j : block) {
+          RationalFunction f = form.matrix().get(i).get(j);
+          if (!f.denominator().isConstant()) {
+            return List.of();
+          }
+          row.add(f.times(RationalFunction.of(common())).numerator());
+        }
+        rows.add(row);
+      }
+      out.add(Determinant.of(chain.variables(), rows));
+    }
+    return out;
+  }
+
+  /** The product of the integers that stand below the entries. */
+  private Polynomial common() {
+    Polynomial product = chain.one();
+    for (List<RationalFunction> row : form.matrix()) {
+      for (RationalFunction f : row) {
+        Polynomial d = f.denominator();
+        product = product.times(d.over(d.gcd(product)));
+      }
+    }
+    return product;
   }
 
   /** The positions k at which {@link #structure} is not 0. */

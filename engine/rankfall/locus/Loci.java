@@ -60,10 +60,16 @@ public final class Loci {
    * @param profile at the general point
    * @param leaves of an exploration, complete or not
    * @param determinant the factors of the determinant's numerator; empty where it is 0
+   * @param blocks polynomials of which the determinant is the product on the component, up to a number;
+   *     empty where it is not known in this form
    * @return by text of the equations
    */
   public List<Locus> in(
-      Chain component, Profile profile, List<Leaf> leaves, List<Factor> determinant) {
+      Chain component,
+      Profile profile,
+      List<Leaf> leaves,
+      List<Factor> determinant,
+      List<Polynomial> blocks) {
     List<Chain> seen = new ArrayList<>();
     List<Locus> out = new ArrayList<>();
     for (Leaf leaf : leaves) {
@@ -74,12 +80,12 @@ public final class Loci {
           && closures.isInside(w, component)
           && seen.stream().noneMatch(z -> closures.isInside(w, z))) {
         seen.add(w);
-        out.add(locus(component, w, determinant, Optional.of(d.algebra())));
+        out.add(locus(component, w, determinant, blocks, Optional.of(d.algebra())));
       }
     }
     for (Factor f : determinant) {
       if (seen.stream().noneMatch(w -> w.vanishes(f.base()))) {
-        out.addAll(directly(component, f, determinant));
+        out.addAll(directly(component, f, determinant, blocks));
       }
     }
     out.removeIf(l -> isRegular(l, profile));
@@ -101,24 +107,56 @@ public final class Loci {
   }
 
   private Locus locus(
-      Chain component, Chain w, List<Factor> determinant, Optional<BranchAlgebra> algebra) {
-    return new Locus(
-        w, equations(component, w), multiplicity(component, w, determinant), algebra);
+      Chain component,
+      Chain w,
+      List<Factor> determinant,
+      List<Polynomial> blocks,
+      Optional<BranchAlgebra> algebra) {
+    Optional<Integer> multiplicity =
+        isChart(component, w)
+            ? multiplicity(w, determinant)
+            : inAnotherChart(component, w, blocks);
+    return new Locus(w, equations(component, w), multiplicity, algebra);
   }
 
   /**
-   * The exponent of the one factor that vanishes on w. It counts only where the free coordinates of the
-   * component are coordinates near w too: off the zeros of the initials, and without a tower.
+   * Whether the free coordinates of a component are coordinates near the general point of w too: no
+   * initial vanishes there, and there is no tower.
    */
-  private static Optional<Integer> multiplicity(
-      Chain component, Chain w, List<Factor> determinant) {
-    boolean coordinates =
-        component.initials().stream().noneMatch(w::vanishes)
-            && component.tower().size() == ChainFactoring.numbers(component).size();
+  private static boolean isChart(Chain component, Chain w) {
+    return component.initials().stream().noneMatch(w::vanishes)
+        && component.tower().size() == ChainFactoring.numbers(component).size();
+  }
+
+  /** The exponent of the one factor that vanishes on w. */
+  private static Optional<Integer> multiplicity(Chain w, List<Factor> determinant) {
     List<Factor> own = determinant.stream().filter(f -> w.vanishes(f.base())).toList();
-    return coordinates && own.size() == 1
-        ? Optional.of(own.get(0).multiplicity())
-        : Optional.empty();
+    return own.size() == 1 ? Optional.of(own.get(0).multiplicity()) : Optional.empty();
+  }
+
+  /** The same in other free coordinates of the component, which serve near w. */
+  private Optional<Integer> inAnotherChart(
+      Chain component, Chain w, List<Polynomial> blocks) {
+    if (blocks.isEmpty()) {
+      return Optional.empty();
+    }
+    for (Piece p : splitter.near(w).zeros(closures.ideal(component), List.of())) {
+      if (p.chain().dimension() == component.dimension() && isChart(p.chain(), w)) {
+        int sum = 0;
+        for (Polynomial b : blocks) {
+          List<Factor> own =
+              ChainFactoring.factorization(p.chain(), p.chain().reduced(b)).factors().stream()
+                  .filter(f -> w.vanishes(f.base()))
+                  .toList();
+          if (own.size() > 1) {
+            return Optional.empty();
+          }
+          sum += own.stream().mapToInt(Factor::multiplicity).sum();
+        }
+        return Optional.of(sum);
+      }
+    }
+    return Optional.empty();
   }
 
   private List<Polynomial> equations(Chain component, Chain w) {
@@ -126,13 +164,14 @@ public final class Loci {
   }
 
   /** Loci of a factor that no leaf shows: not closed there, or not looked at yet. */
-  private List<Locus> directly(Chain component, Factor f, List<Factor> determinant) {
+  private List<Locus> directly(
+      Chain component, Factor f, List<Factor> determinant, List<Polynomial> blocks) {
     List<Polynomial> equations = new ArrayList<>(closures.ideal(component));
     equations.add(f.base());
     List<Locus> out = new ArrayList<>();
     for (Piece p : splitter.zeros(equations, List.of())) {
       if (p.chain().dimension() == component.dimension() - 1) {
-        out.add(locus(component, p.chain(), determinant, algebra(p)));
+        out.add(locus(component, p.chain(), determinant, blocks, algebra(p)));
       }
     }
     return out;

@@ -19,9 +19,12 @@ import rankfall.exact.Polynomial;
  * pieces are disjoint and cover exactly the zeros.
  */
 public final class Splitter {
+  private static final int UNWELCOME = 100_000;
+
   private final Chain constants;
   private final Set<Integer> numbers;
   private final Meter meter;
+  private final Optional<Chain> near;
 
   /**
    * A splitter for one ring.
@@ -30,9 +33,24 @@ public final class Splitter {
    * @param meter asked at every branch
    */
   public Splitter(Chain constants, Meter meter) {
+    this(constants, meter, Optional.empty());
+  }
+
+  private Splitter(Chain constants, Meter meter, Optional<Chain> near) {
+    this.near = near;
     this.constants = constants;
     this.numbers = new HashSet<>(constants.rules().stream().map(Chain.Rule::variable).toList());
     this.meter = meter;
+  }
+
+  /**
+   * A splitter that solves, where it can, only for variables whose coefficient does not vanish on a set,
+   * so that its pieces serve near the general point of that set.
+   *
+   * @param near the general point of the set
+   */
+  Splitter near(Chain near) {
+    return new Splitter(constants, meter, Optional.of(near));
   }
 
   /**
@@ -185,6 +203,9 @@ public final class Splitter {
   private int cost(State s, Polynomial slope) {
     if (numbers.containsAll(slope.support())) {
       return 0;
+    }
+    if (near.isPresent() && near.get().vanishes(slope)) {
+      return UNWELCOME;
     }
     if (remaining(s, slope).isEmpty()) {
       return 1;
