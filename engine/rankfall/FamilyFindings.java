@@ -40,7 +40,11 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             components,
             strata.map(s -> new StratumFindings(family, s, meter).all()).orElse(List.of()),
             strata.map(FamilyFindings::coverings).orElse(List.of()),
-            List.of());
+            List.of(),
+            strata
+                .filter(s -> spec.presentation() instanceof Spec.Matrices)
+                .map(s -> new ContractionFindings(family, s, components).all())
+                .orElse(List.of()));
     return new Analysis(
         spec,
         Version.text(),

@@ -128,6 +128,16 @@ public final class GroebnerBasis {
                 .toList());
   }
 
+  /**
+   * The basis of the ideal quotient: the polynomials whose product with a given one lies in the ideal.
+   *
+   * @param generators of the ideal
+   * @param p not 0
+   */
+  public List<Polynomial> quotient(List<Polynomial> generators, Polynomial p) {
+    return basis(ideal(generators).quotient(p.copy().setOrdering(order)));
+  }
+
   /** Whether a power of a polynomial lies in the ideal. */
   public boolean radicalContains(List<Polynomial> generators, Polynomial p) {
     return ideal(generators).radicalContains(p.copy().setOrdering(order));
