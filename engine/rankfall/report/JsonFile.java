@@ -121,7 +121,7 @@ final class JsonFile {
     out.put("stratum", c.stratum());
     out.put("component", c.component());
     out.put("outcome", Words.outcome(c.outcome()));
-    out.put("reason", c.outcome() instanceof Unfollowed u ? u.reason() : "");
+    out.put("reason", c.outcome() instanceof Unfollowed u ? u.reason() : null);
     out.put("dimension", c.basis().size());
     if (c.outcome() instanceof Contracted limit) {
       out.put("rank", limit.rank()).put("derived", limit.derived()).put("centre", limit.centre());

@@ -11,7 +11,6 @@ import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Relation;
-import rankfall.Analysis.Stratum;
 import rankfall.exact.Polynomial;
 
 /**
@@ -99,7 +98,14 @@ final class LatexAppendix {
     }
     Contents contents = Contents.of(analysis);
     if (contents.hasStrata()) {
-      strata(f.strata());
+      LatexStrata strata = new LatexStrata(formulas);
+      section("Strata");
+      out.append(strata.profiles(f.strata())).append(strata.points(f.strata()));
+      if (!f.contractions().isEmpty()) {
+        section("Contracted algebras");
+        paragraph("\\noindent " + text(Words.CONTRACTIONS));
+        out.append(strata.contractions(f.contractions(), f.components().size() > 1));
+      }
     }
     if (contents.hasRegions()) {
       regions(f.regions());
@@ -242,46 +248,6 @@ final class LatexAppendix {
     out.append(table.text());
   }
 
-  private void strata(List<Stratum> strata) {
-    section("Strata");
-    paragraph(
-        "\\noindent Columns: $n$ dimension of the algebra, $r$ rank of the Killing form, $d$"
-            + " dimension of the derived algebra, $z$ of the centre.");
-    LatexTable table =
-        new LatexTable(
-            "Strata of the parameter variety", List.of(0.1, 0.4, 0.065, 0.065, 0.065, 0.065, 0.24));
-    table.head("", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
-    for (Stratum s : strata) {
-      table.row(
-          subscripted(s.name()),
-          points(s),
-          Integer.toString(s.dimension()),
-          Integer.toString(s.rank()),
-          Integer.toString(s.derived()),
-          Integer.toString(s.centre()),
-          text(s.type().map(t -> t + ", " + s.kind()).orElse(s.kind())));
-    }
-    out.append(table.text());
-  }
-
-  private static String subscripted(String name) {
-    return "$" + name.substring(0, 1) + "_{" + name.substring(1) + "}$";
-  }
-
-  private String points(Stratum s) {
-    String equations =
-        s.equations().isEmpty() ? "everywhere" : Latex.inline(formulas.vanishing(s.equations()));
-    String exclusions =
-        s.exclusions().stream()
-            .map(e -> Latex.inline(formulas.vanishing(e)))
-            .collect(Collectors.joining(" or "));
-    String real =
-        s.realPoints() == Analysis.RealPoints.YES
-            ? ""
-            : " (real points: " + Words.realPoints(s.realPoints()) + ")";
-    return equations + (exclusions.isEmpty() ? "" : " except " + exclusions) + real;
-  }
-
   private void regions(List<Region> regions) {
     section("Real regions");
     LatexTable table =
@@ -289,7 +255,7 @@ final class LatexAppendix {
     table.head("Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
     for (Region r : regions) {
       table.row(
-          subscripted(r.stratum()) + ", " + subscripted(r.name()),
+          LatexStrata.subscripted(r.stratum()) + ", " + LatexStrata.subscripted(r.name()),
           r.conditions().isEmpty()
               ? "all points"
               : Latex.inline(

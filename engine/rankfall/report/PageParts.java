@@ -25,7 +25,7 @@ final class PageParts {
   private static final int LARGEST_ORDER = 48;
 
   /** An irrational coordinate as the contract writes it. */
-  private static final Pattern ROOT = Pattern.compile("root\\((.*), *([^,]*)\\)");
+  static final Pattern ROOT = Pattern.compile("root\\((.*), *([^,]*)\\)");
 
   private final Analysis.Status status;
   private final boolean severalComponents;
