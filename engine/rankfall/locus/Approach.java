@@ -64,8 +64,15 @@ record Approach(
     return new Unknown("the component is not smooth there");
   }
 
+  /** The quotient as it stands, or in its canonical form on the inner set if that is not longer. */
   private Answer value(Polynomial numerator, Polynomial denominator) {
-    return new Value(ChainFractions.canonical(special, numerator, denominator));
+    RationalFunction canonical = ChainFractions.canonical(special, numerator, denominator);
+    RationalFunction given = RationalFunction.of(numerator, denominator);
+    return new Value(length(canonical) <= length(given) ? canonical : given);
+  }
+
+  private static int length(RationalFunction f) {
+    return f.numerator().termCount() + f.denominator().termCount();
   }
 
   /** Whether the set is a linear space over its free variables, where lowest terms are unique. */

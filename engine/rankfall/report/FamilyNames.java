@@ -8,6 +8,8 @@ import java.util.Map;
 import java.util.Set;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
+import rankfall.Analysis.Contracted;
+import rankfall.Analysis.Contraction;
 import rankfall.Analysis.StructureEntry;
 import rankfall.exact.RationalFunction;
 
@@ -32,6 +34,17 @@ final class FamilyNames {
   /** The non-zero brackets, each with its whole right-hand side. */
   static List<Formula> brackets(Component c, Formulas formulas) {
     return brackets(c.basis(), c.structure(), formulas);
+  }
+
+  /** The brackets of a limit; else the left-hand sides of those that have none or are in question. */
+  static List<Formula> followed(Contraction c, Formulas formulas) {
+    List<StructureEntry> structure = c.outcome().structure();
+    return c.outcome() instanceof Contracted
+        ? brackets(c.basis(), structure, formulas)
+        : structure.stream()
+            .map(s -> formulas.bracket(c.basis().get(s.left()), c.basis().get(s.right())))
+            .distinct()
+            .toList();
   }
 
   /** The non-zero brackets of structure constants in a basis. */

@@ -235,15 +235,20 @@ final class LatexAppendix {
       return;
     }
     LatexTable table =
-        new LatexTable("Where the Killing form degenerates", List.of(0.37, 0.12, 0.12, 0.26, 0.13));
+        new LatexTable("Where the Killing form degenerates", List.of(0.31, 0.12, 0.11, 0.33, 0.13));
     table.head("Condition", "Power", "Rank", "Kernel", "Real points");
     for (Condition d : c.conditions()) {
+      List<String> kernel =
+          d.kernel().isEmpty()
+              ? List.of("")
+              : LatexStrata.vectors(d.kernel(), d.basis(), formulas);
       table.row(
           Latex.inline(formulas.vanishing(d.equations())),
           Integer.toString(d.multiplicity()),
           d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
-          d.rank().isEmpty() ? "" : Latex.inline(formulas.span(d.kernel(), d.basis())),
+          kernel.get(0),
           Words.realPoints(d.realPoints()));
+      kernel.stream().skip(1).forEach(v -> table.row("", "", "", v, ""));
     }
     out.append(table.text());
   }

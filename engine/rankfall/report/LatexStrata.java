@@ -5,6 +5,7 @@ import java.util.Collections;
 import java.util.List;
 import java.util.regex.Matcher;
 import java.util.stream.Collectors;
+import rankfall.Analysis.Combination;
 import rankfall.Analysis.Contracted;
 import rankfall.Analysis.Contraction;
 import rankfall.Analysis.Coordinate;
@@ -12,6 +13,8 @@ import rankfall.Analysis.Stratum;
 
 /** The tables of the appendix about strata: numbers in one, points in another. */
 record LatexStrata(Formulas formulas) {
+  /** Widest kernel that is set on one line, in letters. */
+  private static final int WIDEST_LINE = 60;
 
   /** The numbers of each stratum. */
   String profiles(List<Stratum> strata) {
@@ -62,12 +65,29 @@ record LatexStrata(Formulas formulas) {
         lines.add("Point: " + witness(s.witness()));
       }
       if (!s.kernel().isEmpty()) {
-        lines.add("Kernel: " + Latex.inline(formulas.span(s.kernel(), s.basis())));
+        List<String> vectors = vectors(s.kernel(), s.basis(), formulas);
+        lines.add("Kernel: " + vectors.get(0));
+        lines.addAll(vectors.subList(1, vectors.size()));
       }
       s.remarks().forEach(r -> lines.add(LatexText.escape(r)));
-      table.row(subscripted(s.name()), String.join("\\newline\n", lines));
+      rows(table, subscripted(s.name()), lines);
     }
     return table.text();
+  }
+
+  /** A row a line, so that a long entry can go on over the page. */
+  private static void rows(LatexTable table, String name, List<String> lines) {
+    for (int k = 0; k < lines.size(); k++) {
+      table.row(k == 0 ? name : "", lines.get(k));
+    }
+  }
+
+  /** A kernel on one line, or a vector a line where it is long. */
+  static List<String> vectors(List<Combination> kernel, List<String> basis, Formulas formulas) {
+    Formula whole = formulas.span(kernel, basis);
+    return whole.width() <= WIDEST_LINE
+        ? List.of(Latex.inline(whole))
+        : kernel.stream().map(v -> Latex.inline(formulas.of(v, basis))).toList();
   }
 
   private String witness(List<Coordinate> point) {
@@ -89,10 +109,11 @@ record LatexStrata(Formulas formulas) {
   String contractions(List<Contraction> contractions, boolean severalComponents) {
     LatexTable table =
         new LatexTable(
-            "Contracted algebras", List.of(0.14, 0.065, 0.065, 0.065, 0.065, 0.6));
+            "Contracted algebras", List.of(0.15, 0.065, 0.065, 0.065, 0.065, 0.59));
     table.head("Stratum", "$n$", "$r$", "$d$", "$z$", "Non-zero brackets");
     for (Contraction c : contractions) {
       boolean limit = c.outcome() instanceof Contracted;
+      List<String> lines = lines(c);
       table.row(
           subscripted(c.stratum())
               + (severalComponents ? " from component " + c.component() : ""),
@@ -100,18 +121,22 @@ record LatexStrata(Formulas formulas) {
           c.outcome() instanceof Contracted x ? Integer.toString(x.rank()) : "--",
           c.outcome() instanceof Contracted x ? Integer.toString(x.derived()) : "--",
           c.outcome() instanceof Contracted x ? Integer.toString(x.centre()) : "--",
-          brackets(c));
+          lines.get(0));
+      lines.stream().skip(1).forEach(l -> table.row("", "", "", "", "", l));
+      table.space();
     }
     return table.text();
   }
 
-  private String brackets(Contraction c) {
-    String lead = LatexText.escape(Words.outcomeLead(c.outcome()));
-    String list =
-        FamilyNames.brackets(c.basis(), c.outcome().structure(), formulas).stream()
-            .map(Latex::inline)
-            .collect(Collectors.joining(", "));
-    return lead + (lead.isEmpty() || list.isEmpty() ? "" : " ") + list;
+  /** At least one. */
+  private List<String> lines(Contraction c) {
+    List<String> out = new ArrayList<>();
+    String lead = Words.outcomeLead(c.outcome());
+    if (!lead.isEmpty()) {
+      out.add(LatexText.escape(lead));
+    }
+    FamilyNames.followed(c, formulas).forEach(b -> out.add(Latex.inline(b)));
+    return out;
   }
 
   /** {@code S12} with its number as an index. */

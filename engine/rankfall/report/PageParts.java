@@ -181,9 +181,7 @@ final class PageParts {
         limit.map(x -> Integer.toString(x.derived())).orElse("\u2013"),
         limit.map(x -> Integer.toString(x.centre())).orElse("\u2013"),
         Words.outcomeLead(c.outcome()),
-        FamilyNames.brackets(c.basis(), c.outcome().structure(), formulas).stream()
-            .map(PageParts::math)
-            .toList());
+        FamilyNames.followed(c, formulas).stream().map(PageParts::math).toList());
   }
 
   PageView.RegionView region(Region r) {

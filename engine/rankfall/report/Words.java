@@ -75,8 +75,8 @@ final class Words {
       return c.structure().isEmpty() ? "All brackets vanish." : "";
     }
     return o instanceof Unfollowed u
-        ? "Not decided (" + u.reason() + "); in question are these terms of the general point:"
-        : "No limit: these terms of the general point have none.";
+        ? "Not decided (" + u.reason() + "); in question are these brackets of the general point:"
+        : "No limit: these brackets of the general point have none.";
   }
 
   /** Over which field, and how listed elements relate to the algebra. */

@@ -82,9 +82,11 @@ class LatexAppendixTest {
     assertTrue(tex.contains("$[X, Z] = -bY$"));
     assertTrue(tex.contains("\\raggedright $a = 0$ &\n\\raggedright 2 &\n\\raggedright 1 &\n"));
     assertTrue(
-        tex.contains("$a = 0$\\newline\nexcept where $b = 0$\\newline\nor where $c = 0$"));
-    assertTrue(tex.contains("\\newline\nKernel: "));
-    assertTrue(tex.contains("No limit: these terms of the general point have none."));
+        tex.contains("\\raggedright except where $b = 0$ \\tabularnewline\n"));
+    assertTrue(tex.contains("\\raggedright or where $c = 0$ \\tabularnewline\n"));
+    assertTrue(tex.contains("\\raggedright Kernel: "));
+    assertTrue(tex.contains("\\raggedright Point: "));
+    assertTrue(tex.contains("No limit: these brackets of the general point have none."));
     assertTrue(tex.contains("$a > 0,\\; \\allowbreak bc - 2a^{2} < 0$"));
     assertTrue(tex.contains("\\raggedright sampled"));
   }
