@@ -57,8 +57,7 @@ record ContractionFindings(Family family, Strata.Result strata, List<Component> 
             lower.closure());
     if (o instanceof Contraction.Limit limit) {
       Profile p = limit.profile();
-      return new Analysis.Contracted(
-          entries(limit.brackets()), p.rank(), p.derived(), p.centre());
+      return new Analysis.Contracted(entries(limit.brackets()), p.rank(), p.derived(), p.centre());
     }
     if (o instanceof Contraction.NoLimit none) {
       return new Analysis.WithoutLimit(entries(none.poles()));

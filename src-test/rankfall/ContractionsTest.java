@@ -49,13 +49,7 @@ class ContractionsTest {
 
   private static String profile(Contraction c) {
     Contracted limit = assertInstanceOf(Contracted.class, c.outcome());
-    return c.basis().size()
-        + " "
-        + limit.rank()
-        + " "
-        + limit.derived()
-        + " "
-        + limit.centre();
+    return c.basis().size() + " " + limit.rank() + " " + limit.derived() + " " + limit.centre();
   }
 
   private static List<String> terms(Contraction c) {
@@ -123,9 +117,9 @@ class ContractionsTest {
   }
 
   /**
-   * Scaled boosts: the Lorentz algebra becomes the homogeneous Galilei algebra (Inonu and Wigner 1953,
-   * the place within from memory), as abstract algebra the motions of Euclidean space: perfect,
-   * without centre, Killing form of the rotations alone.
+   * Scaled boosts: the Lorentz algebra becomes the homogeneous Galilei algebra (Inonu and Wigner
+   * 1953, the place within from memory), as abstract algebra the motions of Euclidean space:
+   * perfect, without centre, Killing form of the rotations alone.
    */
   @Test
   void lorentzBoostsContractToGalilei() throws SpecException {
@@ -146,7 +140,9 @@ class ContractionsTest {
     assertEquals("6 3 6 0", profile(into(f, 3)));
   }
 
-  /** sl(2) with a scaled pair: [H,E] = 2E, [H,F] = -2F, [E,F] = c H; c = 0 leaves E and F commuting. */
+  /**
+   * sl(2) with a scaled pair: [H,E] = 2E, [H,F] = -2F, [E,F] = c H; c = 0 leaves E and F commuting.
+   */
   @Test
   void scaledLadderContracts() throws SpecException {
     Findings f =
@@ -187,9 +183,7 @@ class ContractionsTest {
   void mergingFramesKeepTheOtherParameter() throws IOException, SpecException {
     Findings f = shipped("merging-frames");
     List<Contraction> general =
-        f.contractions().stream()
-            .filter(c -> stratum(f, c).equations().size() == 1)
-            .toList();
+        f.contractions().stream().filter(c -> stratum(f, c).equations().size() == 1).toList();
     assertEquals(1, general.size());
     assertEquals(
         List.of("[D, N] -m + 1 N", "[D, X] 1 X", "[D, Y] -m + 1 X", "[D, Y] m Y"),
@@ -218,7 +212,8 @@ class ContractionsTest {
               .orElseThrow();
       assertEquals(
           f.strata().stream().filter(s -> s.dimension() < 4).count(), f.contractions().size());
-      assertTrue(f.contractions().stream().noneMatch(c -> c.outcome() instanceof Analysis.Unfollowed));
+      assertTrue(
+          f.contractions().stream().noneMatch(c -> c.outcome() instanceof Analysis.Unfollowed));
     }
   }
 }

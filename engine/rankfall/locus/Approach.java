@@ -16,19 +16,19 @@ import rankfall.exact.RationalFunction;
 /**
  * Rational functions on an irreducible set, followed into an irreducible set inside it.
  *
- * <p>A function has a value at the general point of the inner set if it is a quotient whose denominator
- * does not vanish there. Such a denominator is looked for among all that the function has: they form
- * the ideal quotient of the denominator, with the equations of the set, by the numerator. Where there
- * is none and the set is smooth, the function has no limit, because the local ring at a smooth point is
- * factorial (Auslander and Buchsbaum 1959, "Unique factorization in regular local rings").
+ * <p>A function has a value at the general point of the inner set if it is a quotient whose
+ * denominator does not vanish there. Such a denominator is looked for among all that the function
+ * has: they form the ideal quotient of the denominator, with the equations of the set, by the
+ * numerator. Where there is none and the set is smooth, the function has no limit, because the
+ * local ring at a smooth point is factorial (Auslander and Buchsbaum 1959, "Unique factorization in
+ * regular local rings").
  *
  * @param bases for the ring
  * @param general the set
  * @param equations a basis of its prime ideal
  * @param special the inner set
  */
-record Approach(
-    GroebnerBasis bases, Chain general, List<Polynomial> equations, Chain special) {
+record Approach(GroebnerBasis bases, Chain general, List<Polynomial> equations, Chain special) {
 
   /** What a function does. */
   sealed interface Answer permits Value, Without, Unknown {}
@@ -72,7 +72,8 @@ record Approach(
   }
 
   private static int length(RationalFunction f) {
-    return f.numerator().termCount() + f.denominator().termCount();
+    int below = f.denominator().isConstant() ? 0 : f.denominator().termCount();
+    return f.numerator().termCount() + below;
   }
 
   /** Whether the set is a linear space over its free variables, where lowest terms are unique. */
@@ -104,11 +105,9 @@ record Approach(
       return Optional.of(value(direct.numerator(), direct.denominator().times(h)));
     }
     for (Polynomial e : bases.quotient(with(above), c.denominator())) {
-      RationalFunction unit =
-          ChainFractions.canonical(general, e.times(c.denominator()), above);
+      RationalFunction unit = ChainFractions.canonical(general, e.times(c.denominator()), above);
       if (!special.vanishes(unit.numerator()) && !special.vanishes(unit.denominator())) {
-        return Optional.of(
-            value(e.times(unit.denominator()), h.times(unit.numerator())));
+        return Optional.of(value(e.times(unit.denominator()), h.times(unit.numerator())));
       }
     }
     return Optional.empty();

@@ -50,8 +50,8 @@ public final class Contraction {
   /**
    * Some bracket has no limit.
    *
-   * @param poles the constants without a limit, with their values at the general point of the larger
-   *     set
+   * @param poles the constants without a limit, with their values at the general point of the
+   *     larger set
    */
   public record NoLimit(List<Entry> poles) implements Outcome {
     /** Copies the list. */
@@ -121,9 +121,7 @@ public final class Contraction {
     List<String> names = Collections.nCopies(dimension, "");
     BranchAlgebra algebra =
         new BranchAlgebra(
-            constants,
-            names,
-            BranchAlgebra.reducedMatrix(special, PlainKilling.of(constants)));
+            constants, names, BranchAlgebra.reducedMatrix(special, PlainKilling.of(constants)));
     KnownNonZero domain = new KnownNonZero(special, List.of());
     return new Limit(
         values,

@@ -36,7 +36,9 @@ final class FamilyNames {
     return brackets(c.basis(), c.structure(), formulas);
   }
 
-  /** The brackets of a limit; else the left-hand sides of those that have none or are in question. */
+  /**
+   * The brackets of a limit; else the left-hand sides of those that have none or are in question.
+   */
   static List<Formula> followed(Contraction c, Formulas formulas) {
     List<StructureEntry> structure = c.outcome().structure();
     return c.outcome() instanceof Contracted

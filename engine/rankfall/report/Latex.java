@@ -155,8 +155,7 @@ final class Latex {
 
     @Override
     public String bracket(Formula.Bracket f) {
-      boolean nested =
-          f.left() instanceof Formula.Bracket || f.right() instanceof Formula.Bracket;
+      boolean nested = f.left() instanceof Formula.Bracket || f.right() instanceof Formula.Bracket;
       return "["
           + of(f.left()).strip()
           + ", "

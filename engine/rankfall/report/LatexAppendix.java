@@ -239,9 +239,7 @@ final class LatexAppendix {
     table.head("Condition", "Power", "Rank", "Kernel", "Real points");
     for (Condition d : c.conditions()) {
       List<String> kernel =
-          d.kernel().isEmpty()
-              ? List.of("")
-              : LatexStrata.vectors(d.kernel(), d.basis(), formulas);
+          d.kernel().isEmpty() ? List.of("") : LatexStrata.vectors(d.kernel(), d.basis(), formulas);
       table.row(
           Latex.inline(formulas.vanishing(d.equations())),
           Integer.toString(d.multiplicity()),

@@ -36,9 +36,10 @@ record LatexStrata(Formulas formulas) {
           LatexText.escape(s.type().map(t -> t + ", " + s.kind()).orElse(s.kind())),
           Words.realPoints(s.realPoints()));
     }
-    return "\\noindent Columns: codimension $c$ of the closure; dimensions $n$ of the algebra, $d$ of"
-        + " the derived algebra, $z$ of the centre, $s$ of the radical, $u$ of the nilradical; rank"
-        + " $r$ of the Killing form.\n\n"
+    return "\\n"
+               + "oindent Columns: codimension $c$ of the closure; dimensions $n$ of the algebra,"
+               + " $d$ of the derived algebra, $z$ of the centre, $s$ of the radical, $u$ of the"
+               + " nilradical; rank $r$ of the Killing form.\n\n"
         + table.text();
   }
 
@@ -108,15 +109,13 @@ record LatexStrata(Formulas formulas) {
   /** What the brackets of a general point become. */
   String contractions(List<Contraction> contractions, boolean severalComponents) {
     LatexTable table =
-        new LatexTable(
-            "Contracted algebras", List.of(0.15, 0.065, 0.065, 0.065, 0.065, 0.59));
+        new LatexTable("Contracted algebras", List.of(0.15, 0.065, 0.065, 0.065, 0.065, 0.59));
     table.head("Stratum", "$n$", "$r$", "$d$", "$z$", "Non-zero brackets");
     for (Contraction c : contractions) {
       boolean limit = c.outcome() instanceof Contracted;
       List<String> lines = lines(c);
       table.row(
-          subscripted(c.stratum())
-              + (severalComponents ? " from component " + c.component() : ""),
+          subscripted(c.stratum()) + (severalComponents ? " from component " + c.component() : ""),
           limit ? Integer.toString(c.basis().size()) : "--",
           c.outcome() instanceof Contracted x ? Integer.toString(x.rank()) : "--",
           c.outcome() instanceof Contracted x ? Integer.toString(x.derived()) : "--",

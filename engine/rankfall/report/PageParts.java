@@ -101,9 +101,7 @@ final class PageParts {
         math(formulas.vanishing(d.equations())),
         d.multiplicity(),
         d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
-        d.rank().isEmpty()
-            ? new SafeString("&#8211;")
-            : math(formulas.span(d.kernel(), d.basis())),
+        d.rank().isEmpty() ? new SafeString("&#8211;") : math(formulas.span(d.kernel(), d.basis())),
         Words.realPoints(d.realPoints()));
   }
 

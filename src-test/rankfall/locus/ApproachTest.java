@@ -53,8 +53,7 @@ class ApproachTest {
     assertEquals("0", value(answer(SPACE, origin, X, Z)));
     assertInstanceOf(Approach.Without.class, answer(SPACE, origin, ONE, X));
     assertInstanceOf(Approach.Without.class, answer(SPACE, origin, X, Y));
-    assertInstanceOf(
-        Approach.Without.class, answer(SPACE, origin, X.times(X), X.plus(Y.times(Y))));
+    assertInstanceOf(Approach.Without.class, answer(SPACE, origin, X.times(X), X.plus(Y.times(Y))));
   }
 
   /** On the circle (1 - x)/y = y/(1 + x): half-angle formula, common practice, no source. */
@@ -72,8 +71,9 @@ class ApproachTest {
   }
 
   /**
-   * The quadric cone x*y = z*w: x/z = w/y has a value on the plane x = z = 0, yet none at the vertex,
-   * where the local ring is not factorial (Hartshorne, Algebraic Geometry, II.6, place from memory).
+   * The quadric cone x*y = z*w: x/z = w/y has a value on the plane x = z = 0, yet none at the
+   * vertex, where the local ring is not factorial (Hartshorne, Algebraic Geometry, II.6, place from
+   * memory).
    */
   @Test
   void functionOnTheQuadricConeChangesItsQuotient() {
@@ -103,7 +103,6 @@ class ApproachTest {
     c.put(new Pair(1, 2), new TreeMap<>(Map.of(1, ONE)));
     StructureConstants<Polynomial> broken =
         new StructureConstants<>(SPACE, 3, c, ONE, List.of(ONE, ONE, ONE));
-    assertThrows(
-        ComponentForm.Mismatch.class, () -> Contraction.requireJacobi(SPACE, broken));
+    assertThrows(ComponentForm.Mismatch.class, () -> Contraction.requireJacobi(SPACE, broken));
   }
 }

@@ -81,8 +81,7 @@ class LatexAppendixTest {
     String tex = LatexAppendix.of(SampleAnalyses.stratified());
     assertTrue(tex.contains("$[X, Z] = -bY$"));
     assertTrue(tex.contains("\\raggedright $a = 0$ &\n\\raggedright 2 &\n\\raggedright 1 &\n"));
-    assertTrue(
-        tex.contains("\\raggedright except where $b = 0$ \\tabularnewline\n"));
+    assertTrue(tex.contains("\\raggedright except where $b = 0$ \\tabularnewline\n"));
     assertTrue(tex.contains("\\raggedright or where $c = 0$ \\tabularnewline\n"));
     assertTrue(tex.contains("\\raggedright Kernel: "));
     assertTrue(tex.contains("\\raggedright Point: "));

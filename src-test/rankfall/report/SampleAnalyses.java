@@ -119,7 +119,13 @@ final class SampleAnalyses {
                     new MatrixEntry(1, 2, RationalFunction.of(b, a.times(BigInteger.valueOf(4)))))),
             List.of(
                 new Condition(
-                    List.of(a), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
+                    List.of(a),
+                    2,
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 1), unit(v, 3, 2)),
+                    RealPoints.YES)));
     return new Analysis(
         spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
         "0.1.0",
@@ -198,9 +204,21 @@ final class SampleAnalyses {
             Optional.empty(),
             List.of(
                 new Condition(
-                    List.of(a), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
+                    List.of(a),
+                    2,
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 1), unit(v, 3, 2)),
+                    RealPoints.YES),
                 new Condition(
-                    List.of(b), 2, Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
+                    List.of(b),
+                    2,
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 0), unit(v, 3, 2)),
+                    RealPoints.YES),
                 new Condition(
                     List.of(c),
                     2,
@@ -298,8 +316,7 @@ final class SampleAnalyses {
             "S2",
             1,
             basis,
-            new Contracted(
-                List.of(new StructureEntry(0, 1, 2, RationalFunction.of(a))), 0, 1, 1)),
+            new Contracted(List.of(new StructureEntry(0, 1, 2, RationalFunction.of(a))), 0, 1, 1)),
         new Contraction(
             "S3", 1, basis, new WithoutLimit(List.of(new StructureEntry(0, 1, 2, inverse)))),
         new Contraction(
