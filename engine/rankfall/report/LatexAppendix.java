@@ -24,6 +24,9 @@ final class LatexAppendix {
   /** Widest matrix that is set as one, in letters over all columns, spaces between them apart. */
   private static final int WIDEST_MATRIX = 44;
 
+  /** Widest name of a basis element, in letters, that a narrow column holds. */
+  private static final int WIDEST_NAME = 8;
+
   private final Analysis analysis;
   private final Formulas formulas;
   private final StringBuilder out = new StringBuilder();
@@ -214,9 +217,11 @@ final class LatexAppendix {
               + " its matrix is\\par}");
       line("\\[\n" + name + " = " + Latex.matrix(m.rows()) + "\n\\]");
     } else {
+      boolean wide = basis.stream().anyMatch(b -> formulas.text(b).width() > WIDEST_NAME);
       LatexTable table =
           new LatexTable(
-              "Non-zero entries of the Killing matrix, upper triangle", List.of(0.16, 0.16, 0.68));
+              "Non-zero entries of the Killing matrix, upper triangle",
+              wide ? List.of(0.25, 0.25, 0.5) : List.of(0.16, 0.16, 0.68));
       table.head("Row", "Column", "Entry");
       for (MatrixEntry e : entries) {
         table.row(
