@@ -67,6 +67,8 @@ public record Analysis(
    * @param strata all strata, in their order; empty where they were not computed
    * @param coverings which stratum lies directly in the closure of which
    * @param regions the real regions of all strata; empty where they were not computed
+   * @param contractions of a family of matrices: for each stratum where the span is smaller than at
+   *     the general point of a component around it, what the brackets of that point become
    */
   public record Findings(
       List<String> listed,
@@ -76,7 +78,8 @@ public record Analysis(
       List<Component> components,
       List<Stratum> strata,
       List<Covering> coverings,
-      List<Region> regions) {
+      List<Region> regions,
+      List<Contraction> contractions) {
     /** Copies the lists. */
     public Findings {
       listed = List.copyOf(listed);
@@ -87,6 +90,7 @@ public record Analysis(
       strata = List.copyOf(strata);
       coverings = List.copyOf(coverings);
       regions = List.copyOf(regions);
+      contractions = List.copyOf(contractions);
     }
   }
 
@@ -257,4 +261,53 @@ public record Analysis(
       Optional<String> type,
       boolean exact,
       List<Coordinate> witness) {}
+
+  /**
+   * The brackets at the general point of a component, followed to the general point of a stratum.
+   *
+   * @param stratum name of the stratum, inside the component
+   * @param component number of the component
+   * @param basis names of the basis at the general point of the component
+   * @param outcome what they become
+   */
+  public record Contraction(
+      String stratum, int component, List<String> basis, ContractionOutcome outcome) {
+    /** Copies the list. */
+    public Contraction {
+      basis = List.copyOf(basis);
+    }
+  }
+
+  /** What the brackets become. */
+  public sealed interface ContractionOutcome permits Contracted, WithoutLimit, Unfollowed {
+    /** Structure constants: all of the limit, or those that stand in its way. */
+    List<StructureEntry> structure();
+  }
+
+  /**
+   * They have a limit: the contracted algebra, in general another algebra than the span.
+   *
+   * @param structure its non-zero structure constants at the general point of the stratum
+   * @param rank of its Killing form
+   * @param derived dimension of its derived algebra
+   * @param centre dimension of its centre
+   */
+  public record Contracted(List<StructureEntry> structure, int rank, int derived, int centre)
+      implements ContractionOutcome {}
+
+  /**
+   * They have no limit.
+   *
+   * @param structure the constants that have none, as at the general point of the component
+   */
+  public record WithoutLimit(List<StructureEntry> structure) implements ContractionOutcome {}
+
+  /**
+   * It was not decided.
+   *
+   * @param structure the constants in question, as at the general point of the component
+   * @param reason a clause
+   */
+  public record Unfollowed(List<StructureEntry> structure, String reason)
+      implements ContractionOutcome {}
 }

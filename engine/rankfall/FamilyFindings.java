@@ -86,7 +86,8 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            List.of());
+            List.of(),
+            contractions(components, strata));
     return new Analysis(
         spec,
         Version.text(),
@@ -95,6 +96,13 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
+  }
+
+  private List<Analysis.Contraction> contractions(
+      List<Component> components, List<Analysis.Stratum> strata) {
+    return spec.presentation() instanceof Spec.Matrices && !strata.isEmpty()
+        ? new ContractionFindings(family, partition.strata().orElseThrow(), components).all()
+        : List.of();
   }
 
   private Analysis failed(String message) {

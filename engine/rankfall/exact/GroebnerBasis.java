@@ -218,6 +218,26 @@ public final class GroebnerBasis {
     return sum;
   }
 
+  /**
+   * The basis of the ideal quotient: the polynomials whose product with a given one lies in the ideal.
+   *
+   * @param generators of the ideal
+   * @param p not 0
+   */
+  public List<Polynomial> quotient(List<Polynomial> generators, Polynomial p) {
+    List<MultivariatePolynomial<Rational<BigInteger>>> parts = new ArrayList<>();
+    generators.forEach(g -> parts.add(lifted(g, 1)));
+    numbers.forEach(r -> parts.add(lifted(r.equation(), 1)));
+    parts.add(lifted(p, 0).subtract(lifted(p, 1)));
+    List<Polynomial> multiples = new ArrayList<>();
+    for (var m : basis(parts)) {
+      if (!m.isZero() && m.degree(0) == 0) {
+        multiples.add(lowered(m).over(p.primitive()));
+      }
+    }
+    return reduced(multiples);
+  }
+
   /** Whether a power of a polynomial lies in the ideal (Rabinowitsch 1929). */
   public boolean radicalContains(List<Polynomial> generators, Polynomial p) {
     var more = lifted(generators);

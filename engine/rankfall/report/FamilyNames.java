@@ -8,6 +8,8 @@ import java.util.Map;
 import java.util.Set;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
+import rankfall.Analysis.Contracted;
+import rankfall.Analysis.Contraction;
 import rankfall.Analysis.StructureEntry;
 import rankfall.exact.RationalFunction;
 
@@ -31,8 +33,27 @@ final class FamilyNames {
 
   /** The non-zero brackets, each with its whole right-hand side. */
   static List<Formula> brackets(Component c, Formulas formulas) {
+    return brackets(c.basis(), c.structure(), formulas);
+  }
+
+  /**
+   * The brackets of a limit; else the left-hand sides of those that have none or are in question.
+   */
+  static List<Formula> followed(Contraction c, Formulas formulas) {
+    List<StructureEntry> structure = c.outcome().structure();
+    return c.outcome() instanceof Contracted
+        ? brackets(c.basis(), structure, formulas)
+        : structure.stream()
+            .map(s -> formulas.bracket(c.basis().get(s.left()), c.basis().get(s.right())))
+            .distinct()
+            .toList();
+  }
+
+  /** The non-zero brackets of structure constants in a basis. */
+  static List<Formula> brackets(
+      List<String> basis, List<StructureEntry> structure, Formulas formulas) {
     Map<List<Integer>, List<StructureEntry>> byPair = new LinkedHashMap<>();
-    for (StructureEntry s : c.structure()) {
+    for (StructureEntry s : structure) {
       byPair.computeIfAbsent(List.of(s.left(), s.right()), k -> new ArrayList<>()).add(s);
     }
     List<Formula> out = new ArrayList<>();
@@ -40,10 +61,10 @@ final class FamilyNames {
         (pair, entries) -> {
           List<RationalFunction> coefficients =
               entries.stream().map(StructureEntry::coefficient).toList();
-          List<String> targets = entries.stream().map(s -> c.basis().get(s.target())).toList();
+          List<String> targets = entries.stream().map(s -> basis.get(s.target())).toList();
           out.add(
               Formulas.equal(
-                  formulas.bracket(c.basis().get(pair.get(0)), c.basis().get(pair.get(1))),
+                  formulas.bracket(basis.get(pair.get(0)), basis.get(pair.get(1))),
                   formulas.combination(coefficients, targets)));
         });
     return out;

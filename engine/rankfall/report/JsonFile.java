@@ -16,6 +16,8 @@ import rankfall.Analysis;
 import rankfall.Analysis.Combination;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
+import rankfall.Analysis.Contracted;
+import rankfall.Analysis.Contraction;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.Killing;
@@ -23,6 +25,8 @@ import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Signature;
 import rankfall.Analysis.Stratum;
+import rankfall.Analysis.StructureEntry;
+import rankfall.Analysis.Unfollowed;
 import rankfall.exact.Polynomial;
 import rankfall.spec.Spec;
 
@@ -105,7 +109,37 @@ final class JsonFile {
     } else {
       out.putNull("regions");
     }
+    if (contents.hasStrata()) {
+      out.set("contractions", array(f.contractions(), JsonFile::contraction));
+    } else {
+      out.putNull("contractions");
+    }
     return out;
+  }
+
+  private static void contraction(ObjectNode out, Contraction c) {
+    out.put("stratum", c.stratum());
+    out.put("component", c.component());
+    out.put("outcome", Words.outcome(c.outcome()));
+    out.put("reason", c.outcome() instanceof Unfollowed u ? u.reason() : null);
+    out.put("dimension", c.basis().size());
+    if (c.outcome() instanceof Contracted limit) {
+      out.put("rank", limit.rank()).put("derived", limit.derived()).put("centre", limit.centre());
+    } else {
+      out.putNull("rank").putNull("derived").putNull("centre");
+    }
+    out.set("basis", texts(c.basis()));
+    out.set("structure", structure(c.outcome().structure(), c.basis()));
+  }
+
+  private static ArrayNode structure(List<StructureEntry> entries, List<String> basis) {
+    return array(
+        entries,
+        (node, s) ->
+            node.put("left", basis.get(s.left()))
+                .put("right", basis.get(s.right()))
+                .put("target", basis.get(s.target()))
+                .put("coefficient", s.coefficient().toString()));
   }
 
   private static void component(ObjectNode out, Component c) {
@@ -115,15 +149,7 @@ final class JsonFile {
     out.put("parameter_dimension", c.parameterDimension());
     out.put("dimension", basis.size());
     out.set("basis", texts(basis));
-    out.set(
-        "structure",
-        array(
-            c.structure(),
-            (node, s) ->
-                node.put("left", basis.get(s.left()))
-                    .put("right", basis.get(s.right()))
-                    .put("target", basis.get(s.target()))
-                    .put("coefficient", s.coefficient().toString())));
+    out.set("structure", structure(c.structure(), basis));
     out.set("killing", killing(c.killing(), basis));
     if (c.dual().isPresent()) {
       out.set("dual", entries(c.dual().get(), basis));

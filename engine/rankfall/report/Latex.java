@@ -155,7 +155,13 @@ final class Latex {
 
     @Override
     public String bracket(Formula.Bracket f) {
-      return "[" + of(f.left()).strip() + ", " + of(f.right()).strip() + "]";
+      boolean nested = f.left() instanceof Formula.Bracket || f.right() instanceof Formula.Bracket;
+      return "["
+          + of(f.left()).strip()
+          + ", "
+          + (nested ? "\\allowbreak " : "")
+          + of(f.right()).strip()
+          + "]";
     }
 
     @Override

@@ -11,7 +11,6 @@ import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Relation;
-import rankfall.Analysis.Stratum;
 import rankfall.exact.Polynomial;
 
 /**
@@ -24,6 +23,9 @@ final class LatexAppendix {
 
   /** Widest matrix that is set as one, in letters over all columns, spaces between them apart. */
   private static final int WIDEST_MATRIX = 44;
+
+  /** Widest name of a basis element, in letters, that a narrow column holds. */
+  private static final int WIDEST_NAME = 8;
 
   private final Analysis analysis;
   private final Formulas formulas;
@@ -99,7 +101,14 @@ final class LatexAppendix {
     }
     Contents contents = Contents.of(analysis);
     if (contents.hasStrata()) {
-      strata(f.strata());
+      LatexStrata strata = new LatexStrata(formulas);
+      section("Strata");
+      out.append(strata.profiles(f.strata())).append(strata.points(f.strata()));
+      if (!f.contractions().isEmpty()) {
+        section("Contracted algebras");
+        paragraph("\\noindent " + text(Words.CONTRACTIONS));
+        out.append(strata.contractions(f.contractions(), f.components().size() > 1));
+      }
     }
     if (contents.hasRegions()) {
       regions(f.regions());
@@ -208,9 +217,11 @@ final class LatexAppendix {
               + " its matrix is\\par}");
       line("\\[\n" + name + " = " + Latex.matrix(m.rows()) + "\n\\]");
     } else {
+      boolean wide = basis.stream().anyMatch(b -> formulas.text(b).width() > WIDEST_NAME);
       LatexTable table =
           new LatexTable(
-              "Non-zero entries of the Killing matrix, upper triangle", List.of(0.16, 0.16, 0.68));
+              "Non-zero entries of the Killing matrix, upper triangle",
+              wide ? List.of(0.25, 0.25, 0.5) : List.of(0.16, 0.16, 0.68));
       table.head("Row", "Column", "Entry");
       for (MatrixEntry e : entries) {
         table.row(
@@ -229,57 +240,20 @@ final class LatexAppendix {
       return;
     }
     LatexTable table =
-        new LatexTable("Where the Killing form degenerates", List.of(0.37, 0.12, 0.12, 0.26, 0.13));
+        new LatexTable("Where the Killing form degenerates", List.of(0.31, 0.12, 0.11, 0.33, 0.13));
     table.head("Condition", "Power", "Rank", "Kernel", "Real points");
     for (Condition d : c.conditions()) {
+      List<String> kernel =
+          d.kernel().isEmpty() ? List.of("") : LatexStrata.vectors(d.kernel(), d.basis(), formulas);
       table.row(
           Latex.inline(formulas.vanishing(d.equations())),
           d.multiplicity().map(m -> Integer.toString(m)).orElse(""),
           d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
-          d.rank().isEmpty() ? "" : Latex.inline(formulas.span(d.kernel(), d.basis())),
+          kernel.get(0),
           Words.realPoints(d.realPoints()));
+      kernel.stream().skip(1).forEach(v -> table.row("", "", "", v, ""));
     }
     out.append(table.text());
-  }
-
-  private void strata(List<Stratum> strata) {
-    section("Strata");
-    paragraph(
-        "\\noindent Columns: $n$ dimension of the algebra, $r$ rank of the Killing form, $d$"
-            + " dimension of the derived algebra, $z$ of the centre.");
-    LatexTable table =
-        new LatexTable(
-            "Strata of the parameter variety", List.of(0.1, 0.4, 0.065, 0.065, 0.065, 0.065, 0.24));
-    table.head("", "Points", "$n$", "$r$", "$d$", "$z$", "Type");
-    for (Stratum s : strata) {
-      table.row(
-          subscripted(s.name()),
-          points(s),
-          Integer.toString(s.dimension()),
-          Integer.toString(s.rank()),
-          Integer.toString(s.derived()),
-          Integer.toString(s.centre()),
-          text(s.type().map(t -> t + ", " + s.kind()).orElse(s.kind())));
-    }
-    out.append(table.text());
-  }
-
-  private static String subscripted(String name) {
-    return "$" + name.substring(0, 1) + "_{" + name.substring(1) + "}$";
-  }
-
-  private String points(Stratum s) {
-    String equations =
-        s.equations().isEmpty() ? "everywhere" : Latex.inline(formulas.vanishing(s.equations()));
-    String exclusions =
-        s.exclusions().stream()
-            .map(e -> Latex.inline(formulas.vanishing(e)))
-            .collect(Collectors.joining(" or "));
-    String real =
-        s.realPoints() == Analysis.RealPoints.YES
-            ? ""
-            : " (real points: " + Words.realPoints(s.realPoints()) + ")";
-    return equations + (exclusions.isEmpty() ? "" : " except " + exclusions) + real;
   }
 
   private void regions(List<Region> regions) {
@@ -289,7 +263,7 @@ final class LatexAppendix {
     table.head("Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
     for (Region r : regions) {
       table.row(
-          subscripted(r.stratum()) + ", " + subscripted(r.name()),
+          LatexStrata.subscripted(r.stratum()) + ", " + LatexStrata.subscripted(r.name()),
           r.conditions().isEmpty()
               ? "all points"
               : Latex.inline(

@@ -36,6 +36,11 @@ final class LatexTable {
     out.append(cells(List.of(cells)));
   }
 
+  /** A little room between two rows. */
+  void space() {
+    out.append("\\addlinespace\n");
+  }
+
   private static String cells(List<String> cells) {
     return cells.stream()
         .map(c -> "\\raggedright " + c)

@@ -2,17 +2,21 @@ package rankfall.report;
 
 import io.pebbletemplates.pebble.extension.escaper.SafeString;
 import java.util.List;
+import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
+import rankfall.Analysis.Contracted;
+import rankfall.Analysis.Contraction;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Relation;
 import rankfall.Analysis.Stratum;
+import rankfall.Analysis.Unfollowed;
 import rankfall.exact.Polynomial;
 
 /** Turns the parts of one analysis into what the page shows. */
@@ -21,13 +25,15 @@ final class PageParts {
   private static final int LARGEST_ORDER = 48;
 
   /** An irrational coordinate as the contract writes it. */
-  private static final Pattern ROOT = Pattern.compile("root\\((.*), *([^,]*)\\)");
+  static final Pattern ROOT = Pattern.compile("root\\((.*), *([^,]*)\\)");
 
   private final Analysis.Status status;
+  private final boolean severalComponents;
   private final Formulas formulas;
 
   PageParts(Analysis a) {
     this.status = a.status();
+    this.severalComponents = a.findings().map(f -> f.components().size() > 1).orElse(false);
     this.formulas = new Formulas(FamilyNames.notation(a));
   }
 
@@ -95,9 +101,7 @@ final class PageParts {
         math(formulas.vanishing(d.equations())),
         d.multiplicity().map(m -> Integer.toString(m)).orElse("\u2013"),
         d.rank().map(r -> Integer.toString(r)).orElse(Words.NO_ALGEBRA),
-        d.rank().isEmpty()
-            ? new SafeString("&#8211;")
-            : math(formulas.span(d.kernel(), d.basis())),
+        d.rank().isEmpty() ? new SafeString("&#8211;") : math(formulas.span(d.kernel(), d.basis())),
         Words.realPoints(d.realPoints()));
   }
 
@@ -161,6 +165,21 @@ final class PageParts {
 
   SafeString diagram(Findings f) {
     return new SafeString(ClosureDiagram.of(f.strata(), f.coverings()));
+  }
+
+  PageView.ContractionView contraction(Contraction c) {
+    Optional<Contracted> limit =
+        c.outcome() instanceof Contracted x ? Optional.of(x) : Optional.empty();
+    return new PageView.ContractionView(
+        c.stratum(),
+        severalComponents ? "from component " + c.component() : "",
+        !(c.outcome() instanceof Unfollowed),
+        limit.map(x -> Integer.toString(c.basis().size())).orElse("\u2013"),
+        limit.map(x -> Integer.toString(x.rank())).orElse("\u2013"),
+        limit.map(x -> Integer.toString(x.derived())).orElse("\u2013"),
+        limit.map(x -> Integer.toString(x.centre())).orElse("\u2013"),
+        Words.outcomeLead(c.outcome()),
+        FamilyNames.followed(c, formulas).stream().map(PageParts::math).toList());
   }
 
   PageView.RegionView region(Region r) {

@@ -33,6 +33,8 @@ import rankfall.spec.Spec;
  * @param strata rows of the table of strata
  * @param diagram the closure diagram; empty without strata
  * @param regions rows of the table of regions
+ * @param contractions rows of the table of contracted algebras
+ * @param contractionWords what that table shows
  * @param citation a line
  * @param version of the program
  * @param sha256 of the spec
@@ -58,6 +60,8 @@ record PageView(
     List<StratumView> strata,
     List<SafeString> diagram,
     List<RegionView> regions,
+    List<ContractionView> contractions,
+    String contractionWords,
     String citation,
     String version,
     String sha256) {
@@ -130,6 +134,18 @@ record PageView(
       String proof,
       List<SafeString> witness) {}
 
+  /** What the brackets of a component become in a stratum; numbers are empty without a limit. */
+  record ContractionView(
+      String stratum,
+      String component,
+      boolean decided,
+      String dimension,
+      String rank,
+      String derived,
+      String centre,
+      String lead,
+      List<SafeString> brackets) {}
+
   /** The page of an analysis of any status. */
   static PageView of(Analysis a) {
     PageParts parts = new PageParts(a);
@@ -158,6 +174,8 @@ record PageView(
         f.map(x -> x.strata().stream().map(parts::stratum).toList()).orElse(List.of()),
         contents.hasStrata() ? f.map(parts::diagram).stream().toList() : List.of(),
         f.map(x -> x.regions().stream().map(parts::region).toList()).orElse(List.of()),
+        f.map(x -> x.contractions().stream().map(parts::contraction).toList()).orElse(List.of()),
+        Words.CONTRACTIONS,
         Words.citation(a),
         a.version(),
         spec.source().sha256());

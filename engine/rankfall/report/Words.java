@@ -4,9 +4,13 @@ import java.util.List;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
+import rankfall.Analysis.Contracted;
+import rankfall.Analysis.ContractionOutcome;
 import rankfall.Analysis.Origin;
 import rankfall.Analysis.RealPoints;
 import rankfall.Analysis.Signature;
+import rankfall.Analysis.Unfollowed;
+import rankfall.Analysis.WithoutLimit;
 import rankfall.spec.Spec;
 
 /** Sentences that the page and the appendix share. */
@@ -17,6 +21,13 @@ final class Words {
 
   /** What stands in place of the rank where the span is not closed. */
   static final String NO_ALGEBRA = "no algebra";
+
+  /** What a table of contractions shows. */
+  static final String CONTRACTIONS =
+      "In these strata the matrices span less than at a general point. The brackets read off at a"
+          + " general point can be followed there all the same; where they have a limit, it is the"
+          + " contracted algebra. It has the full number of generators and is not the span of the"
+          + " matrices. All values hold at the general point of the stratum.";
 
   private Words() {}
 
@@ -48,6 +59,24 @@ final class Words {
       case NO -> "none";
       case UNKNOWN -> "not decided";
     };
+  }
+
+  /** What became of brackets that were followed into a stratum, in a word or two. */
+  static String outcome(ContractionOutcome o) {
+    if (o instanceof Contracted) {
+      return "limit";
+    }
+    return o instanceof WithoutLimit ? "no limit" : "not decided";
+  }
+
+  /** What stands beside the brackets of an outcome, a sentence. */
+  static String outcomeLead(ContractionOutcome o) {
+    if (o instanceof Contracted c) {
+      return c.structure().isEmpty() ? "All brackets vanish." : "";
+    }
+    return o instanceof Unfollowed u
+        ? "Not decided (" + u.reason() + "); in question are these brackets of the general point:"
+        : "No limit: these brackets of the general point have none.";
   }
 
   /** Over which field, and how listed elements relate to the algebra. */

@@ -81,7 +81,11 @@ class LatexAppendixTest {
     String tex = LatexAppendix.of(SampleAnalyses.stratified());
     assertTrue(tex.contains("$[X, Z] = -bY$"));
     assertTrue(tex.contains("\\raggedright $a = 0$ &\n\\raggedright 2 &\n\\raggedright 1 &\n"));
-    assertTrue(tex.contains("$a = 0$ except $b = 0$ or $c = 0$"));
+    assertTrue(tex.contains("\\raggedright except where $b = 0$ \\tabularnewline\n"));
+    assertTrue(tex.contains("\\raggedright or where $c = 0$ \\tabularnewline\n"));
+    assertTrue(tex.contains("\\raggedright Kernel: "));
+    assertTrue(tex.contains("\\raggedright Point: "));
+    assertTrue(tex.contains("No limit: these brackets of the general point have none."));
     assertTrue(tex.contains("$a > 0,\\; \\allowbreak bc - 2a^{2} < 0$"));
     assertTrue(tex.contains("\\raggedright sampled"));
   }

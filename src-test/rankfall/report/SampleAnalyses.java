@@ -11,6 +11,8 @@ import rankfall.Analysis;
 import rankfall.Analysis.Combination;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
+import rankfall.Analysis.Contracted;
+import rankfall.Analysis.Contraction;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Covering;
 import rankfall.Analysis.Findings;
@@ -25,6 +27,8 @@ import rankfall.Analysis.Signature;
 import rankfall.Analysis.Status;
 import rankfall.Analysis.Stratum;
 import rankfall.Analysis.StructureEntry;
+import rankfall.Analysis.Unfollowed;
+import rankfall.Analysis.WithoutLimit;
 import rankfall.exact.Factorization;
 import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
@@ -132,6 +136,7 @@ final class SampleAnalyses {
                 List.of(),
                 List.of(b),
                 List.of(c),
+                List.of(),
                 List.of(),
                 List.of(),
                 List.of())));
@@ -281,7 +286,28 @@ final class SampleAnalyses {
                 strata,
                 List.of(
                     new Covering("S2", "S1"), new Covering("S3", "S2"), new Covering("S4", "S3")),
-                regions)));
+                regions,
+                contractions(a, v, basis))));
+  }
+
+  /** One of each outcome. */
+  private static List<Contraction> contractions(Polynomial a, Variables v, List<String> basis) {
+    RationalFunction inverse = RationalFunction.of(Polynomial.one(v), a);
+    return List.of(
+        new Contraction(
+            "S2",
+            1,
+            basis,
+            new Contracted(List.of(new StructureEntry(0, 1, 2, RationalFunction.of(a))), 0, 1, 1)),
+        new Contraction(
+            "S3", 1, basis, new WithoutLimit(List.of(new StructureEntry(0, 1, 2, inverse)))),
+        new Contraction(
+            "S4",
+            1,
+            basis,
+            new Unfollowed(
+                List.of(new StructureEntry(1, 2, 0, inverse)),
+                "the component is not smooth there")));
   }
 
   /** A family that closes on a locus only, which was not decomposed. */
@@ -302,6 +328,7 @@ final class SampleAnalyses {
                 f.listed(),
                 f.variables(),
                 List.of(new Relation(p.times(p.minus(q)), List.of(p, p.minus(q)), Origin.CLOSURE)),
+                List.of(),
                 List.of(),
                 List.of(),
                 List.of(),
@@ -445,6 +472,7 @@ final class SampleAnalyses {
                 List.of(c),
                 List.of(),
                 List.of(),
+                List.of(),
                 List.of())));
   }
 
@@ -504,6 +532,7 @@ final class SampleAnalyses {
                 f.components(),
                 strata,
                 coverings,
-                f.regions())));
+                f.regions(),
+                f.contractions())));
   }
 }
