@@ -108,8 +108,8 @@ public final class ChainPoint {
   }
 
   /**
-   * The values that a rule allows at given ones below: real ones first, then the upper half plane;
-   * none if they were not told apart.
+   * The values that a rule allows at given ones below: real ones first, greatest first, then
+   * the upper half plane; none if they were not told apart.
    */
   private List<ComplexNumber> candidates(
       Chain.Rule r, SortedMap<Integer, ComplexNumber> below) {

@@ -97,7 +97,7 @@ class ChainPointTest {
         ChainPoint.of(upward, Map.of(1, tower.roots().get(0)), false, List.of()).orElseThrow();
     assertEquals(
         sign > 0
-            ? "[root(x^4 - 2, -1.18920712), root(x^2 - 2, 1.41421356)]"
+            ? "[root(x^4 - 2, 1.18920712), root(x^2 - 2, 1.41421356)]"
             : "[root(x^4 - 2, 0.00000000 + 1.18920712*i), root(x^2 - 2, -1.41421356)]",
         p.toString());
   }
