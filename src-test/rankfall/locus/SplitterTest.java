@@ -99,7 +99,9 @@ class SplitterTest {
     }
   }
 
-  /** Whether every zero over a prime field lies in exactly one piece and every other point in none. */
+  /**
+   * Whether every zero over a prime field lies in exactly one piece and every other point in none.
+   */
   private static boolean fits(List<Polynomial> equations, List<Piece> pieces, int n, int prime) {
     List<Residues> e = equations.stream().map(p -> Residues.of(p, prime)).toList();
     List<ResiduePiece> q = pieces.stream().map(p -> ResiduePiece.of(p, prime)).toList();
@@ -184,8 +186,7 @@ class SplitterTest {
     List<List<Polynomial>> primes = new ArrayList<>();
     List<Polynomial> product = List.of(Polynomial.one(XYZ));
     for (int k = 1 + r.nextInt(3); k > 0; k--) {
-      List<Polynomial> p =
-          prime(r).stream().map(t -> Read.polynomial(XYZ, t)).toList();
+      List<Polynomial> p = prime(r).stream().map(t -> Read.polynomial(XYZ, t)).toList();
       primes.add(bases.reduced(p));
       product = products(product, p);
     }
