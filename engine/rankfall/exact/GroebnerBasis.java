@@ -175,6 +175,7 @@ public final class GroebnerBasis {
    *
    * @param generators of the ideal
    * @param polynomials any
+   * @return in the given order
    */
   public List<Polynomial> outside(List<Polynomial> generators, List<Polynomial> polynomials) {
     var basis = basis(lifted(generators));

@@ -65,6 +65,7 @@ public record Decomposition(
    * @param constants the chain of the algebraic numbers of the ring
    * @param equations all vanish
    * @param meter ends the work early
+   * @return checked
    * @throws IllegalStateException if the check fails
    */
   public static Decomposition of(Chain constants, List<Polynomial> equations, Meter meter) {
@@ -78,6 +79,7 @@ public record Decomposition(
    * @param equations all vanish
    * @param nonZero none vanishes
    * @param meter ends the work early
+   * @return checked
    * @throws IllegalStateException if the check fails
    */
   public static Decomposition of(
