@@ -100,8 +100,8 @@ public final class ChainPoint {
         return false;
       }
       if (root.low().equals(root.high())
-          || Rationals.compare(root.low(), i.lower()) <= 0
-              && Rationals.compare(i.upper(), root.high()) <= 0) {
+          || (Rationals.compare(root.low(), i.lower()) <= 0
+              && Rationals.compare(i.upper(), root.high()) <= 0)) {
         return true;
       }
       fine = fine.refined();
