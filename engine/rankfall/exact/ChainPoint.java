@@ -12,9 +12,10 @@ import org.apache.commons.numbers.fraction.BigFraction;
 /**
  * A point of an irreducible chain without free variables, as complex algebraic numbers.
  *
- * <p>Every coordinate is a root of the norm of its rule (Trager 1976). At given values below, a rule of
- * degree d has d roots among those of its variable's minimal polynomial; enclosures are refined until
- * all others are shown not to satisfy it. So the choice is consistent over all coordinates.
+ * <p>Every coordinate is a root of the norm of its rule (Trager 1976). At given values below, a
+ * rule of degree d has d roots among those of its variable's minimal polynomial; enclosures are
+ * refined until all others are shown not to satisfy it. So the choice is consistent over all
+ * coordinates.
  */
 public final class ChainPoint {
   private static final int MOST_DEGREE = 40;
@@ -35,8 +36,8 @@ public final class ChainPoint {
    * @param numbers the real roots that are meant by algebraic numbers of the ring
    * @param realOnly whether all coordinates must be real
    * @param conditions signs that must hold, asked of real points only
-   * @return one coordinate a variable; empty if there is no such point, if degrees are too great, or
-   *     if enclosures did not decide
+   * @return one coordinate a variable; empty if there is no such point, if degrees are too great,
+   *     or if enclosures did not decide
    */
   public static Optional<List<ComplexNumber>> of(
       Chain chain,
@@ -99,8 +100,8 @@ public final class ChainPoint {
         return false;
       }
       if (root.low().equals(root.high())
-          || Rationals.compare(root.low(), i.lower()) <= 0
-              && Rationals.compare(i.upper(), root.high()) <= 0) {
+          || (Rationals.compare(root.low(), i.lower()) <= 0
+              && Rationals.compare(i.upper(), root.high()) <= 0)) {
         return true;
       }
       fine = fine.refined();
@@ -108,11 +109,10 @@ public final class ChainPoint {
   }
 
   /**
-   * The values that a rule allows at given ones below: real ones first, then the upper half plane;
-   * none if they were not told apart.
+   * The values that a rule allows at given ones below: real ones first, greatest first, then the
+   * upper half plane; none if they were not told apart.
    */
-  private List<ComplexNumber> candidates(
-      Chain.Rule r, SortedMap<Integer, ComplexNumber> below) {
+  private List<ComplexNumber> candidates(Chain.Rule r, SortedMap<Integer, ComplexNumber> below) {
     Univariate minimal = Univariate.of(minimal(r));
     ComplexRoots roots = ComplexRoots.of(minimal);
     SortedMap<Integer, ComplexNumber> at = below;
@@ -171,8 +171,7 @@ public final class ChainPoint {
   private static ComplexBox value(Polynomial p, SortedMap<Integer, ComplexNumber> at) {
     ComplexBox sum = ComplexBox.of(BigFraction.ZERO);
     for (Term t : p.terms()) {
-      ComplexBox product =
-          ComplexBox.of(BigFraction.of(t.coefficient()));
+      ComplexBox product = ComplexBox.of(BigFraction.of(t.coefficient()));
       for (int v : p.support()) {
         for (int e = 0; e < t.exponents().get(v); e++) {
           product = product.times(at.get(v).box());

@@ -3,7 +3,8 @@ package rankfall.exact;
 import org.apache.commons.numbers.fraction.BigFraction;
 
 /**
- * A rectangle in the complex plane, sides parallel to the axes; arithmetic encloses and never rounds.
+ * A rectangle in the complex plane, sides parallel to the axes; arithmetic encloses and never
+ * rounds.
  *
  * @param re the real parts
  * @param im the imaginary parts

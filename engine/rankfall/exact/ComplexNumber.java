@@ -66,8 +66,7 @@ public final class ComplexNumber {
   private boolean isNearest(List<ComplexBox> boxes, BigFraction x, BigFraction y) {
     BigFraction own = boxes.get(index).squaredDistance(x, y).upper();
     for (int k = 0; k < boxes.size(); k++) {
-      if (k != index
-          && Rationals.compare(own, boxes.get(k).squaredDistance(x, y).lower()) >= 0) {
+      if (k != index && Rationals.compare(own, boxes.get(k).squaredDistance(x, y).lower()) >= 0) {
         return false;
       }
     }
@@ -77,9 +76,6 @@ public final class ComplexNumber {
   private String text(BigDecimal re, BigDecimal im) {
     return isReal()
         ? re.toPlainString()
-        : re.toPlainString()
-            + (im.signum() < 0 ? " - " : " + ")
-            + im.abs().toPlainString()
-            + "*i";
+        : re.toPlainString() + (im.signum() < 0 ? " - " : " + ") + im.abs().toPlainString() + "*i";
   }
 }

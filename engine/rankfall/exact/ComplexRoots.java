@@ -9,13 +9,14 @@ import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
 
 /**
- * All complex roots of a polynomial with integer coefficients and simple roots, each in a box of its
- * own; the boxes of real roots lie on the real axis.
+ * All complex roots of a polynomial with integer coefficients and simple roots, each in a box of
+ * its own; the boxes of real roots lie on the real axis.
  *
  * <p>Approximations come from the simultaneous iteration of Weierstrass (1891; Durand 1960, Kerner
- * 1966). They are trusted only once discs about them, computed exactly, are disjoint: the disc about
- * {@code z} of radius {@code n*|W|}, where {@code W} is Weierstrass' correction, then holds one root
- * (Smith, Error bounds for zeros of a polynomial based upon Gerschgorin's theorems, J. ACM 17, 1970).
+ * 1966). They are trusted only once discs about them, computed exactly, are disjoint: the disc
+ * about {@code z} of radius {@code n*|W|}, where {@code W} is Weierstrass' correction, then holds
+ * one root (Smith, Error bounds for zeros of a polynomial based upon Gerschgorin's theorems, J. ACM
+ * 17, 1970).
  */
 final class ComplexRoots {
   private static final int ROUNDS = 400;
@@ -44,8 +45,7 @@ final class ComplexRoots {
 
     Complex times(Complex b) {
       return new Complex(
-          re.multiply(b.re).subtract(im.multiply(b.im)),
-          re.multiply(b.im).add(im.multiply(b.re)));
+          re.multiply(b.re).subtract(im.multiply(b.im)), re.multiply(b.im).add(im.multiply(b.re)));
     }
 
     Complex over(Complex b, MathContext m) {
@@ -102,10 +102,7 @@ final class ComplexRoots {
       }
       if (areApart(out) && out.stream().filter(ComplexBox::meetsRealAxis).count() == real) {
         return new ComplexRoots(
-            f,
-            d,
-            z,
-            out.stream().map(b -> b.meetsRealAxis() ? b.real() : b).toList());
+            f, d, z, out.stream().map(b -> b.meetsRealAxis() ? b.real() : b).toList());
       }
     }
     throw new ArithmeticException("roots not told apart: " + f);
@@ -193,8 +190,7 @@ final class ComplexRoots {
         below = below.multiply(z.get(k).minus(z.get(j)).greatestPart());
       }
     }
-    BigDecimal above =
-        value(f, z.get(k), -1).sumOfParts().multiply(BigDecimal.valueOf(f.degree()));
+    BigDecimal above = value(f, z.get(k), -1).sumOfParts().multiply(BigDecimal.valueOf(f.degree()));
     BigDecimal radius =
         below.signum() == 0
             ? BigDecimal.TEN.pow(MOST_DIGITS)

@@ -16,13 +16,14 @@ import java.util.List;
 import java.util.Set;
 
 /**
- * Reduced Groebner bases over the rationals, in graded reverse lexicographic order; algebraic numbers
- * of the ring stand in a block below the other variables, so that a basis never solves for them.
+ * Reduced Groebner bases over the rationals, in graded reverse lexicographic order; algebraic
+ * numbers of the ring stand in a block below the other variables, so that a basis never solves for
+ * them.
  *
- * <p>Saturations and intersections are eliminations of one more variable (Cox, Little, O'Shea, Ideals,
- * Varieties, and Algorithms, ch. 4). The library's own quotients are wrong in a block order, and its
- * modular bases spend a tenth of a second looking for primes; so its plain Buchberger algorithm runs
- * over the rationals.
+ * <p>Saturations and intersections are eliminations of one more variable (Cox, Little, O'Shea,
+ * Ideals, Varieties, and Algorithms, ch. 4). The library's own quotients are wrong in a block
+ * order, and its modular bases spend a tenth of a second looking for primes; so its plain
+ * Buchberger algorithm runs over the rationals.
  */
 public final class GroebnerBasis {
   private final Variables variables;
@@ -66,8 +67,7 @@ public final class GroebnerBasis {
       for (int k = 0; k < t.exponents().size(); k++) {
         e[k + 1] = t.exponents().get(k);
       }
-      out.add(
-          new Monomial<>(e, new Rational<>(Rings.Z, Polynomial.ring(t.coefficient()))));
+      out.add(new Monomial<>(e, new Rational<>(Rings.Z, Polynomial.ring(t.coefficient()))));
     }
     return out;
   }
@@ -86,9 +86,7 @@ public final class GroebnerBasis {
         e.add(m.exponents[k + 1]);
       }
       BigInteger c =
-          m.coefficient
-              .numerator()
-              .multiply(denominator.divideExact(m.coefficient.denominator()));
+          m.coefficient.numerator().multiply(denominator.divideExact(m.coefficient.denominator()));
       out.add(new Term(Polynomial.java(c), e));
     }
     return Polynomial.of(variables, out).primitive();
@@ -119,8 +117,7 @@ public final class GroebnerBasis {
         }
       }
     }
-    out.sort(
-        Comparator.comparing(Polynomial::totalDegree).thenComparing(Polynomial::toString));
+    out.sort(Comparator.comparing(Polynomial::totalDegree).thenComparing(Polynomial::toString));
     return out;
   }
 
@@ -178,12 +175,12 @@ public final class GroebnerBasis {
    *
    * @param generators of the ideal
    * @param polynomials any
+   * @return in the given order
    */
   public List<Polynomial> outside(List<Polynomial> generators, List<Polynomial> polynomials) {
     var basis = basis(lifted(generators));
     return polynomials.stream()
-        .filter(
-            p -> !p.isZero() && !MultivariateDivision.remainder(lifted(p, 0), basis).isZero())
+        .filter(p -> !p.isZero() && !MultivariateDivision.remainder(lifted(p, 0), basis).isZero())
         .toList();
   }
 

@@ -9,12 +9,12 @@ import rankfall.exact.GroebnerBasis;
 import rankfall.exact.Polynomial;
 
 /**
- * The irreducible components over the rationals (with the algebraic numbers of the ring) of the zeros
- * of polynomials, off the zeros of others: the prime decomposition of a radical.
+ * The irreducible components over the rationals (with the algebraic numbers of the ring) of the
+ * zeros of polynomials, off the zeros of others: the prime decomposition of a radical.
  *
  * <p>The closures of the pieces that {@link Splitter} finds, each that lies in no other one. Before
- * anybody sees it the result is checked by {@link DecompositionCheck}, which does not rest on the way
- * it was found.
+ * anybody sees it the result is checked by {@link DecompositionCheck}, which does not rest on the
+ * way it was found.
  *
  * @param pieces disjoint, irreducible and locally closed; they cover exactly the zeros
  * @param components by dimension, greatest first, then by text of their equations
@@ -52,8 +52,8 @@ public record Decomposition(
   public record Certified() implements Certificate {}
 
   /**
-   * The components are prime and the input vanishes on them, but whether they cover all of its zeros
-   * was not proved a second time.
+   * The components are prime and the input vanishes on them, but whether they cover all of its
+   * zeros was not proved a second time.
    *
    * @param reason why not
    */
@@ -65,6 +65,7 @@ public record Decomposition(
    * @param constants the chain of the algebraic numbers of the ring
    * @param equations all vanish
    * @param meter ends the work early
+   * @return checked
    * @throws IllegalStateException if the check fails
    */
   public static Decomposition of(Chain constants, List<Polynomial> equations, Meter meter) {
@@ -78,6 +79,7 @@ public record Decomposition(
    * @param equations all vanish
    * @param nonZero none vanishes
    * @param meter ends the work early
+   * @return checked
    * @throws IllegalStateException if the check fails
    */
   public static Decomposition of(

@@ -20,21 +20,22 @@ import rankfall.locus.Decomposition.NotCertified;
  * Checks a decomposition, however it was found.
  *
  * <ol>
- *   <li>Each component is prime: every storey of its tower is irreducible over those below, no initial
- *       vanishes at the general point, its basis vanishes there and holds its rules.
+ *   <li>Each component is prime: every storey of its tower is irreducible over those below, no
+ *       initial vanishes at the general point, its basis vanishes there and holds its rules.
  *   <li>The input lies in the ideal of every component, and what must not vanish in none.
  *   <li>No component lies in another.
  *   <li>What all components' ideals share, times what must not vanish, lies in the radical of the
- *       input; so there are no zeros outside the components. (The shared ideal and the product of the
- *       ideals have the same radical.)
+ *       input; so there are no zeros outside the components. (The shared ideal and the product of
+ *       the ideals have the same radical.)
  * </ol>
  *
- * The last one takes ideal membership; it is given up beyond a size or a time, and the answer says so.
+ * The last one takes ideal membership; it is given up beyond a size or a time, and the answer says
+ * so.
  */
 record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
   private static final int MOST_COMPONENTS = 40;
   private static final int MOST_GENERATORS = 120;
-  private static final Duration LONGEST = Duration.ofSeconds(4);
+  private static final Duration LONGEST = Duration.ofSeconds(10);
 
   /**
    * The certificate.
@@ -44,8 +45,7 @@ record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
    * @param components what is to be checked
    * @throws IllegalStateException if the components are wrong
    */
-  Certificate of(
-      List<Polynomial> equations, List<Polynomial> nonZero, List<Component> components) {
+  Certificate of(List<Polynomial> equations, List<Polynomial> nonZero, List<Component> components) {
     for (Component c : components) {
       require(isPrime(c.chain()), "is not irreducible", c);
       require(c.equations().stream().allMatch(c.chain()::vanishes), "has a wrong basis", c);
@@ -76,7 +76,9 @@ record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
     }
   }
 
-  /** Whether the tower is irreducible storey by storey and the rest of the chain rational over it. */
+  /**
+   * Whether the tower is irreducible storey by storey and the rest of the chain rational over it.
+   */
   private static boolean isPrime(Chain chain) {
     List<Chain.Rule> below = new ArrayList<>();
     for (Chain.Rule r : chain.tower()) {

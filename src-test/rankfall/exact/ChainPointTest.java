@@ -61,21 +61,17 @@ class ChainPointTest {
   @Test
   void unrelatedRealRoots() {
     Chain c =
-        chain(
-            rule(RING, "z", "z - x*y"), rule(RING, "x", "x^2 - 2"), rule(RING, "y", "y^2 - 3"));
+        chain(rule(RING, "z", "z - x*y"), rule(RING, "x", "x^2 - 2"), rule(RING, "y", "y^2 - 3"));
     List<RealZeros.Condition> positive =
         List.of(
-            new RealZeros.Condition(
-                Read.polynomial(RING, "x"), RealZeros.Relation.POSITIVE),
-            new RealZeros.Condition(
-                Read.polynomial(RING, "-z"), RealZeros.Relation.POSITIVE));
+            new RealZeros.Condition(Read.polynomial(RING, "x"), RealZeros.Relation.POSITIVE),
+            new RealZeros.Condition(Read.polynomial(RING, "-z"), RealZeros.Relation.POSITIVE));
     assertEquals(
         "[root(x^2 - 2, 1.41421356), root(x^2 - 3, -1.73205081), root(x^2 - 6, -2.44948974)]",
         ChainPoint.of(c, Map.of(), true, positive).orElseThrow().toString());
     List<RealZeros.Condition> impossible = new ArrayList<>(positive);
     impossible.add(
-        new RealZeros.Condition(
-            Read.polynomial(RING, "z^2 - 6"), RealZeros.Relation.NON_ZERO));
+        new RealZeros.Condition(Read.polynomial(RING, "z^2 - 6"), RealZeros.Relation.NON_ZERO));
     assertEquals(Optional.empty(), ChainPoint.of(c, Map.of(), true, impossible));
   }
 
@@ -97,7 +93,7 @@ class ChainPointTest {
         ChainPoint.of(upward, Map.of(1, tower.roots().get(0)), false, List.of()).orElseThrow();
     assertEquals(
         sign > 0
-            ? "[root(x^4 - 2, -1.18920712), root(x^2 - 2, 1.41421356)]"
+            ? "[root(x^4 - 2, 1.18920712), root(x^2 - 2, 1.41421356)]"
             : "[root(x^4 - 2, 0.00000000 + 1.18920712*i), root(x^2 - 2, -1.41421356)]",
         p.toString());
   }

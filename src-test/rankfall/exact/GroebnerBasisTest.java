@@ -34,8 +34,7 @@ class GroebnerBasisTest {
   @Test
   void twistedCubic() {
     assertEquals(
-        "[x*y - z, x*z - y^2, x^2 - y]",
-        PLAIN.reduced(in(RING, "y - x^2", "z - x^3")).toString());
+        "[x*y - z, x*z - y^2, x^2 - y]", PLAIN.reduced(in(RING, "y - x^2", "z - x^3")).toString());
   }
 
   @Test
@@ -53,11 +52,9 @@ class GroebnerBasisTest {
   @Test
   void saturationKeepsTheNumbersApart() {
     assertEquals(
-        in(WITH_I, "x - i*y"),
-        COMPLEX.saturated(in(WITH_I, "y*(x - i*y)"), in(WITH_I, "y")));
+        in(WITH_I, "x - i*y"), COMPLEX.saturated(in(WITH_I, "y*(x - i*y)"), in(WITH_I, "y")));
     assertEquals(
-        in(WITH_I, "x - i*y"),
-        COMPLEX.saturated(in(WITH_I, "x^2 + y^2"), in(WITH_I, "x + i*y")));
+        in(WITH_I, "x - i*y"), COMPLEX.saturated(in(WITH_I, "x^2 + y^2"), in(WITH_I, "x + i*y")));
     assertEquals(
         in(WITH_I, "x^2 + y^2"),
         COMPLEX.intersection(in(WITH_I, "x - i*y"), in(WITH_I, "x + i*y")));
@@ -78,10 +75,8 @@ class GroebnerBasisTest {
   @MethodSource("seeds")
   void intersectionIsTheCommonPart(long seed) {
     Sample s = new Sample(seed);
-    List<Polynomial> a =
-        List.of(s.nonConstant(RING, 3, 2, 2), s.nonConstant(RING, 2, 2, 2));
-    List<Polynomial> b =
-        List.of(s.nonConstant(RING, 3, 2, 2), s.nonConstant(RING, 2, 2, 2));
+    List<Polynomial> a = List.of(s.nonConstant(RING, 3, 2, 2), s.nonConstant(RING, 2, 2, 2));
+    List<Polynomial> b = List.of(s.nonConstant(RING, 3, 2, 2), s.nonConstant(RING, 2, 2, 2));
     List<Polynomial> both = PLAIN.intersection(a, b);
     assertEquals(List.of(), PLAIN.outside(a, both));
     assertEquals(List.of(), PLAIN.outside(b, both));
@@ -98,11 +93,9 @@ class GroebnerBasisTest {
     Polynomial x = one(RING, "x");
     Polynomial z = one(RING, "z");
     Polynomial f = s.polynomial(RING, 3, 2, 3);
-    List<Polynomial> graph =
-        List.of(x.minus(z.pow(s.below(3))), y.minus(z.pow(1 + s.below(2))));
+    List<Polynomial> graph = List.of(x.minus(z.pow(s.below(3))), y.minus(z.pow(1 + s.below(2))));
     Chain chain =
-        new Chain(
-            RING, List.of(new Chain.Rule(0, graph.get(0)), new Chain.Rule(1, graph.get(1))));
+        new Chain(RING, List.of(new Chain.Rule(0, graph.get(0)), new Chain.Rule(1, graph.get(1))));
     boolean inside = f.isZero() || chain.vanishes(f);
     List<Polynomial> times = graph.stream().map(f::times).toList();
     List<Polynomial> back = PLAIN.saturated(times, List.of(f));

@@ -114,21 +114,14 @@ class DecompositionTest {
                 List.of("b", "f", "c*h - d*g"),
                 List.of("c", "g", "a*f - b*e"),
                 List.of(
-                    "a*f - b*e",
-                    "a*g - c*e",
-                    "a*h - d*e",
-                    "b*g - c*f",
-                    "b*h - d*f",
-                    "c*h - d*g"))),
+                    "a*f - b*e", "a*g - c*e", "a*h - d*e", "b*g - c*f", "b*h - d*f", "c*h - d*g"))),
         plain(
             "determinantal (Bruns, Vetter 1988): rank 1 of a symmetric 3 x 3 is irreducible",
             "a b c d e f",
-            List.of(
-                "a*d - b^2", "a*e - b*c", "a*f - c^2", "b*e - c*d", "b*f - c*e", "d*f - e^2"),
+            List.of("a*d - b^2", "a*e - b*c", "a*f - c^2", "b*e - c*d", "b*f - c*e", "d*f - e^2"),
             List.of(
                 List.of(
-                    "a*d - b^2", "a*e - b*c", "a*f - c^2", "b*e - c*d", "b*f - c*e",
-                    "d*f - e^2"))),
+                    "a*d - b^2", "a*e - b*c", "a*f - c^2", "b*e - c*d", "b*f - c*e", "d*f - e^2"))),
         plain(
             "Davenport 1987 (from memory): cyclic 4; sum and product of a + c and b + d are 0",
             "a b c d",
@@ -137,8 +130,7 @@ class DecompositionTest {
                 "a*b + b*c + c*d + d*a",
                 "a*b*c + b*c*d + c*d*a + d*a*b",
                 "a*b*c*d - 1"),
-            List.of(
-                List.of("a + c", "b + d", "c*d - 1"), List.of("a + c", "b + d", "c*d + 1"))));
+            List.of(List.of("a + c", "b + d", "c*d - 1"), List.of("a + c", "b + d", "c*d + 1"))));
   }
 
   static Stream<Case> byHand() {
@@ -210,8 +202,7 @@ class DecompositionTest {
             "a root of 8 is twice a root of 2, in a parameter too",
             "t x y",
             List.of("x^2 - t^3 - t", "y^2 - 4*(t^3 + t)"),
-            List.of(
-                List.of("x^2 - t^3 - t", "y - 2*x"), List.of("x^2 - t^3 - t", "y + 2*x"))),
+            List.of(List.of("x^2 - t^3 - t", "y - 2*x"), List.of("x^2 - t^3 - t", "y + 2*x"))),
         plain(
             "a point of degree 4 and its inverse",
             "x y",
@@ -221,8 +212,7 @@ class DecompositionTest {
             "an equation that is a square over the tower below",
             "t x y",
             List.of("x^2 - t^3 - t", "y^4 - 2*(t^3 + t)*y^2 + (t^3 + t)^2"),
-            List.of(
-                List.of("x^2 - t^3 - t", "y - x"), List.of("x^2 - t^3 - t", "y + x"))),
+            List.of(List.of("x^2 - t^3 - t", "y - x"), List.of("x^2 - t^3 - t", "y + x"))),
         plain(
             "an equation irreducible over Q that becomes a square over the tower",
             "t x y",
@@ -269,8 +259,7 @@ class DecompositionTest {
     for (int k = 1; k < 5; k++) {
       minors.add("x" + k + "*y" + (k + 1) + " - x" + (k + 1) + "*y" + k);
     }
-    Case c =
-        plain("2 x 5", "x1 x2 x3 x4 x5 y1 y2 y3 y4 y5", minors, NOTHING);
+    Case c = plain("2 x 5", "x1 x2 x3 x4 x5 y1 y2 y3 y4 y5", minors, NOTHING);
     Decomposition d = decomposed(c);
     assertEquals(5, d.components().size());
     assertInstanceOf(Decomposition.Certified.class, d.certificate());
@@ -278,8 +267,9 @@ class DecompositionTest {
   }
 
   /**
-   * A symmetric matrix and a vector in its kernel. Three equations in nine variables leave dimension 6
-   * or more: the vector is 0, or the matrix has rank 2 (5 + 1); rank 1 (3 + 2) is too small.
+   * A symmetric matrix and a vector in its kernel. Three equations in nine variables leave
+   * dimension 6 or more: the vector is 0, or the matrix has rank 2 (5 + 1); rank 1 (3 + 2) is too
+   * small.
    */
   @Test
   void kernelsOfSymmetricMatrices() {
@@ -303,7 +293,9 @@ class DecompositionTest {
     Polynomial determinant = c.read("a*(d*f - e^2) - b*(b*f - c*e) + c*(b*e - c*d)");
     assertEquals(
         1,
-        d.components().stream().filter(x -> x.equations().contains(determinant.primitive())).count());
+        d.components().stream()
+            .filter(x -> x.equations().contains(determinant.primitive()))
+            .count());
   }
 
   /** What must not vanish is part of the check: the axis alone is left. */
@@ -326,9 +318,7 @@ class DecompositionTest {
 
   private static DecompositionCheck checker(Case c) {
     return new DecompositionCheck(
-        c.constants(),
-        new GroebnerBasis(c.constants()),
-        new Meter(Duration.ofSeconds(60), 1000));
+        c.constants(), new GroebnerBasis(c.constants()), new Meter(Duration.ofSeconds(60), 1000));
   }
 
   private static void refuses(Case c, List<Decomposition.Component> components) {
@@ -337,7 +327,9 @@ class DecompositionTest {
         () -> checker(c).of(c.all(c.equations()), List.of(), components));
   }
 
-  /** The check must refuse: a missing component, a double one, one that is none, a reducible one. */
+  /**
+   * The check must refuse: a missing component, a double one, one that is none, a reducible one.
+   */
   @Test
   void wrongDecompositionsAreRefused() {
     Case c = plain("", "x y z", List.of("x*z", "y*z"), NOTHING);
@@ -353,8 +345,7 @@ class DecompositionTest {
     refuses(c, more);
     Case two = plain("", "x y", List.of("x^2 - 4"), NOTHING);
     Chain reducible = new Chain(two.ring(), List.of(new Chain.Rule(0, two.read("x^2 - 4"))));
-    refuses(
-        two, List.of(new Decomposition.Component(reducible, List.of(two.read("x^2 - 4")))));
+    refuses(two, List.of(new Decomposition.Component(reducible, List.of(two.read("x^2 - 4")))));
   }
 
   /** Forty-nine points in a plane: the cover is not proved, and the answer says so. */

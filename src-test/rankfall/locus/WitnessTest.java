@@ -33,7 +33,7 @@ class WitnessTest {
                     + s.realPoints()
                     + " "
                     + s.witness().stream()
-                        .map(c -> c.parameter() + "=" + c.value())
+                        .map(c -> c.variable() + "=" + c.value())
                         .collect(Collectors.joining("; ")))
         .collect(Collectors.joining("\n"));
   }
