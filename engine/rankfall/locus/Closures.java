@@ -61,6 +61,20 @@ final class Closures {
     return out;
   }
 
+  /**
+   * Whether what two closures share visibly lies in a third: each of its equations is one of theirs.
+   *
+   * @param third a closure
+   * @param a a closure
+   * @param b a closure
+   * @return true only if it does; false tells nothing
+   */
+  boolean hold(Chain third, Chain a, Chain b) {
+    List<Polynomial> first = ideal(a);
+    List<Polynomial> second = ideal(b);
+    return ideal(third).stream().allMatch(p -> first.contains(p) || second.contains(p));
+  }
+
   /** The components of what two closures share. */
   List<Chain> intersection(Splitter splitter, Chain a, Chain b) {
     List<Polynomial> equations = new ArrayList<>(ideal(a));

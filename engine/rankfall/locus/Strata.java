@@ -110,7 +110,7 @@ public final class Strata {
     List<Chain> across = new ArrayList<>(earlier);
     levels.forEach(
         (p, chains) -> {
-          if (!p.equals(profile) && !profile.mayBeLimitOf(p)) {
+          if (!p.equals(profile) && p.mayBeLimitOf(profile)) {
             across.addAll(chains);
           }
         });
@@ -123,8 +123,9 @@ public final class Strata {
     for (Polynomial p : poles) {
       excluded.addAll(zerosInside(z, p));
     }
+    List<Chain> inside = closures.maximal(excluded);
     for (Chain w : across) {
-      if (!closures.isInside(w, z)) {
+      if (!closures.isInside(w, z) && inside.stream().noneMatch(e -> closures.hold(e, w, z))) {
         excluded.addAll(closures.intersection(splitter, w, z));
       }
     }
