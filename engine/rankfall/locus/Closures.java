@@ -12,9 +12,9 @@ import rankfall.exact.Polynomial;
 /**
  * Inclusions between the closures of chains, and their prime ideals.
  *
- * <p>Most inclusions are told at the general point: if the rules of Z vanish at that of W and no initial
- * of Z does, W lies in the closure of Z. Only where an initial vanishes the ideal of Z is needed. Ideals
- * are remembered; one object serves one family on one thread.
+ * <p>Most inclusions are told at the general point: if the rules of Z vanish at that of W and no
+ * initial of Z does, W lies in the closure of Z. Only where an initial vanishes the ideal of Z is
+ * needed. Ideals are remembered; one object serves one family on one thread.
  */
 final class Closures {
   private final GroebnerBasis bases;
@@ -37,8 +37,7 @@ final class Closures {
     if (!z.rules().stream().allMatch(r -> w.vanishes(r.equation()))) {
       return false;
     }
-    return z.initials().stream().noneMatch(w::vanishes)
-        || ideal(z).stream().allMatch(w::vanishes);
+    return z.initials().stream().noneMatch(w::vanishes) || ideal(z).stream().allMatch(w::vanishes);
   }
 
   /**
@@ -62,7 +61,8 @@ final class Closures {
   }
 
   /**
-   * Whether what two closures share visibly lies in a third: each of its equations is one of theirs.
+   * Whether what two closures share visibly lies in a third: each of its equations is one of
+   * theirs.
    *
    * @param third a closure
    * @param a a closure
@@ -79,7 +79,6 @@ final class Closures {
   List<Chain> intersection(Splitter splitter, Chain a, Chain b) {
     List<Polynomial> equations = new ArrayList<>(ideal(a));
     equations.addAll(ideal(b));
-    return maximal(
-        splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());
+    return maximal(splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());
   }
 }

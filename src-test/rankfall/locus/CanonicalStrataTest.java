@@ -20,8 +20,8 @@ import rankfall.exact.Term;
 import rankfall.exact.Variables;
 
 /**
- * The strata do not depend on the basis, on the order of generators and parameters, or on names: closed
- * sets are compared as ideals, and random points lie in strata of the same profile.
+ * The strata do not depend on the basis, on the order of generators and parameters, or on names:
+ * closed sets are compared as ideals, and random points lie in strata of the same profile.
  */
 class CanonicalStrataTest {
   private static final Residues FIELD = new Residues(2_147_483_629L);
@@ -52,9 +52,7 @@ class CanonicalStrataTest {
   }
 
   private static Analysed family(String id) {
-    return id.startsWith("shipped ")
-        ? Analysed.shipped(id.substring(8))
-        : Analysed.published(id);
+    return id.startsWith("shipped ") ? Analysed.shipped(id.substring(8)) : Analysed.published(id);
   }
 
   @ParameterizedTest(name = "{0}, seed {1}")
@@ -102,17 +100,15 @@ class CanonicalStrataTest {
       int spread = 1 + k % 3;
       List<Long> point =
           family.spec().parameters().stream()
-              .map(p -> Math.floorMod((long) random.nextInt(2 * spread + 1) - spread, FIELD.prime()))
+              .map(
+                  p -> Math.floorMod((long) random.nextInt(2 * spread + 1) - spread, FIELD.prime()))
               .toList();
       List<Long> moved =
           other.spec().parameters().stream()
               .map(
                   p ->
                       point.get(
-                          family.spec().parameters().stream()
-                              .map(names::get)
-                              .toList()
-                              .indexOf(p)))
+                          family.spec().parameters().stream().map(names::get).toList().indexOf(p)))
               .toList();
       assertEquals(
           here.of(point).stream().map(Analysed::profileOf).toList(),
@@ -121,9 +117,9 @@ class CanonicalStrataTest {
     }
   }
 
-  /** The comparison tells two families apart that differ in a sign. */
+  /** A seed gives one disguise, another seed another one. */
   @Test
-  void aDisguiseIsNotTheSameText() {
+  void everySeedHasItsDisguise() {
     Analysed family = Analysed.published("bianchi-general");
     String first = Disguise.of(family.spec(), new Random(1)).yaml();
     assertNotEquals(first, Disguise.of(family.spec(), new Random(2)).yaml());

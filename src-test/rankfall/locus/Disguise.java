@@ -11,8 +11,8 @@ import rankfall.spec.Expression;
 import rankfall.spec.Spec;
 
 /**
- * The same family written otherwise: another basis by a unimodular matrix of integers, which shuffles
- * the generators too, and parameters with other names in another order.
+ * The same family written otherwise: another basis by a unimodular matrix of integers, which
+ * shuffles the generators too, and parameters with other names in another order.
  *
  * @param yaml the spec
  * @param parameters the new names of the parameters, by old name
@@ -68,7 +68,11 @@ record Disguise(String yaml, Map<String, String> parameters) {
           terms.add("(" + u.rows()[a][i] + ")*" + body(m.matrices().get(i), renamed));
         }
       }
-      out.append("  G").append(a + 1).append(": \"").append(String.join(" + ", terms)).append("\"\n");
+      out.append("  G")
+          .append(a + 1)
+          .append(": \"")
+          .append(String.join(" + ", terms))
+          .append("\"\n");
     }
     return out.toString();
   }

@@ -14,10 +14,10 @@ import org.junit.jupiter.params.provider.CsvSource;
 import rankfall.Analysis;
 
 /**
- * Ten thousand rational points of a family: each lies in exactly one stratum, which has its profile, or
- * in none where there is no algebra. The values are small, so that the points meet the loci; from point
- * to point more or fewer coordinates are 0. Membership is exact: modulo a prime near 2^31, greater than
- * any value that a printed polynomial takes at these points.
+ * Ten thousand rational points of a family: each lies in exactly one stratum, which has its
+ * profile, or in none where there is no algebra. The values are small, so that the points meet the
+ * loci; from point to point more or fewer coordinates are 0. Membership is exact: modulo a prime
+ * near 2^31, greater than any value that a printed polynomial takes at these points.
  */
 class EveryPointTest {
   private static final int POINTS = 10_000;
@@ -52,8 +52,7 @@ class EveryPointTest {
   })
   void liesInOneStratum(String name, String from, int reached) {
     long seed = name.hashCode();
-    Analysed family =
-        from.equals("shipped") ? Analysed.shipped(name) : Analysed.published(name);
+    Analysed family = from.equals("shipped") ? Analysed.shipped(name) : Analysed.published(name);
     PlainProfile plain = new PlainProfile(family.spec(), FIELD);
     Whereabouts strata = new Whereabouts(family.strata(), FIELD);
     assertTrue(Whereabouts.bound(family.strata()).longValueExact() < FIELD.prime());

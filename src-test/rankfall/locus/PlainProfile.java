@@ -106,7 +106,9 @@ record PlainProfile(Spec spec, Residues field) {
     Residues.Rows span = new Residues.Rows(field);
     List<long[]> basis = new ArrayList<>();
     for (Spec.NamedMatrix x : m.matrices()) {
-      long[] v = entries(x.body(), m.order(), vectors(scalars, known, m.order(), 1 + m.order() * m.order()));
+      long[] v =
+          entries(
+              x.body(), m.order(), vectors(scalars, known, m.order(), 1 + m.order() * m.order()));
       known.put(x.name(), v);
       if (span.add(v, m.matrices().size())) {
         basis.add(v);

@@ -17,11 +17,12 @@ import rankfall.Analysis;
 import rankfall.exact.Factorization;
 
 /**
- * Brute force over a finite field of small order: every point of F_p^m has the profile that its stratum
- * says modulo p, and no stratum where there is no algebra.
+ * Brute force over a finite field of small order: every point of F_p^m has the profile that its
+ * stratum says modulo p, and no stratum where there is no algebra.
  *
- * <p>A prime is of good reduction here if it is greater than 3 and divides no integer in the printed
- * equations and exclusions, nor numerator or denominator of the number before a factored determinant.
+ * <p>A prime is of good reduction here if it is greater than 3 and divides no integer in the
+ * printed equations and exclusions, nor numerator or denominator of the number before a factored
+ * determinant.
  */
 class PrimeFieldStrataTest {
 
@@ -134,7 +135,7 @@ class PrimeFieldStrataTest {
     return out;
   }
 
-  /** 26 = 1 + 25 vanishes modulo 13: the locus t^2 + 25 is not what modulo 5 it seems to be. */
+  /** Modulo 5 the irreducible locus t^2 + 5 is a double point. */
   @Test
   void aPrimeThatDividesACoefficientIsRefused() {
     Analysis.Findings findings =
@@ -154,7 +155,12 @@ class PrimeFieldStrataTest {
   void thePlainPathKnowsKnownAlgebras() {
     Analysed so3 =
         Analysed.text(
-            "family: so3\nparameters: [t]\nbrackets: |\n  [X, Y] = Z\n  [Y, Z] = t*X\n  [Z, X] = Y\n");
+            "family: so3\n"
+                + "parameters: [t]\n"
+                + "brackets: |\n"
+                + "  [X, Y] = Z\n"
+                + "  [Y, Z] = t*X\n"
+                + "  [Z, X] = Y\n");
     PlainProfile plain = new PlainProfile(so3.spec(), new Residues(7));
     assertEquals(Optional.of(new Profile(3, 3, 3, 0)), plain.at(List.of(1L)));
     assertEquals(Optional.of(new Profile(3, 1, 2, 0)), plain.at(List.of(0L)));

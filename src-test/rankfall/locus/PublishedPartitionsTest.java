@@ -51,10 +51,10 @@ class PublishedPartitionsTest {
   }
 
   /**
-   * Ellis and MacCallum 1969: Behr's form with a symmetric matrix n and a vector a, n a = 0. Class A with
-   * invertible n is VIII and IX; III is where the cofactors of n are -a_i a_j, VII_1 where they are
-   * +a_i a_j (h = a^2 / (n_2 n_3) in the frame where n is diagonal), II and I have a = 0 and n of rank 1
-   * and 0, the others are one stratum.
+   * Ellis and MacCallum 1969: Behr's form with a symmetric matrix n and a vector a, n a = 0. Class
+   * A with invertible n is VIII and IX; III is where the cofactors of n are -a_i a_j, VII_1 where
+   * they are +a_i a_j (h = a^2 / (n_2 n_3) in the frame where n is diagonal), II and I have a = 0
+   * and n of rank 1 and 0, the others are one stratum.
    */
   @Test
   void bianchiTypesInNineParameters() {
@@ -81,9 +81,9 @@ class PublishedPartitionsTest {
   }
 
   /**
-   * Bacry and Levy-Leblond 1968: de Sitter; Poincare and its dual; Newton and Hooke; Carroll; Galilei and
-   * its dual; static. The profiles follow from the brackets: J, P, K are always derived, H is where m is
-   * not 0; H is central where a = b = 0; K(H, H) = 6 a b.
+   * Bacry and Levy-Leblond 1968: de Sitter; Poincare and its dual; Newton and Hooke; Carroll;
+   * Galilei and its dual; static. The profiles follow from the brackets: J, P, K are always
+   * derived, H is where m is not 0; H is central where a = b = 0; K(H, H) = 6 a b.
    */
   @Test
   void kinematicalAlgebras() {
@@ -125,8 +125,9 @@ class PublishedPartitionsTest {
   }
 
   /**
-   * Shelton, Taylor and Wecht 2005: the quadratic constraints of the fluxes, here f1 q1 = f2 q2 = h r.
-   * With f1 and f2 alone among the non-geometric ones gone the algebra is iso(3).
+   * Shelton, Taylor and Wecht 2005: the quadratic constraints of the fluxes, here f1 q1 = f2 q2 = h
+   * r. Without the
+   * non-geometric fluxes q1, q2 and r the general algebra is iso(3).
    */
   @Test
   void quadraticConstraintsOfSixFluxes() {
@@ -239,7 +240,9 @@ class PublishedPartitionsTest {
   private static void sameZeros(Analysed family, Analysis.Stratum s, List<Polynomial> expected) {
     GroebnerBasis bases = new GroebnerBasis(family.constants());
     assertEquals(
-        s.equations(), bases.reduced(joined(s.equations(), expected)), "does not hold on " + s.name());
+        s.equations(),
+        bases.reduced(joined(s.equations(), expected)),
+        "does not hold on " + s.name());
     for (Polynomial p : s.equations()) {
       assertTrue(bases.radicalContains(expected, p), p + " of " + s.name() + " holds on less");
     }

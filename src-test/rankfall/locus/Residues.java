@@ -6,7 +6,8 @@ import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
 
 /**
- * Plain linear algebra over the integers modulo a prime, written apart from the program's elimination.
+ * Plain linear algebra over the integers modulo a prime, written apart from the program's
+ * elimination.
  *
  * @param prime below 2^31
  */

@@ -8,7 +8,9 @@ import org.junit.jupiter.api.Test;
 import rankfall.Analysis;
 import rankfall.Analysis.RealPoints;
 
-/** Families at which a partition by hand, or by sampling, goes wrong; no source where none is named. */
+/**
+ * Families at which a partition by hand, or by sampling, goes wrong; no source where none is named.
+ */
 class TrapsTest {
 
   private static List<String> exclusions(Analysis.Stratum s) {
@@ -20,15 +22,14 @@ class TrapsTest {
   }
 
   /**
-   * With all entries non-zero the rotors close on a*d*e = b*c*f only; where generators vanish the span
-   * is smaller and closes off that hypersurface or not, as it comes: at a = b = 0 with the others not 0
-   * it does not.
+   * With all entries non-zero the rotors close on a*d*e = b*c*f only; where generators vanish the
+   * span is smaller and closes off that hypersurface or not, as it comes: at a = b = 0 with the
+   * others not 0 it does not.
    */
   @Test
   void pointsOfDependenceCloseThoughTheirNeighboursDoNot() {
     Analysed rotors = Analysed.published("stretched-rotors-vanishing");
-    assertEquals(
-        "a*d*e - b*c*f", Analysed.text(rotors.with(3, 3, 3, 0).equations()));
+    assertEquals("a*d*e - b*c*f", Analysed.text(rotors.with(3, 3, 3, 0).equations()));
     assertEquals(6, rotors.all(3, 1, 2, 0).size());
     assertEquals(6, rotors.all(3, 0, 1, 1).size());
     assertEquals(6, rotors.all(2, 0, 0, 2).size());
@@ -143,7 +144,10 @@ class TrapsTest {
         realPoints(family));
   }
 
-  /** The Killing form is degenerate throughout, of one rank; derived algebra or centre alone changes. */
+  /**
+   * The Killing form is degenerate throughout, of one rank; derived algebra or centre alone
+   * changes.
+   */
   @Test
   void strataOfOneRank() {
     assertEquals(

@@ -10,7 +10,10 @@ import rankfall.Analysis;
 import rankfall.exact.Polynomial;
 import rankfall.exact.Term;
 
-/** In which strata of a family a point modulo a prime lies, by printed equations and exclusions alone. */
+/**
+ * In which strata of a family a point modulo a prime lies, by printed equations and exclusions
+ * alone.
+ */
 final class Whereabouts {
   private final List<Analysis.Stratum> strata;
   private final Residues field;
@@ -58,8 +61,8 @@ final class Whereabouts {
   }
 
   /**
-   * The largest absolute value that a printed polynomial takes, multiplied by its denominator, where
-   * numerators and denominators are at most 2.
+   * The largest absolute value that a printed polynomial takes, multiplied by its denominator,
+   * where numerators and denominators are at most 2.
    */
   static BigInteger bound(List<Analysis.Stratum> strata) {
     return polynomials(strata)
