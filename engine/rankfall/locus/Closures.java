@@ -12,9 +12,9 @@ import rankfall.exact.Polynomial;
 /**
  * Inclusions between the closures of chains, and their prime ideals.
  *
- * <p>Most inclusions are told at the general point: if the rules of Z vanish at that of W and no initial
- * of Z does, W lies in the closure of Z. Only where an initial vanishes the ideal of Z is needed. Ideals
- * are remembered; one object serves one family on one thread.
+ * <p>Most inclusions are told at the general point: if the rules of Z vanish at that of W and no
+ * initial of Z does, W lies in the closure of Z. Only where an initial vanishes the ideal of Z is
+ * needed. Ideals are remembered; one object serves one family on one thread.
  */
 final class Closures {
   private final GroebnerBasis bases;
@@ -37,8 +37,7 @@ final class Closures {
     if (!z.rules().stream().allMatch(r -> w.vanishes(r.equation()))) {
       return false;
     }
-    return z.initials().stream().noneMatch(w::vanishes)
-        || ideal(z).stream().allMatch(w::vanishes);
+    return z.initials().stream().noneMatch(w::vanishes) || ideal(z).stream().allMatch(w::vanishes);
   }
 
   /**
@@ -61,11 +60,25 @@ final class Closures {
     return out;
   }
 
+  /**
+   * Whether what two closures share visibly lies in a third: each of its equations is one of
+   * theirs.
+   *
+   * @param third a closure
+   * @param a a closure
+   * @param b a closure
+   * @return true only if it does; false tells nothing
+   */
+  boolean hold(Chain third, Chain a, Chain b) {
+    List<Polynomial> first = ideal(a);
+    List<Polynomial> second = ideal(b);
+    return ideal(third).stream().allMatch(p -> first.contains(p) || second.contains(p));
+  }
+
   /** The components of what two closures share. */
   List<Chain> intersection(Splitter splitter, Chain a, Chain b) {
     List<Polynomial> equations = new ArrayList<>(ideal(a));
     equations.addAll(ideal(b));
-    return maximal(
-        splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());
+    return maximal(splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());
   }
 }

@@ -10,7 +10,8 @@ import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
 
 /**
- * The strata, canonical: the irreducible components of the closures of the level sets of the profile.
+ * The strata, canonical: the irreducible components of the closures of the level sets of the
+ * profile.
  *
  * <p>Which leaves a computation happened to find does not matter: the closures of the leaves of one
  * profile have the same maximal members, whatever the leaves.
@@ -49,8 +50,8 @@ public final class Strata {
    * The strata and how they lie.
    *
    * @param strata by descending profile, then by text of the equations
-   * @param components the positions of those strata whose closures are the irreducible components of
-   *     the parameter variety
+   * @param components the positions of those strata whose closures are the irreducible components
+   *     of the parameter variety
    * @param coverings pairs (lower, upper) of positions: lower lies in the closure of upper, and no
    *     stratum's closure between
    */
@@ -65,8 +66,7 @@ public final class Strata {
    * @param poles irreducible polynomials at whose zeros the family is not defined
    * @param meter ends the work early
    */
-  public static Result of(
-      Chain constants, List<Leaf> leaves, List<Polynomial> poles, Meter meter) {
+  public static Result of(Chain constants, List<Leaf> leaves, List<Polynomial> poles, Meter meter) {
     return new Strata(constants, poles, meter).assemble(leaves);
   }
 
@@ -110,7 +110,7 @@ public final class Strata {
     List<Chain> across = new ArrayList<>(earlier);
     levels.forEach(
         (p, chains) -> {
-          if (!p.equals(profile) && !profile.mayBeLimitOf(p)) {
+          if (!p.equals(profile) && p.mayBeLimitOf(profile)) {
             across.addAll(chains);
           }
         });
@@ -123,8 +123,9 @@ public final class Strata {
     for (Polynomial p : poles) {
       excluded.addAll(zerosInside(z, p));
     }
+    List<Chain> inside = closures.maximal(excluded);
     for (Chain w : across) {
-      if (!closures.isInside(w, z)) {
+      if (!closures.isInside(w, z) && inside.stream().noneMatch(e -> closures.hold(e, w, z))) {
         excluded.addAll(closures.intersection(splitter, w, z));
       }
     }
@@ -152,8 +153,7 @@ public final class Strata {
   }
 
   private List<Integer> components(List<Stratum> strata) {
-    List<Chain> maximal =
-        closures.maximal(strata.stream().map(Stratum::closure).toList());
+    List<Chain> maximal = closures.maximal(strata.stream().map(Stratum::closure).toList());
     List<Integer> out = new ArrayList<>();
     for (int k = 0; k < strata.size(); k++) {
       if (maximal.contains(strata.get(k).closure())) {
@@ -168,8 +168,7 @@ public final class Strata {
     boolean[][] below = new boolean[n][n];
     for (int i = 0; i < n; i++) {
       for (int j = 0; j < n; j++) {
-        below[i][j] =
-            i != j && closures.isInside(strata.get(i).closure(), strata.get(j).closure());
+        below[i][j] = i != j && closures.isInside(strata.get(i).closure(), strata.get(j).closure());
       }
     }
     List<List<Integer>> out = new ArrayList<>();

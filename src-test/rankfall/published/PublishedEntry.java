@@ -23,7 +23,7 @@ import java.util.SortedMap;
  * @param strata all strata
  * @param loci equations of the points with a closed span, or with Jacobi's identity, by key
  */
-record PublishedEntry(
+public record PublishedEntry(
     String id,
     String source,
     int tier,
@@ -51,7 +51,7 @@ record PublishedEntry(
    *
    * @return the number, at least 1 for an entry that says anything
    */
-  int values() {
+  public int values() {
     return points.stream().mapToInt(Point::values).sum()
         + killing.map(m -> Math.max(1, m.size())).orElse(0)
         + restricted.map(m -> Math.max(1, m.size())).orElse(0)
@@ -71,20 +71,20 @@ record PublishedEntry(
    * @param world a name the source gives to the algebra at the point
    * @param fault why there is no algebra at the point; then there are no facts
    */
-  record Point(
+  public record Point(
       SortedMap<String, String> at,
       SortedMap<String, String> facts,
       Optional<String> world,
       Optional<Fault> fault) {
 
-    int values() {
+    public int values() {
       return (int) facts.keySet().stream().filter(k -> !k.equals("typeAliases")).count()
           + (fault.isPresent() ? 1 : 0);
     }
   }
 
   /** Why there is no algebra at a point. */
-  enum Fault {
+  public enum Fault {
     /** The span is not closed under the bracket, or Jacobi's identity fails. */
     CLOSURE,
     /** The point does not satisfy the relations of the spec. */
@@ -96,8 +96,8 @@ record PublishedEntry(
   }
 
   /** A place in a symmetric matrix, from 1, {@code row <= column}. */
-  record Cell(int row, int column) implements Comparable<Cell> {
-    Cell {
+  public record Cell(int row, int column) implements Comparable<Cell> {
+    public Cell {
       if (row < 1 || column < row) {
         throw new IllegalArgumentException("not in the upper triangle: " + row + " " + column);
       }
@@ -117,7 +117,7 @@ record PublishedEntry(
   }
 
   /** An irreducible factor of the determinant, as printed, with its multiplicity. */
-  record Condition(String polynomial, int multiplicity) {}
+  public record Condition(String polynomial, int multiplicity) {}
 
   /**
    * A stratum.
@@ -126,8 +126,8 @@ record PublishedEntry(
    * @param profile dimension, rank of the Killing form, dimensions of the derived algebra and
    *     centre
    */
-  record Stratum(String equations, List<Integer> profile) {
-    Stratum {
+  public record Stratum(String equations, List<Integer> profile) {
+    public Stratum {
       profile = List.copyOf(profile);
     }
   }

@@ -23,7 +23,7 @@ import rankfall.published.PublishedEntry.Point;
 import rankfall.published.PublishedEntry.Stratum;
 
 /** Reads the data files beside this class; an unknown key is a fault of the file, never skipped. */
-final class PublishedTables {
+public final class PublishedTables {
   /** The data files, without ending, in the order in which they are read. */
   static final List<String> FILES =
       List.of(
@@ -88,7 +88,7 @@ final class PublishedTables {
    *
    * @return in the order of {@link #FILES} and of the text
    */
-  static List<PublishedEntry> all() {
+  public static List<PublishedEntry> all() {
     return FILES.stream().flatMap(f -> read(f).stream()).toList();
   }
 
