@@ -3,9 +3,11 @@ package rankfall.cli;
 import java.io.IOException;
 import java.io.Reader;
 import java.nio.file.Path;
+import java.util.Collection;
+import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
-import java.util.function.Consumer;
+import java.util.Optional;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis;
 import rankfall.Budget;
@@ -45,18 +47,28 @@ interface FrontDoors {
     /** What stands before the first answer: the header row of a table, else nothing. */
     String head();
 
+    /**
+     * Why values under some names determine no point.
+     *
+     * @param names of the values given
+     * @return one line for the user; empty if they determine a point
+     */
+    Optional<String> misfit(Collection<String> names);
+
     /** The answer at one point. */
     Answer at(Map<String, BigFraction> point);
 
     /**
      * Answers each row of a table whose header names the parameters.
      *
-     * @param table the text of the table
-     * @param out takes the answers one by one, in the order of the rows; a row that cannot be read
-     *     gets an answer that says so
-     * @throws IOException if the table cannot be read on
+     * @param table the text of the table; its header is read at once, each row when its answer is
+     *     asked for
+     * @return the answers in the order of the rows; a row that cannot be read gets an answer that
+     *     says so; throws {@link java.io.UncheckedIOException} if the table cannot be read on
+     * @throws IOException if the table cannot be read
+     * @throws IllegalArgumentException if the header does not fit; the message is for the user
      */
-    void atEach(Reader table, Consumer<Answer> out) throws IOException;
+    Iterator<Answer> atEach(Reader table) throws IOException;
   }
 
   /**

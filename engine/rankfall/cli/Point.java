@@ -9,11 +9,11 @@ import java.nio.charset.StandardCharsets;
 import java.nio.file.Files;
 import java.nio.file.NoSuchFileException;
 import java.nio.file.Path;
+import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.concurrent.Callable;
-import java.util.concurrent.atomic.AtomicBoolean;
 import org.apache.commons.numbers.fraction.BigFraction;
 import picocli.CommandLine;
 import picocli.CommandLine.Command;
@@ -43,7 +43,8 @@ final class Point implements Callable<Integer> {
       index = "1..*",
       arity = "0..*",
       paramLabel = "NAME=VALUE",
-      description = "An exact value for each parameter, such as a=1 b=-3/2 c=0.25.")
+      description =
+          "An exact value for each parameter, such as a=1 b=-3/2 c=0.25, or \"cos(t)=3/5\".")
   private List<String> values = List.of();
 
   @Option(
@@ -116,23 +117,38 @@ final class Point implements Callable<Integer> {
   private boolean rows(Spec spec, String name, PrintWriter out) throws IOException, SpecException {
     try (Reader table = open(name)) {
       PointAnswers answers = doors.points(spec, pointForm());
+      Iterator<Answer> rows = rows(answers, table);
       out.print(answers.head());
-      AtomicBoolean good = new AtomicBoolean(true);
-      answers.atEach(table, answer -> good.compareAndSet(true, print(answer, out)));
-      return good.get();
+      boolean good = true;
+      while (rows.hasNext()) {
+        good &= print(rows.next(), out);
+      }
+      return good;
+    }
+  }
+
+  private Iterator<Answer> rows(PointAnswers answers, Reader table) throws IOException {
+    try {
+      return answers.atEach(table);
+    } catch (IllegalArgumentException e) {
+      throw new ParameterException(self.commandLine(), e.getMessage(), e);
     }
   }
 
   private boolean single(Spec spec, PrintWriter out) throws SpecException {
-    Map<String, BigFraction> point = assigned(spec);
+    Map<String, BigFraction> point = assigned();
     PointAnswers answers = doors.points(spec, pointForm());
+    Optional<String> misfit = answers.misfit(point.keySet());
+    if (misfit.isPresent()) {
+      throw wrongCall(misfit.get());
+    }
     out.print(answers.head());
     return print(answers.at(point), out);
   }
 
-  private Map<String, BigFraction> assigned(Spec spec) {
+  private Map<String, BigFraction> assigned() {
     try {
-      return Assignments.of(values, spec.parameters());
+      return Assignments.of(values);
     } catch (IllegalArgumentException e) {
       throw new ParameterException(self.commandLine(), e.getMessage(), e);
     }

@@ -7,6 +7,11 @@ import java.util.List;
 import rankfall.Analysis;
 import rankfall.Budget;
 import rankfall.Engine;
+import rankfall.Points;
+import rankfall.report.PointCsv;
+import rankfall.report.PointJson;
+import rankfall.report.PointText;
+import rankfall.report.PointWriter;
 import rankfall.report.ReportWriter;
 import rankfall.report.SummaryRow;
 import rankfall.spec.Diagnostic;
@@ -44,8 +49,17 @@ final class Program implements FrontDoors {
   }
 
   @Override
-  public PointAnswers points(Spec spec, PointForm form) {
-    throw absent("Engine");
+  public PointAnswers points(Spec spec, PointForm form) throws SpecException {
+    Points points = Points.of(spec);
+    return new ProgramPoints(points, writer(points, form));
+  }
+
+  private static PointWriter writer(Points points, PointForm form) {
+    return switch (form) {
+      case TEXT -> new PointText();
+      case JSON -> new PointJson();
+      case CSV -> new PointCsv(points.names());
+    };
   }
 
   private static SummaryRow row(Outcome outcome) {
@@ -56,9 +70,5 @@ final class Program implements FrontDoors {
     Diagnostic first = faulty.diagnostics().get(0);
     return SummaryRow.failed(
         faulty.family().orElseGet(() -> first.place().file()), first.headline());
-  }
-
-  private static IllegalStateException absent(String room) {
-    return new IllegalStateException(room + " is not joined to the command line");
   }
 }

@@ -2,7 +2,6 @@ package rankfall.exact;
 
 import java.util.ArrayList;
 import java.util.List;
-import java.util.stream.Collectors;
 
 /**
  * An irreducible set of points, given at its general point by a triangular set of equations (a chain
@@ -187,19 +186,8 @@ public record Chain(Variables variables, List<Rule> rules) implements Domain<Pol
   }
 
   private Polynomial commonFactor(List<Polynomial> entries) {
-    Polynomial g = zero();
-    List<Polynomial> byLength =
-        entries.stream()
-            .filter(p -> !p.isZero())
-            .sorted(java.util.Comparator.comparingInt(Polynomial::termCount))
-            .collect(Collectors.toList());
-    for (Polynomial p : byLength) {
-      g = g.gcd(p);
-      if (g.isOne()) {
-        return g;
-      }
-    }
-    return g;
+    List<Polynomial> some = entries.stream().filter(p -> !p.isZero()).toList();
+    return some.isEmpty() ? zero() : CommonFactor.of(some);
   }
 
   @Override

@@ -34,6 +34,7 @@ public final class Elimination<E> {
   /** A row on its way; mutable, never handed out. */
   private static final class Row<E> {
     SortedMap<Integer, E> entries;
+    SortedMap<Integer, Integer> weights = new TreeMap<>();
     final List<E> contents = new ArrayList<>();
     int pivot = -1;
 
@@ -106,12 +107,12 @@ public final class Elimination<E> {
     Row<E> best = null;
     long bestCost = Long.MAX_VALUE;
     for (Row<E> row : open) {
-      SortedMap<Integer, E> candidates =
+      SortedMap<Integer, Integer> candidates =
           inOrder
-              ? row.entries.subMap(column, column + 1)
-              : row.entries.headMap(pivotColumns);
+              ? row.weights.subMap(column, column + 1)
+              : row.weights.headMap(pivotColumns);
       for (var e : candidates.entrySet()) {
-        long cost = 1000L * domain.weight(e.getValue()) + row.entries.size();
+        long cost = 1000L * e.getValue() + row.entries.size();
         if (cost < bestCost) {
           bestCost = cost;
           best = row;
@@ -147,6 +148,8 @@ public final class Elimination<E> {
       }
     }
     row.entries = out;
+    row.weights = new TreeMap<>();
+    out.headMap(pivotColumns).forEach((k, v) -> row.weights.put(k, domain.weight(v)));
     if (!out.isEmpty()) {
       row.contents.add(n.content());
     }

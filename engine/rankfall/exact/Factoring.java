@@ -56,7 +56,7 @@ public final class Factoring {
       }
     }
     Factorization others =
-        rest.termCount() > LONG ? throughSquareFreePart(rest) : directly(rest);
+        rest.termCount() > LONG ? ofLong(rest) : directly(rest);
     powers.addAll(others.factors());
     powers.sort(BY_SIZE);
     return new Factorization(others.unit(), powers);
@@ -101,7 +101,22 @@ public final class Factoring {
         .primitive();
   }
 
+  private static Factorization ofLong(Polynomial f) {
+    PolynomialRoot.Power power = PolynomialRoot.power(f.primitive());
+    if (power.exponent() == 1) {
+      return throughSquareFreePart(f);
+    }
+    return checked(
+        f,
+        ofLong(power.base()).factors().stream()
+            .map(x -> new Factor(x.base(), x.multiplicity() * power.exponent()))
+            .toList());
+  }
+
   private static Factorization throughSquareFreePart(Polynomial f) {
+    if (f.termCount() <= LONG) {
+      return directly(f);
+    }
     Polynomial part = squareFreePart(f);
     if (part.equals(f.primitive())) {
       return directly(f);

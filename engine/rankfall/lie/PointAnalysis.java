@@ -7,6 +7,8 @@ import rankfall.exact.Domain;
 
 /** What is said about an algebra whose structure constants are exact numbers. */
 public final class PointAnalysis {
+  private static final long CHECK_SEED = 41;
+
   private PointAnalysis() {}
 
   /**
@@ -41,13 +43,13 @@ public final class PointAnalysis {
       NumberText<E> text) {
     LieBracket<E> bracket = LieBracket.of(constants);
     AlgebraFacts<E> facts = AlgebraFacts.of(bracket);
+    hold(new FormCheck<>(bracket, facts.killing()));
     InvariantForms<E> forms = InvariantForms.of(bracket);
     PointFacts.Killing killing = killing(constants, facts, signs, text);
     int n = facts.dimension();
     return new PointFacts(
         generators,
         n,
-        true,
         killing,
         facts.derivedSeries().dimensions(),
         facts.lowerCentralSeries().dimensions(),
@@ -61,9 +63,7 @@ public final class PointAnalysis {
         facts.solvable(),
         facts.semisimple(),
         facts.reductive(),
-        n > 0 && killing.signature().map(s -> s.minus() == n).orElse(false),
-        Optional.empty(),
-        Optional.empty());
+        n > 0 && killing.signature().map(s -> s.minus() == n).orElse(false));
   }
 
   private static <E> PointFacts.Killing killing(
@@ -100,6 +100,17 @@ public final class PointAnalysis {
       out.add(row);
     }
     return out;
+  }
+
+  /** The Killing matrix against the laws, on elements of the algebra. */
+  private static void hold(FormCheck<?> check) {
+    check
+        .all(CHECK_SEED)
+        .ifPresent(
+            m -> {
+              throw new IllegalStateException(
+                  "the Killing form breaks " + m.law() + ": " + m.left() + " and " + m.right());
+            });
   }
 
   private static void agree(Signature signature, int rank) {

@@ -8,7 +8,6 @@ import java.util.Optional;
  *
  * @param generators the number of listed generators
  * @param dimension the dimension of the algebra
- * @param closed whether the generators span an algebra; always true where the facts exist
  * @param killing the Killing form in the given basis
  * @param derivedSeries dimensions, each once
  * @param lowerCentralSeries dimensions, each once
@@ -23,13 +22,10 @@ import java.util.Optional;
  * @param semisimple whether n is positive and the Killing form non-degenerate
  * @param reductive whether the radical is the centre
  * @param compact whether the algebra is real, n positive and the Killing form negative definite
- * @param stratum the name of the stratum the point lies in, where strata are known
- * @param type the name of the algebra, where it is known
  */
 public record PointFacts(
     int generators,
     int dimension,
-    boolean closed,
     Killing killing,
     List<Integer> derivedSeries,
     List<Integer> lowerCentralSeries,
@@ -43,37 +39,11 @@ public record PointFacts(
     boolean solvable,
     boolean semisimple,
     boolean reductive,
-    boolean compact,
-    Optional<String> stratum,
-    Optional<String> type) {
+    boolean compact) {
   /** Copies the lists. */
   public PointFacts {
     derivedSeries = List.copyOf(derivedSeries);
     lowerCentralSeries = List.copyOf(lowerCentralSeries);
-  }
-
-  /** The same facts with the names that only the whole family can give. */
-  public PointFacts withNames(Optional<String> inStratum, Optional<String> ofType) {
-    return new PointFacts(
-        generators,
-        dimension,
-        closed,
-        killing,
-        derivedSeries,
-        lowerCentralSeries,
-        centre,
-        radical,
-        nilradical,
-        unimodular,
-        invariantForms,
-        abelian,
-        nilpotent,
-        solvable,
-        semisimple,
-        reductive,
-        compact,
-        inStratum,
-        ofType);
   }
 
   /**

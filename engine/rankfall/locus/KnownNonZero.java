@@ -73,12 +73,18 @@ record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Domain<Pol
   /** The weight of what is left when the factors that cannot vanish are taken out. */
   @Override
   public int weight(Polynomial a) {
+    if (a.isConstant()) {
+      return 0;
+    }
+    if (a.termCount() == 1) {
+      return a.support().stream().filter(v -> !isKnown(v)).mapToInt(a::degree).sum();
+    }
     Polynomial rest = a;
     for (Polynomial p : nonZero) {
       if (rest.isConstant()) {
         return 0;
       }
-      if (p.support().stream().allMatch(rest::contains)) {
+      if (p.totalDegree() <= rest.totalDegree() && p.support().stream().allMatch(rest::contains)) {
         for (var q = rest.dividedBy(p); q.isPresent() && !rest.isConstant(); ) {
           rest = q.get();
           q = rest.dividedBy(p);
@@ -86,5 +92,10 @@ record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Domain<Pol
       }
     }
     return chain.weight(rest);
+  }
+
+  private boolean isKnown(int variable) {
+    return nonZero.stream()
+        .anyMatch(p -> p.termCount() == 1 && p.totalDegree() == 1 && p.contains(variable));
   }
 }

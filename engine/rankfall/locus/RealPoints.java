@@ -2,6 +2,7 @@ package rankfall.locus;
 
 import java.util.ArrayList;
 import java.util.List;
+import java.util.Optional;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.AlgebraicNumber;
 import rankfall.exact.Chain;
@@ -24,12 +25,24 @@ public final class RealPoints {
 
   /** Whether the closure of a chain has a real point within the domain. */
   public RealZeros.Answer onClosure(Chain chain) {
-    return ask(closures.ideal(chain), List.of());
+    return SimplePoint.in(family, new Piece(chain, List.of()))
+        .map(
+            p ->
+                new RealZeros.Answer(
+                    RealZeros.Verdict.YES, p.stream().map(AlgebraicNumber::of).toList()))
+        .orElseGet(() -> ask(closures.ideal(chain), List.of()));
   }
 
   /** Whether a stratum has a real point within the domain: one of its leaves has. */
   public RealZeros.Answer on(Strata.Stratum stratum) {
     boolean unknown = false;
+    for (Leaf.Defined leaf : stratum.leaves()) {
+      Optional<List<BigFraction>> point = SimplePoint.in(family, leaf.piece());
+      if (point.isPresent()) {
+        return new RealZeros.Answer(
+            RealZeros.Verdict.YES, point.get().stream().map(AlgebraicNumber::of).toList());
+      }
+    }
     for (Leaf.Defined leaf : stratum.leaves()) {
       Chain chain = leaf.piece().chain();
       List<Polynomial> equations =

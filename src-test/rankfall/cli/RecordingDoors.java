@@ -1,15 +1,16 @@
 package rankfall.cli;
 
 import java.io.BufferedReader;
-import java.io.IOException;
 import java.io.Reader;
 import java.nio.file.Path;
 import java.util.ArrayList;
+import java.util.Collection;
 import java.util.Collections;
+import java.util.Iterator;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
-import java.util.function.Consumer;
+import java.util.Set;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis;
 import rankfall.Budget;
@@ -67,12 +68,20 @@ final class RecordingDoors implements FrontDoors {
       }
 
       @Override
-      public void atEach(Reader table, Consumer<Answer> out) throws IOException {
-        BufferedReader rows = new BufferedReader(table);
-        for (String row = rows.readLine(); row != null; row = rows.readLine()) {
-          boolean good = !row.equals("x");
-          out.accept(new Answer((good ? row : "error") + "\n", good));
-        }
+      public Optional<String> misfit(Collection<String> names) {
+        return Set.copyOf(names).equals(Set.copyOf(spec.parameters()))
+            ? Optional.empty()
+            : Optional.of("want " + spec.parameters());
+      }
+
+      @Override
+      public Iterator<Answer> atEach(Reader table) {
+        return new BufferedReader(table)
+            .lines()
+            .map(
+                row ->
+                    row.equals("x") ? new Answer("error\n", false) : new Answer(row + "\n", true))
+            .iterator();
       }
     };
   }

@@ -205,7 +205,6 @@ class PublishedFactsTest {
     assertEquals("-32/18225", f.killing().determinant());
     assertEquals(Optional.of(new Signature(2, 1, 0)), f.killing().signature());
     assertEquals(4, f.generators());
-    assertTrue(f.closed());
   }
 
   @Test
@@ -214,16 +213,6 @@ class PublishedFactsTest {
     assertEquals(Optional.empty(), f.killing().signature());
     assertFalse(f.compact());
     assertTrue(f.semisimple());
-  }
-
-  @Test
-  void namesAreAddedLater() {
-    PointFacts f = Samples.so3().facts();
-    assertEquals(Optional.empty(), f.type());
-    PointFacts named = f.withNames(Optional.of("S1"), Optional.of("so(3)"));
-    assertEquals(Optional.of("S1"), named.stratum());
-    assertEquals(Optional.of("so(3)"), named.type());
-    assertEquals(f.killing(), named.killing());
   }
 
   /** A wrong order of the numbers must not pass for a signature. */

@@ -47,7 +47,6 @@ final class PointReading {
     said.put("semisimple", Boolean.toString(facts.semisimple()));
     said.put("reductive", Boolean.toString(facts.reductive()));
     said.put("compact", Boolean.toString(facts.compact()));
-    facts.type().ifPresent(t -> said.put("type", t));
     return new ObservedPoint(said, Optional.empty());
   }
 

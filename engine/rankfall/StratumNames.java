@@ -1,0 +1,28 @@
+package rankfall;
+
+import java.util.Map;
+import java.util.Optional;
+import org.apache.commons.numbers.fraction.BigFraction;
+
+/** Knows in which stratum of its family a point lies. */
+@FunctionalInterface
+public interface StratumNames {
+  /** Knows no stratum. */
+  StratumNames NONE = point -> Optional.empty();
+
+  /**
+   * The stratum of a point.
+   *
+   * @param point a point of the family at which its span is an algebra, values by coordinate
+   * @return empty where no strata are known
+   */
+  Optional<Name> of(Map<String, BigFraction> point);
+
+  /**
+   * What a point is called.
+   *
+   * @param stratum the name of its stratum, such as {@code S1}
+   * @param type the name of the algebra, where known
+   */
+  record Name(String stratum, Optional<String> type) {}
+}
