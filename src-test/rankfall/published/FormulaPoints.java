@@ -83,6 +83,21 @@ final class FormulaPoints {
     return List.copyOf(numbers.values());
   }
 
+  /**
+   * The relations of an entry.
+   *
+   * @return differences of the two sides of each equation under {@code where}
+   */
+  static List<String> relations(PublishedEntry entry) {
+    return spec(entry).get("where") instanceof List<?> where
+        ? where.stream()
+            .map(Object::toString)
+            .filter(w -> w.matches("[^<>!=]*=[^<>!=]*"))
+            .map(w -> w.replace("=", "- (") + ")")
+            .toList()
+        : List.of();
+  }
+
   private static Map<?, ?> spec(PublishedEntry entry) {
     return (Map<?, ?>)
         new Load(LoadSettings.builder().setSchema(new FailsafeSchema()).build())

@@ -6,6 +6,7 @@ import java.util.Arrays;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeSet;
 import java.util.regex.Matcher;
@@ -25,15 +26,16 @@ import rankfall.published.Quantity.Root;
  * theorem of zeros).
  *
  * @param numbers the algebraic numbers of the family
+ * @param relations polynomials that vanish at every point of the family
  */
-record PublishedSets(List<Root> numbers) {
+record PublishedSets(List<Root> numbers, List<String> relations) {
   private static final Pattern NAME =
       Pattern.compile("\\p{L}[\\p{L}\\d_]*(\\([^()]*\\))?", Pattern.UNICODE_CHARACTER_CLASS);
   private static final Pattern FUNCTION =
       Pattern.compile("(cos|sin|cosh|sinh)\\(([^()]*)\\)");
 
   static PublishedSets of(PublishedEntry entry) {
-    return new PublishedSets(FormulaPoints.numbers(entry));
+    return new PublishedSets(FormulaPoints.numbers(entry), FormulaPoints.relations(entry));
   }
 
   /**
@@ -45,16 +47,16 @@ record PublishedSets(List<Root> numbers) {
    */
   List<String> strata(List<Stratum> due, List<Stratum> found) {
     List<Stratum> rest = new ArrayList<>(found);
+    List<Stratum> lone = new ArrayList<>(due);
+    lone.removeIf(rest::remove);
     List<String> differences = new ArrayList<>();
-    for (Stratum d : due) {
-      Stratum partner =
+    for (Stratum d : lone) {
+      Optional<Stratum> partner =
           rest.stream()
               .filter(f -> f.profile().equals(d.profile()) && same(d.equations(), f.equations()))
-              .findFirst()
-              .orElse(d);
-      if (!rest.remove(partner)) {
-        differences.add("stratum due " + d + ", not found");
-      }
+              .findFirst();
+      partner.ifPresentOrElse(
+          rest::remove, () -> differences.add("stratum due " + d + ", not found"));
     }
     rest.forEach(f -> differences.add("stratum found " + f + ", not due"));
     return differences;
@@ -88,7 +90,7 @@ record PublishedSets(List<Root> numbers) {
 
   private Ring ring(List<String> texts) {
     TreeSet<String> names = new TreeSet<>(numbers.stream().map(Root::name).toList());
-    for (String text : texts) {
+    for (String text : Stream.concat(texts.stream(), relations.stream()).toList()) {
       NAME.matcher(text).results().forEach(r -> names.add(r.group()));
     }
     for (String name : List.copyOf(names)) {
@@ -100,15 +102,16 @@ record PublishedSets(List<Root> numbers) {
       }
     }
     Variables variables = new Variables(List.copyOf(names));
-    return new Ring(variables, new GroebnerBasis(Chain.free(variables)), numbers);
+    return new Ring(variables, new GroebnerBasis(Chain.free(variables)), this);
   }
 
   /** Polynomials in the names that the compared texts hold. */
-  private record Ring(Variables variables, GroebnerBasis bases, List<Root> numbers) {
+  private record Ring(Variables variables, GroebnerBasis bases, PublishedSets sets) {
 
     boolean same(List<Polynomial> a, List<Polynomial> b) {
-      return a.stream().allMatch(p -> bases.radicalContains(b, p))
-          && b.stream().allMatch(p -> bases.radicalContains(a, p));
+      return bases.reduced(a).equals(bases.reduced(b))
+          || a.stream().allMatch(p -> bases.radicalContains(b, p))
+              && b.stream().allMatch(p -> bases.radicalContains(a, p));
     }
 
     /** The equations of a text, and those that the functions and algebraic numbers satisfy. */
@@ -121,7 +124,8 @@ record PublishedSets(List<Root> numbers) {
           out.add(polynomial(name + "^2 " + sign + " " + name.replace("cos", "sin") + "^2 - 1"));
         }
       }
-      for (Root root : numbers) {
+      sets.relations().stream().map(this::polynomial).forEach(out::add);
+      for (Root root : sets.numbers()) {
         Quantity x = Quantity.of(new Root(root.name(), List.of()));
         Quantity minimal = x.power(root.power().size());
         for (int k = 0; k < root.power().size(); k++) {
