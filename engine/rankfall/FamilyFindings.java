@@ -3,6 +3,7 @@ package rankfall;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
+import java.util.function.Supplier;
 import java.util.stream.Collectors;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Covering;
@@ -10,6 +11,7 @@ import rankfall.Analysis.Findings;
 import rankfall.Analysis.Origin;
 import rankfall.Analysis.Relation;
 import rankfall.Analysis.Status;
+import rankfall.Analysis.Stratum;
 import rankfall.exact.ChainFactoring;
 import rankfall.exact.Polynomial;
 import rankfall.lie.Family;
@@ -29,8 +31,17 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
       return failed(nothingLeft());
     }
     List<String> undecided = new ArrayList<>(openPieces());
-    List<Component> components = new ComponentFindings(spec, family, partition, meter).all();
     Optional<Strata.Result> strata = partition.strata();
+    List<Component> components =
+        inBudget(
+            "the components and their conditions",
+            () -> new ComponentFindings(spec, family, partition, meter).all(),
+            undecided);
+    List<Stratum> described =
+        inBudget(
+            "the strata",
+            () -> strata.map(s -> new StratumFindings(family, s, meter).all()).orElse(List.of()),
+            undecided);
     Findings findings =
         new Findings(
             family.names(),
@@ -38,8 +49,10 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             relations(),
             family.poles(),
             components,
-            strata.map(s -> new StratumFindings(family, s, meter).all()).orElse(List.of()),
-            strata.map(FamilyFindings::coverings).orElse(List.of()),
+            described,
+            described.isEmpty()
+                ? List.of()
+                : strata.map(FamilyFindings::coverings).orElse(List.of()),
             List.of());
     return new Analysis(
         spec,
@@ -49,6 +62,17 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
+  }
+
+  /** A list, or nothing and a word about it if the budget ends before. */
+  private static <T> List<T> inBudget(
+      String what, Supplier<List<T>> step, List<String> undecided) {
+    try {
+      return step.get();
+    } catch (Meter.Exhausted e) {
+      undecided.add("not decided (" + e.getMessage() + "): " + what);
+      return List.of();
+    }
   }
 
   private Analysis failed(String message) {

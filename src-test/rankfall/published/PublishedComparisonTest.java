@@ -75,7 +75,11 @@ class PublishedComparisonTest {
             "-72*b^4 + 48*b^2 - 8",
             List.of(new Condition("3*b^2 - 1", 2)),
             new TreeMap<>(),
-            Optional.empty());
+            Optional.empty(),
+            List.of(
+                new Stratum("-6*b^2 + 2", List.of(3, 1, 2, 0)),
+                new Stratum("b - b", List.of(3, 3, 3, 0))),
+            List.of("0"));
     assertEquals(List.of(), PublishedComparison.family(entry, found));
   }
 
