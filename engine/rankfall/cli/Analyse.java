@@ -52,7 +52,9 @@ final class Analyse implements Callable<Integer> {
       description = "Time for each family, such as 60s, 5m, 1h (default: ${DEFAULT-VALUE}).")
   private Duration time;
 
-  @Mixin private CommonOptions common;
+  @SuppressWarnings("UnusedVariable") // declares options
+  @Mixin
+  private CommonOptions common;
 
   @picocli.CommandLine.Spec private CommandSpec self;
 

@@ -110,8 +110,8 @@ record PublishedSets(List<Root> numbers, List<String> relations) {
 
     boolean same(List<Polynomial> a, List<Polynomial> b) {
       return bases.reduced(a).equals(bases.reduced(b))
-          || a.stream().allMatch(p -> bases.radicalContains(b, p))
-              && b.stream().allMatch(p -> bases.radicalContains(a, p));
+          || (a.stream().allMatch(p -> bases.radicalContains(b, p))
+              && b.stream().allMatch(p -> bases.radicalContains(a, p)));
     }
 
     /** The equations of a text, and those that the functions and algebraic numbers satisfy. */
