@@ -58,7 +58,9 @@ final class Analyse implements Callable<Integer> {
       description = "How many cases of each family are looked at (default: ${DEFAULT-VALUE}).")
   private int branches = Budget.DEFAULT.branches();
 
-  @Mixin private CommonOptions common;
+  @SuppressWarnings("UnusedVariable") // declares options
+  @Mixin
+  private CommonOptions common;
 
   @picocli.CommandLine.Spec private CommandSpec self;
 

@@ -29,7 +29,9 @@ final class Check implements Callable<Integer> {
       description = "Prints the JSON schema of the spec format, for an editor, and reads nothing.")
   private boolean schema;
 
-  @Mixin private CommonOptions common;
+  @SuppressWarnings("UnusedVariable") // declares options
+  @Mixin
+  private CommonOptions common;
 
   @CommandLine.Spec private CommandSpec self;
 

@@ -20,11 +20,13 @@ final class CommonOptions {
       names = {"-h", "--help"},
       usageHelp = true,
       description = "Prints this help.")
+  @SuppressWarnings("UnusedVariable") // read by the command line
   private boolean help;
 
   @Option(
       names = {"-V", "--version"},
       versionHelp = true,
       description = "Prints the version.")
+  @SuppressWarnings("UnusedVariable") // read by the command line
   private boolean version;
 }

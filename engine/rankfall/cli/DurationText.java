@@ -10,9 +10,13 @@ import picocli.CommandLine.TypeConversionException;
 
 /** Reads a length of time such as {@code 60s}, {@code 5m} or {@code 1h}. */
 final class DurationText implements ITypeConverter<Duration> {
-  private static final Pattern FORM = Pattern.compile("([0-9]{1,6})([smh])");
+  private static final Pattern FORM = Pattern.compile("([0-9]{1,6})(ms|[smh])");
   private static final Map<String, ChronoUnit> UNITS =
-      Map.of("s", ChronoUnit.SECONDS, "m", ChronoUnit.MINUTES, "h", ChronoUnit.HOURS);
+      Map.of(
+          "ms", ChronoUnit.MILLIS,
+          "s", ChronoUnit.SECONDS,
+          "m", ChronoUnit.MINUTES,
+          "h", ChronoUnit.HOURS);
 
   @Override
   public Duration convert(String text) {

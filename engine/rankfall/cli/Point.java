@@ -65,7 +65,9 @@ final class Point implements Callable<Integer> {
   @Option(names = "--csv", description = "One CSV row a point.")
   private boolean csv;
 
-  @Mixin private CommonOptions common;
+  @SuppressWarnings("UnusedVariable") // declares options
+  @Mixin
+  private CommonOptions common;
 
   @CommandLine.Spec private CommandSpec self;
 

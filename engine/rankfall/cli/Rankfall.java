@@ -16,7 +16,9 @@ import picocli.CommandLine.ParameterException;
     synopsisSubcommandLabel = "VERB",
     commandListHeading = "%nVerbs:%n")
 public final class Rankfall implements Runnable {
-  @Mixin private CommonOptions common;
+  @SuppressWarnings("UnusedVariable") // declares options
+  @Mixin
+  private CommonOptions common;
 
   @CommandLine.Spec private CommandSpec self;
 

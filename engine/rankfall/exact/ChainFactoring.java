@@ -88,7 +88,8 @@ public final class ChainFactoring {
       unit = unit.divide(BigFraction.of(x.base().leadingCoefficient()).pow(x.multiplicity()));
     }
     Polynomial leading = leading(g);
-    BigInteger content = leading.content();
+    BigInteger size = leading.content();
+    BigInteger content = leading.leadingCoefficient().signum() < 0 ? size.negate() : size;
     Polynomial number = leading.over(Polynomial.constant(g.variables(), content));
     unit = unit.multiply(content);
     if (number.isConstant()) {

@@ -39,7 +39,7 @@ record KnownSigns(Map<Integer, Integer> signs) {
     int sign = 0;
     for (Term t : f.terms()) {
       int s = sign(t);
-      if (s == 0 || sign != 0 && s != sign) {
+      if (s == 0 || (sign != 0 && s != sign)) {
         return Optional.empty();
       }
       sign = s;

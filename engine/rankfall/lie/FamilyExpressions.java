@@ -133,7 +133,7 @@ record FamilyExpressions(
 
   private FamilyValue sum(FamilyValue a, FamilyValue b, Place place) {
     boolean mixed =
-        !a.isNumber() && !b.number().isZero() || !b.isNumber() && !a.number().isZero();
+        (!a.isNumber() && !b.number().isZero()) || (!b.isNumber() && !a.number().isZero());
     if (mixed) {
       throw new FamilyFault(place, "a number is added to a generator or matrix");
     }

@@ -28,7 +28,7 @@ record FamilyPoint(
       String name = e.getKey();
       boolean variable = ring.variables().names().contains(name);
       boolean argument = ring.arguments().containsKey(name);
-      if (variable && numbers.contains(ring.variables().index(name))
+      if ((variable && numbers.contains(ring.variables().index(name)))
           || ring.values().containsKey(name)) {
         return no(ring, "'" + name + "' is an algebraic number and takes no value");
       }

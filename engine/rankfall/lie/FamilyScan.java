@@ -95,7 +95,9 @@ record FamilyScan(
 
     @Override
     public Boolean binary(Expression.Binary e) {
-      return e.left().fold(this) | e.right().fold(this);
+      boolean left = e.left().fold(this);
+      boolean right = e.right().fold(this);
+      return left || right;
     }
 
     @Override

@@ -35,7 +35,7 @@ import rankfall.locus.Decomposition.NotCertified;
 record DecompositionCheck(Chain constants, GroebnerBasis bases, Meter meter) {
   private static final int MOST_COMPONENTS = 40;
   private static final int MOST_GENERATORS = 120;
-  private static final Duration LONGEST = Duration.ofSeconds(10);
+  private static final Duration LONGEST = Duration.ofSeconds(60);
 
   /**
    * The certificate.

@@ -62,7 +62,7 @@ final class Formulas {
   /** Roots stand before letters, functions after them, as is the custom. */
   private static int place(Formula f) {
     if (f instanceof Formula.Root
-        || f instanceof Formula.Power p && p.base() instanceof Formula.Root) {
+        || (f instanceof Formula.Power p && p.base() instanceof Formula.Root)) {
       return 0;
     }
     return f instanceof Formula.Function ? 2 : 1;

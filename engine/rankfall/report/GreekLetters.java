@@ -83,7 +83,7 @@ enum GreekLetters {
         return Optional.of(g.smallLetter());
       }
       if (name.equals(g.capital())
-          || name.equals(g.capitalised()) && CAPITALS_OF_THEIR_OWN.contains(g.capital())) {
+          || (name.equals(g.capitalised()) && CAPITALS_OF_THEIR_OWN.contains(g.capital()))) {
         return Optional.of(g.capitalLetter());
       }
     }

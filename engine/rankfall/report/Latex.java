@@ -118,8 +118,8 @@ final class Latex {
     private static boolean isWordy(Formula f) {
       return f instanceof Formula.Word
           || f instanceof Formula.Bracket
-          || f instanceof Formula.Power p && isWordy(p.base())
-          || f instanceof Formula.Subscript s && isWordy(s.base());
+          || (f instanceof Formula.Power p && isWordy(p.base()))
+          || (f instanceof Formula.Subscript s && isWordy(s.base()));
     }
 
     @Override

@@ -27,8 +27,8 @@ final class Markup {
     return c == '\t'
         || c == '\n'
         || c == '\r'
-        || c >= 0x20 && c < 0xd800
-        || c > 0xf8ff && c < 0xfffe
+        || (c >= 0x20 && c < 0xd800)
+        || (c > 0xf8ff && c < 0xfffe)
         || c >= 0x10000;
   }
 }

@@ -152,8 +152,8 @@ final class MathMl {
       return f instanceof Formula.Word
           || f instanceof Formula.Function
           || f instanceof Formula.Bracket
-          || f instanceof Formula.Power p && isWordy(p.base())
-          || f instanceof Formula.Subscript s && isWordy(s.base());
+          || (f instanceof Formula.Power p && isWordy(p.base()))
+          || (f instanceof Formula.Subscript s && isWordy(s.base()));
     }
 
     @Override

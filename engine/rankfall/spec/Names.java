@@ -33,7 +33,7 @@ final class Names {
   }
 
   static boolean continuesName(int c) {
-    return startsName(c) || c == '_' || c >= '0' && c <= '9';
+    return startsName(c) || c == '_' || (c >= '0' && c <= '9');
   }
 
   static boolean isName(String text) {

@@ -49,7 +49,7 @@ final class RationalValue implements Expression.Cases<Optional<BigFraction>> {
   private static Optional<BigFraction> apply(
       Expression.Operator operator, BigFraction left, BigFraction right) {
     if (bits(left) + bits(right) > MAX_BITS
-        || operator == Expression.Operator.OVER && right.signum() == 0) {
+        || (operator == Expression.Operator.OVER && right.signum() == 0)) {
       return Optional.empty();
     }
     return Optional.of(

@@ -134,7 +134,7 @@ final class ScalarText {
 
     void match(int wanted) {
       boolean blank = wanted == ' ' || wanted == '\t' || wanted == '\n';
-      while (inFile() && (!blank && atBlank() || isEscapedLineEnd())) {
+      while (inFile() && ((!blank && atBlank()) || isEscapedLineEnd())) {
         step();
       }
       if (!inFile()) {

@@ -66,7 +66,7 @@ record Scope(
    */
   void check(String name, Place place) {
     Role role = known.get(name);
-    if (name.equals("i") || role == null && open) {
+    if (name.equals("i") || (role == null && open)) {
       return;
     }
     if (role == null) {

@@ -72,7 +72,7 @@ final class Tokenizer {
       }
       return token(Token.Kind.NAME, from);
     }
-    if (isDigit(at) || text.at(at) == '.' && isDigit(at + 1)) {
+    if (isDigit(at) || (text.at(at) == '.' && isDigit(at + 1))) {
       number();
       return token(Token.Kind.NUMBER, from);
     }

@@ -11,7 +11,7 @@ import picocli.CommandLine.TypeConversionException;
 
 final class DurationTextTest {
   @ParameterizedTest
-  @CsvSource({"1s, PT1S", "60s, PT60S", "5m, PT5M", "1h, PT1H", "90m, PT90M"})
+  @CsvSource({"1s, PT1S", "60s, PT60S", "5m, PT5M", "1h, PT1H", "90m, PT90M", "20ms, PT0.02S"})
   void aNumberAndAUnitAreALength(String text, Duration expected) {
     assertEquals(expected, new DurationText().convert(text));
   }

@@ -3,6 +3,7 @@ package rankfall.published;
 import java.util.List;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.stream.Collectors;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.MatrixEntry;
@@ -10,30 +11,30 @@ import rankfall.Analysis.Quotient;
 import rankfall.exact.Polynomial;
 import rankfall.published.PublishedEntry.Cell;
 import rankfall.published.PublishedEntry.Condition;
+import rankfall.published.PublishedEntry.Stratum;
 
 /** Reads off an analysis what the published tables speak of. */
 final class AnalysisReading {
   private AnalysisReading() {}
 
   /**
-   * The family at the general point of its only component.
+   * The strata of a family, and its formulas at the general point of its first component.
    *
-   * @param analysis of a family with one component
+   * @param analysis of a family
    * @return its formulas as text
-   * @throws IllegalStateException if the family failed or has another number of components
+   * @throws IllegalStateException if the family failed or something was left undecided
    */
   static ObservedFamily of(Analysis analysis) {
-    List<Component> components =
-        analysis
-            .findings()
-            .map(Analysis.Findings::components)
-            .orElseThrow(() -> new IllegalStateException(analysis.message()));
-    if (components.size() != 1) {
-      throw new IllegalStateException(components.size() + " components");
+    if (analysis.status() != Analysis.Status.COMPLETE) {
+      throw new IllegalStateException(analysis.message());
     }
-    Component component = components.get(0);
+    Analysis.Findings findings = analysis.findings().orElseThrow();
+    Component component = findings.components().get(0);
     List<Integer> torus = analysis.spec().torus().stream().map(component.basis()::indexOf).toList();
-    return of(component, torus);
+    return of(component, torus)
+        .with(
+            findings.strata().stream().map(AnalysisReading::stratum).toList(),
+            findings.components().stream().map(c -> equations(c.equations())).toList());
   }
 
   /**
@@ -79,7 +80,17 @@ final class AnalysisReading {
   }
 
   private static Condition condition(Analysis.Condition condition) {
-    List<String> equations = condition.equations().stream().map(Polynomial::toString).toList();
-    return new Condition(String.join("; ", equations), condition.multiplicity().orElse(0));
+    return new Condition(equations(condition.equations()), condition.multiplicity().orElse(0));
+  }
+
+  private static Stratum stratum(Analysis.Stratum s) {
+    return new Stratum(
+        equations(s.equations()), List.of(s.dimension(), s.rank(), s.derived(), s.centre()));
+  }
+
+  private static String equations(List<Polynomial> equations) {
+    return equations.isEmpty()
+        ? "0"
+        : equations.stream().map(Polynomial::toString).collect(Collectors.joining("; "));
   }
 }

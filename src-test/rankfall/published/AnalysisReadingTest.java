@@ -79,7 +79,8 @@ class AnalysisReadingTest {
             .filter(e -> e.id().equals("sl2-scaled"))
             .findFirst()
             .orElseThrow();
-    assertEquals(List.of(), PublishedComparison.family(entry, read));
+    ObservedFamily whole = read.with(entry.strata().orElseThrow(), List.of("0"));
+    assertEquals(List.of(), PublishedComparison.family(entry, whole));
   }
 
   /** K(e, f) is not 0, so the form on e alone has another inverse than the whole form shows. */

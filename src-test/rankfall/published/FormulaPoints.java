@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Map;
 import java.util.Random;
 import java.util.SortedMap;
+import java.util.TreeMap;
 import java.util.TreeSet;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
@@ -40,25 +41,9 @@ final class FormulaPoints {
    * @return at least four, each with the value of every name that a formula may hold
    */
   static List<Map<String, Quantity>> of(PublishedEntry entry) {
-    Map<?, ?> spec =
-        (Map<?, ?>)
-            new Load(LoadSettings.builder().setSchema(new FailsafeSchema()).build())
-                .loadFromString(entry.spec());
+    Map<?, ?> spec = spec(entry);
     Map<String, Quantity> fixed = new HashMap<>();
-    Matcher roots = SQUARE_ROOT.matcher(entry.spec());
-    while (roots.find()) {
-      BigFraction radicand =
-          BigFraction.parse(roots.group(1) + (roots.group(2) == null ? "" : "/" + roots.group(2)));
-      String name = roots.group().replaceAll("\\s", "");
-      fixed.put(name, Quantity.of(new Root(name, List.of(radicand, BigFraction.ZERO))));
-    }
-    if (spec.get("constants") instanceof Map<?, ?> constants) {
-      constants.forEach(
-          (name, c) ->
-              fixed.put(
-                  name.toString(),
-                  Quantity.of(constant(name.toString(), ((Map<?, ?>) c).get("minimal")))));
-    }
+    numbers(entry).forEach(r -> fixed.put(r.name(), Quantity.of(r)));
     List<String> parameters =
         spec.get("parameters") instanceof List<?> l
             ? l.stream().map(Object::toString).toList()
@@ -75,6 +60,48 @@ final class FormulaPoints {
       points.add(point);
     }
     return points;
+  }
+
+  /** The algebraic numbers of an entry. */
+  static List<Root> numbers(PublishedEntry entry) {
+    Map<?, ?> spec = spec(entry);
+    Map<String, Root> numbers = new TreeMap<>();
+    Matcher roots = SQUARE_ROOT.matcher(entry.spec());
+    while (roots.find()) {
+      BigFraction radicand =
+          BigFraction.parse(roots.group(1) + (roots.group(2) == null ? "" : "/" + roots.group(2)));
+      String name = roots.group().replaceAll("\\s", "");
+      numbers.put(name, new Root(name, List.of(radicand, BigFraction.ZERO)));
+    }
+    if (spec.get("constants") instanceof Map<?, ?> constants) {
+      constants.forEach(
+          (name, c) ->
+              numbers.put(
+                  name.toString(),
+                  constant(name.toString(), ((Map<?, ?>) c).get("minimal"))));
+    }
+    return List.copyOf(numbers.values());
+  }
+
+  /**
+   * The relations of an entry.
+   *
+   * @return differences of the two sides of each equation under {@code where}
+   */
+  static List<String> relations(PublishedEntry entry) {
+    return spec(entry).get("where") instanceof List<?> where
+        ? where.stream()
+            .map(Object::toString)
+            .filter(w -> w.matches("[^<>!=]*=[^<>!=]*"))
+            .map(w -> w.replace("=", "- (") + ")")
+            .toList()
+        : List.of();
+  }
+
+  private static Map<?, ?> spec(PublishedEntry entry) {
+    return (Map<?, ?>)
+        new Load(LoadSettings.builder().setSchema(new FailsafeSchema()).build())
+            .loadFromString(entry.spec());
   }
 
   private static void solve(

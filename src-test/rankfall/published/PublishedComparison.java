@@ -76,6 +76,13 @@ final class PublishedComparison {
     published
         .conditions()
         .ifPresent(due -> differences.addAll(conditions(due, observed.conditions())));
+    PublishedSets sets = PublishedSets.of(published);
+    published
+        .strata()
+        .ifPresent(due -> differences.addAll(sets.strata(due, observed.strata())));
+    published
+        .loci()
+        .forEach((key, due) -> differences.addAll(sets.union(key, due, observed.components())));
     return differences;
   }
 

@@ -17,6 +17,7 @@ import rankfall.published.PublishedEntry.Cell;
 import rankfall.published.PublishedEntry.Condition;
 import rankfall.published.PublishedEntry.Fault;
 import rankfall.published.PublishedEntry.Point;
+import rankfall.published.PublishedEntry.Stratum;
 
 /** The comparison accepts what is due and notices every single change of it. */
 class PublishedComparisonTest {
@@ -74,7 +75,11 @@ class PublishedComparisonTest {
             "-72*b^4 + 48*b^2 - 8",
             List.of(new Condition("3*b^2 - 1", 2)),
             new TreeMap<>(),
-            Optional.empty());
+            Optional.empty(),
+            List.of(
+                new Stratum("-6*b^2 + 2", List.of(3, 1, 2, 0)),
+                new Stratum("b - b", List.of(3, 3, 3, 0))),
+            List.of("0"));
     assertEquals(List.of(), PublishedComparison.family(entry, found));
   }
 
@@ -123,7 +128,9 @@ class PublishedComparisonTest {
                                     right.determinant(),
                                     right.conditions(),
                                     k,
-                                    right.dual()))));
+                                    right.dual(),
+                                    right.strata(),
+                                    right.components()))));
     entry.dual().ifPresent(m -> changedCells(m).forEach(k -> changed.add(withDual(right, k))));
     entry
         .determinant()
@@ -147,6 +154,27 @@ class PublishedComparisonTest {
                 changed.add(withConditions(right, other));
               }
             });
+    entry.strata().ifPresent(list -> changedStrata(list).forEach(x -> changed.add(with(right, x))));
+    if (!entry.loci().isEmpty()) {
+      changed.add(right.with(right.strata(), List.of("0")));
+      changed.add(right.with(right.strata(), List.of(right.components().get(0) + "; b + 7")));
+    }
+    return changed;
+  }
+
+  private static List<List<Stratum>> changedStrata(List<Stratum> strata) {
+    List<List<Stratum>> changed = new ArrayList<>();
+    for (int k = 0; k < strata.size(); k++) {
+      List<Stratum> other = new ArrayList<>(strata);
+      Stratum s = other.remove(k);
+      changed.add(List.copyOf(other));
+      other.add(new Stratum(s.equations() + "; b + 7", s.profile()));
+      changed.add(List.copyOf(other));
+      List<Integer> profile = new ArrayList<>(s.profile());
+      profile.set(3, profile.get(3) + 1);
+      other.set(other.size() - 1, new Stratum(s.equations(), profile));
+      changed.add(List.copyOf(other));
+    }
     return changed;
   }
 
@@ -177,12 +205,24 @@ class PublishedComparisonTest {
         entry.determinant().orElse("0"),
         entry.conditions().orElse(List.of()),
         entry.restricted().orElse(new TreeMap<>()),
-        entry.dual());
+        entry.dual(),
+        entry.strata().orElse(List.of()),
+        entry.loci().values().stream().map(l -> String.join("; ", l)).toList());
   }
 
   private static ObservedFamily with(ObservedFamily family, SortedMap<Cell, String> killing) {
     return new ObservedFamily(
-        killing, family.determinant(), family.conditions(), family.restricted(), family.dual());
+        killing,
+        family.determinant(),
+        family.conditions(),
+        family.restricted(),
+        family.dual(),
+        family.strata(),
+        family.components());
+  }
+
+  private static ObservedFamily with(ObservedFamily family, List<Stratum> strata) {
+    return family.with(strata, family.components());
   }
 
   private static ObservedFamily withDual(ObservedFamily family, SortedMap<Cell, String> dual) {
@@ -191,17 +231,31 @@ class PublishedComparisonTest {
         family.determinant(),
         family.conditions(),
         family.restricted(),
-        Optional.of(dual));
+        Optional.of(dual),
+        family.strata(),
+        family.components());
   }
 
   private static ObservedFamily withDeterminant(ObservedFamily family, String determinant) {
     return new ObservedFamily(
-        family.killing(), determinant, family.conditions(), family.restricted(), family.dual());
+        family.killing(),
+        determinant,
+        family.conditions(),
+        family.restricted(),
+        family.dual(),
+        family.strata(),
+        family.components());
   }
 
   private static ObservedFamily withConditions(ObservedFamily family, List<Condition> conditions) {
     return new ObservedFamily(
-        family.killing(), family.determinant(), conditions, family.restricted(), family.dual());
+        family.killing(),
+        family.determinant(),
+        conditions,
+        family.restricted(),
+        family.dual(),
+        family.strata(),
+        family.components());
   }
 
   private static String wrong(String value) {

@@ -41,7 +41,11 @@ abstract class PublishedValuesContract {
             e ->
                 e.killing().isPresent()
                     || e.determinant().isPresent()
-                    || e.conditions().isPresent());
+                    || e.conditions().isPresent()
+                    || e.restricted().isPresent()
+                    || e.dual().isPresent()
+                    || e.strata().isPresent()
+                    || !e.loci().isEmpty());
   }
 
   @ParameterizedTest(name = "{0}")

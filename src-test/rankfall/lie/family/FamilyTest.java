@@ -148,7 +148,7 @@ class FamilyTest {
         List.of("2: a real algebra with a non-real structure constant"),
         faults(Specs.real("a").hermitian().bracket("X", "Y", "a*Y")));
     assertEquals(
-        List.of("[X,Y]=(a*i)Y"),
+        List.of("[X,Y]=(i*a)Y"),
         Brackets.of(Brackets.family(Specs.complex("a").bracket("X", "Y", "i*a*Y"))));
   }
 

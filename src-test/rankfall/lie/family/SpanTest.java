@@ -117,7 +117,7 @@ class SpanTest {
                 .matrix("E", "0,sqrt(6);0,0")
                 .matrix("F", "0,sqrt(1/2);0,0"));
     assertEquals(List.of("a", "sqrt(2)", "sqrt(3)"), f.ring().variables().names());
-    assertEquals(List.of("[H,E]=(3*a*sqrt(2)/2)E"), Brackets.of(f));
+    assertEquals(List.of("[H,E]=(3*sqrt(2)*a/2)E"), Brackets.of(f));
     assertEquals(List.of(0, 1), Brackets.closed(f).kept());
     FamilySite.Algebraic site =
         assertInstanceOf(FamilySite.Algebraic.class, f.at(Specs.point("a=2/3")));

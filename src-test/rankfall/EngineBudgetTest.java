@@ -1,0 +1,45 @@
+package rankfall;
+
+import static org.junit.jupiter.api.Assertions.assertEquals;
+import static org.junit.jupiter.api.Assertions.assertTrue;
+
+import java.io.IOException;
+import java.nio.file.Files;
+import java.nio.file.Path;
+import java.time.Duration;
+import org.junit.jupiter.params.ParameterizedTest;
+import org.junit.jupiter.params.provider.ValueSource;
+import rankfall.Analysis.Findings;
+import rankfall.Analysis.Status;
+import rankfall.spec.Spec;
+import rankfall.spec.SpecException;
+import rankfall.spec.SpecReader;
+
+/** Whatever the budget, what is said is what an unhurried analysis says; what is not is listed. */
+class EngineBudgetTest {
+
+  @ParameterizedTest
+  @ValueSource(strings = {"metric-rotations-3", "bianchi-types", "merging-frames"})
+  void whatASmallBudgetLeavesIsTrue(String name) throws IOException, SpecException {
+    Path file = Path.of("specs", name + ".yaml");
+    Spec spec = SpecReader.read(file.toString(), Files.readAllBytes(file)).get(0).orThrow();
+    Analysis whole = Engine.analyse(spec, Budget.DEFAULT);
+    assertEquals(Status.COMPLETE, whole.status(), whole.message());
+    Findings all = whole.findings().orElseThrow();
+    int branches = 1;
+    Analysis part = Engine.analyse(spec, new Budget(Duration.ofHours(1), branches));
+    assertEquals(Status.INCOMPLETE, part.status());
+    while (part.status() == Status.INCOMPLETE) {
+      Findings some = part.findings().orElseThrow();
+      assertEquals(part.undecided().get(0), part.message());
+      assertTrue(part.message().contains("more than " + branches + " branches"), part.message());
+      assertTrue(some.components().isEmpty() || some.components().equals(all.components()));
+      assertTrue(some.strata().isEmpty() || some.strata().equals(all.strata()));
+      assertTrue(all.coverings().containsAll(some.coverings()));
+      assertEquals(all.poles(), some.poles());
+      branches += 1 + branches / 3;
+      part = Engine.analyse(spec, new Budget(Duration.ofHours(1), branches));
+    }
+    assertEquals(whole, part);
+  }
+}
