@@ -59,8 +59,8 @@ public record Analysis(
    * What was found of a family that did not fail.
    *
    * @param listed names of the generators that the spec lists (closure adds none here)
-   * @param variables names of the coordinates in which polynomials are written: parameters, functions
-   *     of parameters, algebraic numbers
+   * @param variables names of the coordinates in which polynomials are written: parameters,
+   *     functions of parameters, algebraic numbers
    * @param relations polynomials that vanish on the parameter variety, with the reason
    * @param poles polynomials at whose zeros an entry is undefined
    * @param components the irreducible components, the generic point of each
@@ -127,8 +127,8 @@ public record Analysis(
       List<Condition> conditions) {}
 
   /**
-   * A structure constant: the coefficient of {@code target} in {@code [left, right]}; indices from 0
-   * into the basis.
+   * A structure constant: the coefficient of {@code target} in {@code [left, right]}; indices from
+   * 0 into the basis.
    */
   public record StructureEntry(int left, int right, int target, RationalFunction coefficient) {}
 
@@ -172,8 +172,8 @@ public record Analysis(
    * A locus on which the Killing form degenerates, or falls further in rank.
    *
    * @param equations one irreducible polynomial, or more where the component has equations
-   * @param multiplicity of the locus in the determinant; empty where there is no determinant, or where
-   *     it was not determined
+   * @param multiplicity of the locus in the determinant; empty where there is no determinant, or
+   *     where it was not determined
    * @param rank of the form at the general point of the locus; empty where there is no algebra, the
    *     span not being closed
    * @param kernelDimension of the form there
@@ -194,8 +194,8 @@ public record Analysis(
    * A stratum: points with one profile.
    *
    * @param name {@code S1}, {@code S2} and so on
-   * @param equations reduced Groebner basis (graded reverse lexicographic) of its closure; empty for
-   *     the whole space
+   * @param equations reduced Groebner basis (graded reverse lexicographic) of its closure; empty
+   *     for the whole space
    * @param exclusions closed sets that do not belong to it, each by its equations
    * @param codimension of the closure in the space of the parameters
    * @param dimension of the algebra

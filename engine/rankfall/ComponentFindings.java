@@ -18,6 +18,7 @@ import rankfall.lie.DualForm;
 import rankfall.lie.Family;
 import rankfall.lie.KillingForm;
 import rankfall.locus.ComponentForm;
+import rankfall.locus.Decomposition;
 import rankfall.locus.FamilyAlgebras;
 import rankfall.locus.Leaf;
 import rankfall.locus.Loci;
@@ -39,11 +40,12 @@ record ComponentFindings(
         Strata.Stratum s = strata.strata().get(k);
         out.add(component(out.size() + 1, s.leaves().get(0), s.equations()));
       }
-    } else {
-      for (Leaf leaf : partition.leaves()) {
-        if (leaf instanceof Leaf.Defined d
-            && d.piece().chain().equals(family.ring().constants())) {
-          out.add(component(1, d, List.of()));
+    } else if (partition.variety().isPresent()) {
+      for (Decomposition.Component c : partition.variety().get().components()) {
+        for (Leaf leaf : partition.leaves()) {
+          if (leaf instanceof Leaf.Defined d && d.piece().chain().equals(c.chain())) {
+            out.add(component(out.size() + 1, d, c.equations()));
+          }
         }
       }
     }
@@ -130,9 +132,7 @@ record ComponentFindings(
         l.rank(),
         l.algebra().map(a -> a.constants().dimension() - l.rank().orElseThrow()),
         l.algebra().map(a -> a.basis()).orElse(List.of()),
-        l.algebra().map(a -> a.kernel()).orElse(List.of()).stream()
-            .map(Combination::new)
-            .toList(),
+        l.algebra().map(a -> a.kernel()).orElse(List.of()).stream().map(Combination::new).toList(),
         StratumFindings.verdict(new RealPoints(family).onClosure(l.closure())));
   }
 

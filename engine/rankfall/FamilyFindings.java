@@ -33,11 +33,11 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
    * @param published takes what is known after a step, for the case that the next one does not end
    */
   static Analysis of(Spec spec, Family family, Meter meter, Consumer<Analysis> published) {
-    FamilyFindings start = new FamilyFindings(spec, family, Partition.notYet(family), meter);
+    FamilyFindings start = new FamilyFindings(spec, family, Partition.start(family, meter), meter);
     List<Component> general = start.components(List.of());
     published.accept(start.analysis(general));
     FamilyFindings done =
-        new FamilyFindings(spec, family, Partition.of(family, meter), meter);
+        new FamilyFindings(spec, family, start.partition.completed(family, meter), meter);
     if (done.partition.strata().isEmpty()) {
       return done.analysis(general);
     }
@@ -122,14 +122,11 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     return where
         + (table
             ? "Jacobi's identity holds at no point of the parameters"
-            : "the span is closed under the bracket at no point of the parameters"
-                + missing());
+            : "the span is closed under the bracket at no point of the parameters" + missing());
   }
 
   private String missing() {
-    return ClosureGaps.of(family)
-        .map(g -> "; " + g)
-        .orElse("");
+    return ClosureGaps.of(family).map(g -> "; " + g).orElse("");
   }
 
   private List<String> openPieces() {
@@ -151,12 +148,10 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
   private List<Relation> relations() {
     List<Relation> out = new ArrayList<>();
     for (FamilyRelation r : family.relations()) {
-      Origin origin =
-          r.reason() == FamilyRelation.Reason.SPEC ? Origin.SPEC : Origin.FUNCTION;
+      Origin origin = r.reason() == FamilyRelation.Reason.SPEC ? Origin.SPEC : Origin.FUNCTION;
       out.add(new Relation(r.polynomial(), r.factors(), origin));
     }
-    Origin origin =
-        spec.presentation() instanceof Spec.Brackets ? Origin.JACOBI : Origin.CLOSURE;
+    Origin origin = spec.presentation() instanceof Spec.Brackets ? Origin.JACOBI : Origin.CLOSURE;
     for (Polynomial p : partition.conditions()) {
       List<Polynomial> factors = ChainFactoring.irreducible(family.ring().constants(), p);
       Polynomial squareFree =

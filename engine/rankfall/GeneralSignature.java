@@ -21,9 +21,10 @@ import rankfall.spec.SpecException;
 /**
  * The signature where it is one and the same at all real points of the general rank.
  *
- * <p>It is where the points form a convex set, no relation and only half-spaces as bounds, that no real
- * hypersurface cuts on which there is a pole or the rank or the span falls: the set stays connected
- * then, and the signature, which changes only where the rank does, is that of any of its points.
+ * <p>It is where the points form a convex set, no relation and only half-spaces as bounds, that no
+ * real hypersurface cuts on which there is a pole or the rank or the span falls: the set stays
+ * connected then, and the signature, which changes only where the rank does, is that of any of its
+ * points.
  */
 record GeneralSignature(Family family, Profile profile, List<Leaf> leaves) {
   private static final int TRIES = 50;
@@ -51,10 +52,8 @@ record GeneralSignature(Family family, Profile profile, List<Leaf> leaves) {
   private boolean cutsSpan(Leaf leaf) {
     int parameters = family.ring().variables().indeterminates();
     return leaf.piece().chain().dimension() == parameters - 1
-        && !(leaf instanceof Leaf.Defined d
-            && d.profile().dimension() == profile.dimension())
-        && new RealPoints(family).onClosure(leaf.piece().chain()).verdict()
-            != RealZeros.Verdict.NO;
+        && !(leaf instanceof Leaf.Defined d && d.profile().dimension() == profile.dimension())
+        && new RealPoints(family).onClosure(leaf.piece().chain()).verdict() != RealZeros.Verdict.NO;
   }
 
   private Optional<Signature> atSomePoint() {

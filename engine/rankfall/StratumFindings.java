@@ -4,12 +4,10 @@ import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Collectors;
-import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis.Combination;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Stratum;
 import rankfall.exact.ComplexNumber;
-import rankfall.exact.Polynomial;
 import rankfall.exact.RealZeros;
 import rankfall.lie.Family;
 import rankfall.locus.ComplexPoint;
@@ -34,8 +32,7 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
 
   private Stratum stratum(String name, Strata.Stratum s) {
     Profile p = s.profile();
-    IdealDimensions ideals =
-        IdealDimensions.of(s, family.ring().constants(), meter);
+    IdealDimensions ideals = IdealDimensions.of(s, family.ring().constants(), meter);
     RealZeros.Answer real = new RealPoints(family).on(s);
     Witness witness = witness(s, real);
     int parameters = family.ring().variables().indeterminates();
@@ -89,9 +86,7 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
         .map(
             x ->
                 "Where also "
-                    + x.equations().stream()
-                        .map(q -> q + " = 0")
-                        .collect(Collectors.joining(", "))
+                    + x.equations().stream().map(q -> q + " = 0").collect(Collectors.joining(", "))
                     + ": radical of dimension "
                     + x.dimensions().radical()
                     + ", nilradical of dimension "
@@ -135,9 +130,7 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
     List<Coordinate> out = new ArrayList<>();
     int parameters = family.ring().variables().indeterminates();
     for (int v = 0; v < Math.min(parameters, point.size()); v++) {
-      out.add(
-          new Coordinate(
-              family.ring().variables().names().get(v), point.get(v).toString()));
+      out.add(new Coordinate(family.ring().variables().names().get(v), point.get(v).toString()));
     }
     return out;
   }

@@ -4,14 +4,14 @@ import java.util.ArrayList;
 import java.util.List;
 
 /**
- * An irreducible set of points, given at its general point by a triangular set of equations (a chain
- * in the sense of Ritt and Wu).
+ * An irreducible set of points, given at its general point by a triangular set of equations (a
+ * chain in the sense of Ritt and Wu).
  *
  * <p>A rule says how one variable depends on the others. Linear rules {@code A*x + B} hold no
- * variable of another linear rule; the rules of higher degree form a tower, each irreducible over the
- * fractions of the ones before. All variables without a rule are free. The set is the closure of the
- * points that satisfy the rules and at which no initial (leading coefficient of a rule in its
- * variable) vanishes.
+ * variable of another linear rule; the rules of higher degree form a tower, each irreducible over
+ * the fractions of the ones before. All variables without a rule are free. The set is the closure
+ * of the points that satisfy the rules and at which no initial (leading coefficient of a rule in
+ * its variable) vanishes.
  *
  * <p>As a {@link Domain} this is the ring of polynomials on the set; only at the general point.
  *
@@ -118,8 +118,7 @@ public record Chain(Variables variables, List<Rule> rules) implements Domain<Pol
       return polynomials;
     }
     Polynomial initial = r.initial();
-    Polynomial tail =
-        r.equation().minus(initial.times(power(r.equation().variables(), v, d)));
+    Polynomial tail = r.equation().minus(initial.times(power(r.equation().variables(), v, d)));
     return polynomials.stream().map(p -> pseudoRemainder(p, v, d, initial, tail, steps)).toList();
   }
 
@@ -138,8 +137,7 @@ public record Chain(Variables variables, List<Rule> rules) implements Domain<Pol
       Polynomial lead = rest.coefficient(v, e);
       Polynomial shift = power(p.variables(), v, e - d);
       Polynomial lower = rest.minus(lead.times(power(p.variables(), v, e)));
-      rest =
-          (monic ? lower : lower.times(initial)).minus(lead.times(tail).times(shift));
+      rest = (monic ? lower : lower.times(initial)).minus(lead.times(tail).times(shift));
       done++;
     }
     return monic || rest.isZero() ? rest : rest.times(initial.pow(steps - done));

@@ -69,9 +69,10 @@ public final class ChainFactoring {
    * The factorization over the algebraic numbers of a chain.
    *
    * @param chain only its rules for algebraic numbers are used
-   * @param f a polynomial that is not 0 over these numbers, in normal form unless all rules are monic
-   * @return its bases have a rational leading coefficient; an algebraic number that is left over stands
-   *     among the factors as one more base
+   * @param f a polynomial that is not 0 over these numbers, in normal form unless all rules are
+   *     monic
+   * @return its bases have a rational leading coefficient; an algebraic number that is left over
+   *     stands among the factors as one more base
    */
   public static Factorization factorization(Chain chain, Polynomial f) {
     List<Chain.Rule> numbers = numbers(chain);
@@ -129,8 +130,8 @@ public final class ChainFactoring {
    * <p>The tower is brought down by norms, which are resultants (Trager, Algebraic factoring and
    * rational function integration, SYMSAC 1976).
    *
-   * @param chain an irreducible chain in which x is free; the other free variables count as elements
-   *     of the field
+   * @param chain an irreducible chain in which x is free; the other free variables count as
+   *     elements of the field
    * @param f does not vanish on the chain
    * @return those factors that hold x
    */

@@ -5,9 +5,9 @@ import java.util.List;
 /**
  * Quotients of polynomials at the general point of a chain, written in one way.
  *
- * <p>The tower of a chain is a field over the fractions of the free variables, so every quotient has a
- * form whose denominator holds free variables only. It is found by Euclid's algorithm in one tower
- * variable after the other, from the top (common practice, no source).
+ * <p>The tower of a chain is a field over the fractions of the free variables, so every quotient
+ * has a form whose denominator holds free variables only. It is found by Euclid's algorithm in one
+ * tower variable after the other, from the top (common practice, no source).
  */
 public final class ChainFractions {
   private ChainFractions() {}
@@ -62,8 +62,7 @@ public final class ChainFractions {
       upper = lower;
       lower = next;
     }
-    List<Polynomial> out =
-        chain.reduced(List.of(f.numerator().times(lower.cofactor), lower.value));
+    List<Polynomial> out = chain.reduced(List.of(f.numerator().times(lower.cofactor), lower.value));
     return RationalFunction.of(out.get(0), out.get(1));
   }
 
@@ -135,8 +134,7 @@ public final class ChainFractions {
     Polynomial lead = upper.coefficient(variable, upper.degree(variable));
     RationalFunction inverse = canonical(chain, chain.one(), lead);
     List<Polynomial> out =
-        chain.reduced(
-            List.of(upper.times(inverse.numerator()), inverse.denominator()));
+        chain.reduced(List.of(upper.times(inverse.numerator()), inverse.denominator()));
     return RationalFunction.of(out.get(0), out.get(1)).numerator().primitive();
   }
 }

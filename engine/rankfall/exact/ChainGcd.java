@@ -69,8 +69,7 @@ final class ChainGcd {
     if (r.isZero()) {
       return r;
     }
-    Polynomial content =
-        r.coefficientsIn(x).stream().reduce(chain.zero(), Polynomial::gcd);
+    Polynomial content = r.coefficientsIn(x).stream().reduce(chain.zero(), Polynomial::gcd);
     return r.over(content);
   }
 }

@@ -10,9 +10,9 @@ import java.util.List;
 /**
  * A common factor of several polynomials: mostly the greatest one, found or ruled out cheaply.
  *
- * <p>Variables and integers are taken out by inspection. What is left is looked at modulo a prime with
- * all variables but one set to numbers: if these images have no common factor for any variable, none is
- * searched. A factor can be missed so, which costs nothing but longer rows.
+ * <p>Variables and integers are taken out by inspection. What is left is looked at modulo a prime
+ * with all variables but one set to numbers: if these images have no common factor for any
+ * variable, none is searched. A factor can be missed so, which costs nothing but longer rows.
  */
 final class CommonFactor {
   private static final long PRIME = 2147483629L;
@@ -68,8 +68,7 @@ final class CommonFactor {
     for (int e : least) {
       exponents.add(e);
     }
-    return Polynomial.of(
-        polynomials.get(0).variables(), List.of(new Term(content, exponents)));
+    return Polynomial.of(polynomials.get(0).variables(), List.of(new Term(content, exponents)));
   }
 
   private static boolean mayShareFactor(List<Polynomial> polynomials) {

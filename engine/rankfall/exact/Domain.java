@@ -5,9 +5,9 @@ import java.util.List;
 /**
  * An integral domain in which rows of a matrix may be scaled.
  *
- * <p>Sums and products need not be in normal form; {@link #normal} brings a whole row to normal form
- * at once, by one common non-zero factor, so that proportional rows stay proportional. Only entries
- * in normal form may be asked whether they are 0.
+ * <p>Sums and products need not be in normal form; {@link #normal} brings a whole row to normal
+ * form at once, by one common non-zero factor, so that proportional rows stay proportional. Only
+ * entries in normal form may be asked whether they are 0.
  *
  * @param <E> the elements; immutable
  */

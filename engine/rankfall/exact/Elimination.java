@@ -108,9 +108,7 @@ public final class Elimination<E> {
     long bestCost = Long.MAX_VALUE;
     for (Row<E> row : open) {
       SortedMap<Integer, Integer> candidates =
-          inOrder
-              ? row.weights.subMap(column, column + 1)
-              : row.weights.headMap(pivotColumns);
+          inOrder ? row.weights.subMap(column, column + 1) : row.weights.headMap(pivotColumns);
       for (var e : candidates.entrySet()) {
         long cost = 1000L * e.getValue() + row.entries.size();
         if (cost < bestCost) {

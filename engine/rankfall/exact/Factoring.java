@@ -55,8 +55,7 @@ public final class Factoring {
         powers.add(new Factor(v, e));
       }
     }
-    Factorization others =
-        rest.termCount() > LONG ? ofLong(rest) : directly(rest);
+    Factorization others = rest.termCount() > LONG ? ofLong(rest) : directly(rest);
     powers.addAll(others.factors());
     powers.sort(BY_SIZE);
     return new Factorization(others.unit(), powers);
@@ -91,8 +90,7 @@ public final class Factoring {
     if (p.isConstant()) {
       return Polynomial.one(f.variables());
     }
-    int x =
-        p.support().stream().min(Comparator.comparingInt(p::degree)).orElseThrow();
+    int x = p.support().stream().min(Comparator.comparingInt(p::degree)).orElseThrow();
     Polynomial content =
         p.coefficientsIn(x).stream().reduce(Polynomial.zero(f.variables()), Polynomial::gcd);
     Polynomial rest = p.over(content);

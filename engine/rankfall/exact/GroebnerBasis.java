@@ -185,8 +185,9 @@ public final class GroebnerBasis {
   }
 
   /**
-   * The normal form of a polynomial modulo an ideal over the rationals: the one polynomial that differs
-   * from it by a member of the ideal and holds no monomial that a leading monomial of the ideal divides.
+   * The normal form of a polynomial modulo an ideal over the rationals: the one polynomial that
+   * differs from it by a member of the ideal and holds no monomial that a leading monomial of the
+   * ideal divides.
    *
    * @param generators of the ideal
    * @param p any
@@ -216,7 +217,8 @@ public final class GroebnerBasis {
   }
 
   /**
-   * The basis of the ideal quotient: the polynomials whose product with a given one lies in the ideal.
+   * The basis of the ideal quotient: the polynomials whose product with a given one lies in the
+   * ideal.
    *
    * @param generators of the ideal
    * @param p not 0

@@ -77,9 +77,7 @@ final class NumberFieldFactoring {
     for (Polynomial p : r.equation().coefficientsIn(r.variable())) {
       c.add(element(p, height));
     }
-    return UnivariatePolynomial.create(
-            below, c.toArray(new MultivariatePolynomial[0]))
-        .monic();
+    return UnivariatePolynomial.create(below, c.toArray(new MultivariatePolynomial[0])).monic();
   }
 
   /** A polynomial in the first {@code height} generators. */
@@ -143,8 +141,7 @@ final class NumberFieldFactoring {
   private static void addPowers(List<Factor> out, Polynomial base, int exponent) {
     if (base.termCount() == 1) {
       for (int v : base.support()) {
-        out.add(
-            new Factor(Polynomial.variable(base.variables(), v), exponent * base.degree(v)));
+        out.add(new Factor(Polynomial.variable(base.variables(), v), exponent * base.degree(v)));
       }
     } else {
       out.add(new Factor(base, exponent));
@@ -171,8 +168,7 @@ final class NumberFieldFactoring {
     return out;
   }
 
-  private Polynomial lowered(
-      MultivariatePolynomial<UnivariatePolynomial<Rational<BigInteger>>> f) {
+  private Polynomial lowered(MultivariatePolynomial<UnivariatePolynomial<Rational<BigInteger>>> f) {
     RationalFunction sum = RationalFunction.of(Polynomial.zero(variables));
     for (var m : f) {
       for (var c : field.image(m.coefficient)) {
@@ -185,8 +181,7 @@ final class NumberFieldFactoring {
         }
         Rational<BigInteger> q = c.coefficient;
         Polynomial term =
-            Polynomial.of(
-                variables, List.of(new Term(Polynomial.java(q.numerator()), e)));
+            Polynomial.of(variables, List.of(new Term(Polynomial.java(q.numerator()), e)));
         sum =
             sum.plus(
                 RationalFunction.of(

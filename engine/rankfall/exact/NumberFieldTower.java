@@ -70,10 +70,8 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
     rules.add(new Chain.Rule(v, equation));
     List<ConstantRoot> all = new ArrayList<>(roots);
     all.add(root);
-    NumberFieldTower tower =
-        new NumberFieldTower(new Chain(below.variables(), rules), all);
-    return new Extension(
-        tower, RationalFunction.of(Polynomial.variable(below.variables(), v)));
+    NumberFieldTower tower = new NumberFieldTower(new Chain(below.variables(), rules), all);
+    return new Extension(tower, RationalFunction.of(Polynomial.variable(below.variables(), v)));
   }
 
   private Chain moved(Variables to) {
@@ -93,8 +91,7 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
    */
   public static Polynomial inRing(Polynomial p, Variables to) {
     List<Integer> support = p.support();
-    List<Integer> at =
-        support.stream().map(v -> to.index(p.variables().names().get(v))).toList();
+    List<Integer> at = support.stream().map(v -> to.index(p.variables().names().get(v))).toList();
     List<Term> out = new ArrayList<>();
     for (Term t : p.terms()) {
       List<Integer> e = new ArrayList<>(java.util.Collections.nCopies(to.count(), 0));
@@ -125,18 +122,14 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
     List<ConstantRoot> open = new ArrayList<>();
     for (Polynomial p : irreducible) {
       open.addAll(
-          ConstantRoot.of(
-              p.coefficientsIn(0).stream().map(Polynomial::constantValue).toList()));
+          ConstantRoot.of(p.coefficientsIn(0).stream().map(Polynomial::constantValue).toList()));
     }
     if (open.isEmpty()) {
       throw new ArithmeticException("the polynomial has no real root");
     }
     for (int round = 0; round < NEAR_ROUNDS && open.size() > 1; round++) {
       BigFraction least =
-          open.stream()
-              .map(r -> r.greatestDistance(near))
-              .min(ConstantRoot.ORDER)
-              .orElseThrow();
+          open.stream().map(r -> r.greatestDistance(near)).min(ConstantRoot.ORDER).orElseThrow();
       open =
           new ArrayList<>(
               open.stream()
@@ -180,7 +173,10 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
     Polynomial out = f;
     for (int k = below.rules().size() - 1; k >= 0; k--) {
       Chain.Rule r = below.rules().get(k);
-      out = out.contains(r.variable()) ? r.equation().resultant(out, r.variable()) : out.pow(r.degree());
+      out =
+          out.contains(r.variable())
+              ? r.equation().resultant(out, r.variable())
+              : out.pow(r.degree());
     }
     return out.primitive();
   }
@@ -233,8 +229,7 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
    * @return -1, 0 or 1
    */
   public int sign(Polynomial p) {
-    List<Polynomial> reduced =
-        chain.reduced(List.of(inRing(p, chain.variables()), chain.one()));
+    List<Polynomial> reduced = chain.reduced(List.of(inRing(p, chain.variables()), chain.one()));
     if (reduced.get(0).isZero()) {
       return 0;
     }

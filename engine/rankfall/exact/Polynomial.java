@@ -233,9 +233,7 @@ public final class Polynomial {
     return out;
   }
 
-  /**
-   * The coefficient of the first term in the text; 0 for the polynomial 0.
-   */
+  /** The coefficient of the first term in the text; 0 for the polynomial 0. */
   public BigInteger leadingCoefficient() {
     if (variables.numbers() == 0 || isZero()) {
       return java(p.lc());

@@ -10,8 +10,8 @@ import org.apache.commons.numbers.fraction.BigFraction;
 /**
  * Exact roots of polynomials that are perfect powers.
  *
- * <p>A determinant of a Killing form is often a power of a short polynomial; its root, coefficient by
- * coefficient in one variable after the other, costs far less than a greatest common divisor.
+ * <p>A determinant of a Killing form is often a power of a short polynomial; its root, coefficient
+ * by coefficient in one variable after the other, costs far less than a greatest common divisor.
  */
 final class PolynomialRoot {
   private PolynomialRoot() {}
@@ -30,8 +30,7 @@ final class PolynomialRoot {
    * @param f primitive, not constant
    */
   static Power power(Polynomial f) {
-    int common =
-        f.support().stream().mapToInt(f::degree).reduce(0, PolynomialRoot::gcd);
+    int common = f.support().stream().mapToInt(f::degree).reduce(0, PolynomialRoot::gcd);
     for (int k = common; k > 1; k--) {
       if (common % k == 0) {
         Optional<Polynomial> root = root(f, k);
@@ -58,8 +57,7 @@ final class PolynomialRoot {
    */
   static Optional<Polynomial> root(Polynomial f, int k) {
     if (f.isConstant()) {
-      return integerRoot(f.constantValue(), k)
-          .map(r -> Polynomial.constant(f.variables(), r));
+      return integerRoot(f.constantValue(), k).map(r -> Polynomial.constant(f.variables(), r));
     }
     if (!mayBePower(f, k)) {
       return Optional.empty();
@@ -96,9 +94,7 @@ final class PolynomialRoot {
   private static boolean mayBePower(Polynomial f, int k) {
     int n = f.variables().count();
     List<BigFraction> point =
-        IntStream.range(0, n)
-            .mapToObj(v -> BigFraction.of(2 + 3 * v % 7))
-            .toList();
+        IntStream.range(0, n).mapToObj(v -> BigFraction.of(2 + 3 * v % 7)).toList();
     return integerRoot(f.at(point).getNumerator(), k).isPresent();
   }
 

@@ -56,8 +56,8 @@ public final class PolynomialText {
   }
 
   /**
-   * The order of terms: descending graded-lexicographic in the variables, algebraic numbers counting
-   * as coefficients and deciding last.
+   * The order of terms: descending graded-lexicographic in the variables, algebraic numbers
+   * counting as coefficients and deciding last.
    *
    * @param variables the ring of the terms
    */

@@ -63,8 +63,7 @@ public record RationalFunction(Polynomial numerator, Polynomial denominator) {
 
   /** The product. */
   public RationalFunction times(RationalFunction f) {
-    return new RationalFunction(
-        numerator.times(f.numerator), denominator.times(f.denominator));
+    return new RationalFunction(numerator.times(f.numerator), denominator.times(f.denominator));
   }
 
   /**
@@ -73,8 +72,7 @@ public record RationalFunction(Polynomial numerator, Polynomial denominator) {
    * @throws ArithmeticException if {@code f} is 0
    */
   public RationalFunction over(RationalFunction f) {
-    return new RationalFunction(
-        numerator.times(f.denominator), denominator.times(f.numerator));
+    return new RationalFunction(numerator.times(f.denominator), denominator.times(f.numerator));
   }
 
   /** The negative. */
@@ -129,8 +127,7 @@ public record RationalFunction(Polynomial numerator, Polynomial denominator) {
 
   /** Whether the denominator is an integer. */
   public boolean isIntegral() {
-    return denominator.isConstant()
-        && denominator.constantValue().equals(BigInteger.ONE);
+    return denominator.isConstant() && denominator.constantValue().equals(BigInteger.ONE);
   }
 
   /** The text of the reports. */

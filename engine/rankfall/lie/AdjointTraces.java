@@ -17,7 +17,8 @@ import rankfall.exact.Term;
 import rankfall.exact.Variables;
 
 /**
- * The ad-traces {@code K_ij = trace(ad_i ad_j) = sum_kl C_ik^l C_jl^k}, summed and expanded by Symja.
+ * The ad-traces {@code K_ij = trace(ad_i ad_j) = sum_kl C_ik^l C_jl^k}, summed and expanded by
+ * Symja.
  *
  * <p>Only products of two non-zero structure constants are formed. Variables are handed over under
  * names of our own, so that no parameter meets a built-in name. One object serves one thread.

@@ -62,8 +62,7 @@ record FamilyBrackets(
     v.vector()
         .forEach(
             (k, c) -> {
-              Gaussian g =
-                  hermitian ? ring.normal(c.times(ring.unit().negate())) : c;
+              Gaussian g = hermitian ? ring.normal(c.times(ring.unit().negate())) : c;
               if (!g.isReal()) {
                 throw new FamilyFault(
                     e.place(),
@@ -115,7 +114,6 @@ record FamilyBrackets(
   private boolean equal(
       SortedMap<Integer, RationalFunction> a, SortedMap<Integer, RationalFunction> b) {
     return a.keySet().equals(b.keySet())
-        && a.keySet().stream()
-            .allMatch(k -> ring.normal(a.get(k).minus(b.get(k))).isZero());
+        && a.keySet().stream().allMatch(k -> ring.normal(a.get(k).minus(b.get(k))).isZero());
   }
 }

@@ -28,11 +28,12 @@ record FamilyConditions(
     }
     if (!d.isReal()) {
       throw new FamilyFault(
-          c.place(), "a condition on the domain that is not real", "conditions compare real numbers");
+          c.place(),
+          "a condition on the domain that is not real",
+          "conditions compare real numbers");
     }
     if (ring.complex() && c.relation() != Relation.UNEQUAL) {
-      throw new FamilyFault(
-          c.place(), "an order relation over a complex ground", "use = or !=");
+      throw new FamilyFault(c.place(), "an order relation over a complex ground", "use = or !=");
     }
     Polynomial p = polynomial(d.re(), c.relation());
     FamilyCondition condition = new FamilyCondition(p, c.relation(), c.text());
@@ -68,9 +69,7 @@ record FamilyConditions(
     Polynomial p =
         relation == Relation.UNEQUAL ? f.numerator() : f.numerator().times(f.denominator());
     BigInteger content = p.content();
-    return content.signum() == 0
-        ? p
-        : p.over(Polynomial.constant(ring.variables(), content));
+    return content.signum() == 0 ? p : p.over(Polynomial.constant(ring.variables(), content));
   }
 
   /** Adds what holds between functions of a parameter. */

@@ -42,8 +42,7 @@ record FamilyExpressions(
   FamilyValue combination(Expression e, String of) {
     FamilyValue v = e.fold(this);
     if (!v.number().isZero()) {
-      throw new FamilyFault(
-          e.place(), "a number where a combination of " + of + " is expected");
+      throw new FamilyFault(e.place(), "a number where a combination of " + of + " is expected");
     }
     return v;
   }

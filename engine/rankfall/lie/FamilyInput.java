@@ -113,9 +113,7 @@ record FamilyInput<E>(Domain<E> domain, Function<List<RationalFunction>, List<E>
     s.row()
         .forEach(
             (at, v) ->
-                table
-                    .computeIfAbsent(pairs.get(at / n), x -> new TreeMap<>())
-                    .put(at % n, v));
+                table.computeIfAbsent(pairs.get(at / n), x -> new TreeMap<>()).put(at % n, v));
     return new SpanInput.Table<>(
         names,
         new StructureConstants<>(

@@ -18,8 +18,7 @@ import rankfall.exact.RationalFunction;
  * @param values a value a variable; empty for algebraic numbers
  * @param reason why it is no point
  */
-record FamilyPoint(
-    FamilyRing ring, List<Optional<BigFraction>> values, Optional<String> reason) {
+record FamilyPoint(FamilyRing ring, List<Optional<BigFraction>> values, Optional<String> reason) {
 
   static FamilyPoint of(FamilyRing ring, Map<String, BigFraction> given) {
     Map<String, BigFraction> known = new TreeMap<>();
@@ -58,9 +57,7 @@ record FamilyPoint(
 
   private static FamilyPoint no(FamilyRing ring, String reason) {
     return new FamilyPoint(
-        ring,
-        Collections.nCopies(ring.variables().count(), Optional.empty()),
-        Optional.of(reason));
+        ring, Collections.nCopies(ring.variables().count(), Optional.empty()), Optional.of(reason));
   }
 
   private static String coordinates(FamilyRing ring, List<Integer> numbers) {

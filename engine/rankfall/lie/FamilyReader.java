@@ -120,22 +120,22 @@ final class FamilyReader {
       abbreviations.put(
           a.name(), // a fault is on record; any number serves to look for more
           v.orElseGet(
-              () -> FamilyValue.of(Gaussian.real(RationalFunction.of(Polynomial.one(ring.variables()))))));
+              () ->
+                  FamilyValue.of(
+                      Gaussian.real(RationalFunction.of(Polynomial.one(ring.variables()))))));
     }
   }
 
   private FamilyBody matrices(Spec.Matrices m) {
     Map<String, SortedMap<Integer, Gaussian>> known = new LinkedHashMap<>();
-    FamilyExpressions expressions =
-        new FamilyExpressions(ring, abbreviations, known, m.order());
+    FamilyExpressions expressions = new FamilyExpressions(ring, abbreviations, known, m.order());
     List<FamilyBody.Entries> out = new ArrayList<>();
     for (Spec.NamedMatrix x : m.matrices()) {
       SortedMap<Integer, Gaussian> entries = entries(x.body(), m.order(), expressions);
       known.put(x.name(), entries);
       out.add(split(entries));
     }
-    return new FamilyBody.Matrices(
-        m.order(), m.closure() == Spec.Closure.GENERATE, out);
+    return new FamilyBody.Matrices(m.order(), m.closure() == Spec.Closure.GENERATE, out);
   }
 
   private SortedMap<Integer, Gaussian> entries(
@@ -194,8 +194,7 @@ final class FamilyReader {
         .flatMap(Collection::stream)
         .filter(p -> !ring.isNumber(p))
         .distinct()
-        .sorted(
-            Comparator.comparing(Polynomial::totalDegree).thenComparing(Polynomial::toString))
+        .sorted(Comparator.comparing(Polynomial::totalDegree).thenComparing(Polynomial::toString))
         .toList();
   }
 }

@@ -65,8 +65,7 @@ public record FamilyRing(
     }
     for (Spec.Constant c : spec.constants()) {
       try {
-        NumberFieldTower next =
-            extended(tower, c.name(), c.coefficients(), c.near(), numbers);
+        NumberFieldTower next = extended(tower, c.name(), c.coefficients(), c.near(), numbers);
         tower = scan.names().contains(c.name()) ? next : tower;
       } catch (ArithmeticException e) {
         faults.add(
@@ -111,8 +110,7 @@ public record FamilyRing(
     names.addAll(tower.chain().variables().names());
     boolean complex = spec.ground() == Spec.Ground.COMPLEX;
     boolean unit =
-        complex
-            && (scan.names().contains("i") || spec.convention() == Spec.Convention.HERMITIAN);
+        complex && (scan.names().contains("i") || spec.convention() == Spec.Convention.HERMITIAN);
     if (unit) {
       names.add("i");
     }
@@ -121,13 +119,11 @@ public record FamilyRing(
     List<Chain.Rule> rules = new ArrayList<>();
     for (Chain.Rule r : tower.chain().rules()) {
       String name = tower.chain().variables().names().get(r.variable());
-      rules.add(
-          new Chain.Rule(ring.index(name), NumberFieldTower.inRing(r.equation(), ring)));
+      rules.add(new Chain.Rule(ring.index(name), NumberFieldTower.inRing(r.equation(), ring)));
     }
     if (unit) {
       int i = ring.index("i");
-      rules.add(
-          new Chain.Rule(i, Polynomial.variable(ring, i).pow(2).plus(Polynomial.one(ring))));
+      rules.add(new Chain.Rule(i, Polynomial.variable(ring, i).pow(2).plus(Polynomial.one(ring))));
     }
     List<Chain.Rule> identities = functionRules(ring, arguments);
     identities.addAll(rules);
@@ -195,9 +191,7 @@ public record FamilyRing(
               out.add(
                   new Chain.Rule(
                       ring.index(names.get(1)),
-                      kind == Coordinates.CIRCULAR
-                          ? s.plus(c).minus(one)
-                          : s.minus(c).plus(one)));
+                      kind == Coordinates.CIRCULAR ? s.plus(c).minus(one) : s.minus(c).plus(one)));
             }
           }
         });
@@ -298,8 +292,7 @@ public record FamilyRing(
     if (arguments.get(p).contains(Coordinates.EXPONENTIAL)) {
       RationalFunction e = variable("exp(" + p + ")");
       RationalFunction half = number(BigFraction.of(1, 2));
-      return new Pair(
-          e.plus(e.pow(-1)).times(half), e.minus(e.pow(-1)).times(half));
+      return new Pair(e.plus(e.pow(-1)).times(half), e.minus(e.pow(-1)).times(half));
     }
     return new Pair(variable("cosh(" + p + ")"), variable("sinh(" + p + ")"));
   }

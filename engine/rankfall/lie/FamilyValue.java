@@ -8,15 +8,14 @@ import java.util.TreeMap;
 import rankfall.exact.Polynomial;
 
 /**
- * What an expression says: a number plus a combination of basis vectors (matrix units by position, or
- * generators by number).
+ * What an expression says: a number plus a combination of basis vectors (matrix units by position,
+ * or generators by number).
  *
  * @param number the part without vectors
  * @param vector non-zero coefficients
  * @param divisors by what was divided on the way
  */
-record FamilyValue(
-    Gaussian number, SortedMap<Integer, Gaussian> vector, Set<Polynomial> divisors) {
+record FamilyValue(Gaussian number, SortedMap<Integer, Gaussian> vector, Set<Polynomial> divisors) {
   FamilyValue {
     vector = Collections.unmodifiableSortedMap(new TreeMap<>(vector));
     divisors = Collections.unmodifiableSet(new LinkedHashSet<>(divisors));

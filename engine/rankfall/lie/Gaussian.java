@@ -21,8 +21,7 @@ record Gaussian(RationalFunction re, RationalFunction im) {
   }
 
   private static RationalFunction zero(RationalFunction of) {
-    return RationalFunction.of(
-        rankfall.exact.Polynomial.zero(of.numerator().variables()));
+    return RationalFunction.of(rankfall.exact.Polynomial.zero(of.numerator().variables()));
   }
 
   Gaussian plus(Gaussian g) {
@@ -37,8 +36,7 @@ record Gaussian(RationalFunction re, RationalFunction im) {
     if (im.isZero() && g.im.isZero()) {
       return real(re.times(g.re));
     }
-    return new Gaussian(
-        re.times(g.re).minus(im.times(g.im)), re.times(g.im).plus(im.times(g.re)));
+    return new Gaussian(re.times(g.re).minus(im.times(g.im)), re.times(g.im).plus(im.times(g.re)));
   }
 
   /** What vanishes where this does: the real part of a real quotient, else the squared modulus. */

@@ -43,8 +43,7 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
     RationalFunction[][] k = new RationalFunction[n][n];
     for (int i = 0; i < n; i++) {
       for (int j = i; j < n; j++) {
-        Polynomial below =
-            squared.times(constants.scale().get(i)).times(constants.scale().get(j));
+        Polynomial below = squared.times(constants.scale().get(i)).times(constants.scale().get(j));
         k[i][j] = ChainFractions.canonical(chain, traces.get(i).get(j), below);
         k[j][i] = k[i][j];
       }
@@ -58,13 +57,12 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
 
   /** Index sets, ascending, between which all entries are 0. */
   public List<List<Integer>> blocks() {
-    return ZeroPattern.blocks(
-        matrix.size(), (i, j) -> !matrix.get(i).get(j).isZero());
+    return ZeroPattern.blocks(matrix.size(), (i, j) -> !matrix.get(i).get(j).isZero());
   }
 
   /**
-   * The determinant, block by block, as quotient of factored polynomials; a product of blocks is never
-   * expanded.
+   * The determinant, block by block, as quotient of factored polynomials; a product of blocks is
+   * never expanded.
    *
    * @return empty if it is 0
    */
@@ -98,8 +96,7 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
       cleared.add(row);
     }
     RationalFunction d =
-        ChainFractions.canonical(
-            chain, Determinant.of(chain.variables(), cleared), chain.one());
+        ChainFractions.canonical(chain, Determinant.of(chain.variables(), cleared), chain.one());
     if (d.isZero()) {
       return Optional.empty();
     }
@@ -122,9 +119,7 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
     }
 
     static FactoredQuotient of(Factorization f) {
-      return new FactoredQuotient(
-          f,
-          new Factorization(BigFraction.ONE, List.of()));
+      return new FactoredQuotient(f, new Factorization(BigFraction.ONE, List.of()));
     }
 
     FactoredQuotient pow(int exponent) {
@@ -165,10 +160,8 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
         }
       }
       return new FactoredQuotient(
-          new Factorization(
-              BigFraction.of(unit.getNumerator()), above),
-          new Factorization(
-              BigFraction.of(unit.getDenominator()), below));
+          new Factorization(BigFraction.of(unit.getNumerator()), above),
+          new Factorization(BigFraction.of(unit.getDenominator()), below));
     }
 
     private static void add(SortedMap<String, Factor> exponents, Factor x, int sign) {
@@ -180,8 +173,7 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
 
     /** Shorter polynomials first. */
     private static String key(Polynomial p) {
-      return String.format(
-          Locale.ROOT, "%04d %06d %s", p.totalDegree(), p.termCount(), p);
+      return String.format(Locale.ROOT, "%04d %06d %s", p.totalDegree(), p.termCount(), p);
     }
   }
 }

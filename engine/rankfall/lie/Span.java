@@ -44,10 +44,7 @@ public sealed interface Span<E> {
    * @param constants the brackets of the basis
    */
   record Closed<E>(
-      StructureConstants<E> constants,
-      List<Integer> kept,
-      List<String> names,
-      List<E> nonVanishing)
+      StructureConstants<E> constants, List<Integer> kept, List<String> names, List<E> nonVanishing)
       implements Span<E> {
     /** Copies the lists. */
     public Closed {
@@ -60,8 +57,8 @@ public sealed interface Span<E> {
   /**
    * No algebra: a bracket leaves the span, or Jacobi's identity fails.
    *
-   * @param conditions non-zero elements; where none of {@code nonVanishing} vanishes, the span is an
-   *     algebra exactly at the points at which all conditions vanish
+   * @param conditions non-zero elements; where none of {@code nonVanishing} vanishes, the span is
+   *     an algebra exactly at the points at which all conditions vanish
    * @param missing what leaves the span, or fails
    */
   record Open<E>(

@@ -58,8 +58,7 @@ final class SpanCommutator {
           b.subMap(middle, middle + order)
               .forEach(
                   (q, y) ->
-                      to.merge(
-                          shift + row + q % order, domain.times(factor, y), domain::plus));
+                      to.merge(shift + row + q % order, domain.times(factor, y), domain::plus));
         });
   }
 }

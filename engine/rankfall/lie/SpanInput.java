@@ -23,8 +23,7 @@ public sealed interface SpanInput<E> {
    * @param generate whether brackets outside the span join it
    * @param matrices in the listed order
    */
-  record Matrices<E>(
-      Domain<E> domain, int order, boolean generate, List<SpanMatrix<E>> matrices)
+  record Matrices<E>(Domain<E> domain, int order, boolean generate, List<SpanMatrix<E>> matrices)
       implements SpanInput<E> {
     /** Copies the list. */
     public Matrices {

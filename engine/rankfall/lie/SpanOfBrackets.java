@@ -24,8 +24,7 @@ final class SpanOfBrackets {
     }
     Set<E> conditions = new LinkedHashSet<>();
     missing.forEach(m -> conditions.addAll(m.rest().values()));
-    return new Span.Open<>(
-        List.copyOf(conditions), missing, all, input.names(), nonVanishing);
+    return new Span.Open<>(List.copyOf(conditions), missing, all, input.names(), nonVanishing);
   }
 
   /** Three different positions, ascending. */

@@ -12,8 +12,8 @@ import rankfall.exact.Echelon;
 import rankfall.exact.Elimination;
 
 /**
- * The span of matrices and its brackets by one row reduction: a column a basis element, then a column
- * a bracket; rows are the positions of the flattened matrices.
+ * The span of matrices and its brackets by one row reduction: a column a basis element, then a
+ * column a bracket; rows are the positions of the flattened matrices.
  */
 final class SpanOfMatrices<E> {
   private final Domain<E> domain;
@@ -33,10 +33,7 @@ final class SpanOfMatrices<E> {
     List<Integer> kept = independent(input.domain(), input.order(), input.matrices());
     SpanOfMatrices<E> span =
         new SpanOfMatrices<>(
-            input.domain(),
-            input.order(),
-            kept,
-            kept.stream().map(input.matrices()::get).toList());
+            input.domain(), input.order(), kept, kept.stream().map(input.matrices()::get).toList());
     return (input.generate() ? span.generated() : span).result();
   }
 
@@ -61,7 +58,8 @@ final class SpanOfMatrices<E> {
     List<Integer> chosen = independent(domain, order, all);
     return chosen.size() == basis.size()
         ? this
-        : new SpanOfMatrices<>(domain, order, kept, chosen.stream().map(k -> normal(all.get(k))).toList())
+        : new SpanOfMatrices<>(
+                domain, order, kept, chosen.stream().map(k -> normal(all.get(k))).toList())
             .generated();
   }
 
@@ -94,8 +92,7 @@ final class SpanOfMatrices<E> {
     List<SortedMap<Integer, E>> columns = new ArrayList<>();
     basis.forEach(b -> columns.add(flat(b, order)));
     brackets.forEach(b -> columns.add(flat(b.value, order)));
-    Echelon<E> e =
-        Elimination.of(domain, SpanRows.transposed(columns), columns.size(), n, true);
+    Echelon<E> e = Elimination.of(domain, SpanRows.transposed(columns), columns.size(), n, true);
     List<String> names = basis.stream().map(SpanMatrix::name).toList();
     List<E> nonVanishing = e.nonVanishing().stream().distinct().toList();
     if (e.rest().isEmpty()) {
@@ -104,8 +101,7 @@ final class SpanOfMatrices<E> {
     List<Span.Missing<E>> missing = missing(e, brackets, columns);
     Set<E> conditions = new LinkedHashSet<>();
     missing.forEach(m -> conditions.addAll(m.rest().values()));
-    return new Span.Open<>(
-        List.copyOf(conditions), missing, kept, names, nonVanishing);
+    return new Span.Open<>(List.copyOf(conditions), missing, kept, names, nonVanishing);
   }
 
   /** Coordinates of one column in the basis, times a common denominator. */
@@ -166,9 +162,7 @@ final class SpanOfMatrices<E> {
 
   /** Brackets that leave the span: what is left of them after their part inside is taken away. */
   private List<Span.Missing<E>> missing(
-      Echelon<E> e,
-      List<Bracket<E>> brackets,
-      List<SortedMap<Integer, E>> columns) {
+      Echelon<E> e, List<Bracket<E>> brackets, List<SortedMap<Integer, E>> columns) {
     List<Span.Missing<E>> out = new ArrayList<>();
     for (int b = 0; b < brackets.size(); b++) {
       int column = basis.size() + b;
@@ -184,10 +178,8 @@ final class SpanOfMatrices<E> {
               columns
                   .get(k)
                   .forEach(
-                      (p, v) ->
-                          rest.merge(p, domain.negate(domain.times(x, v)), domain::plus)));
-      List<E> units =
-          List.of(basis.get(bracket.left).scale(), basis.get(bracket.right).scale());
+                      (p, v) -> rest.merge(p, domain.negate(domain.times(x, v)), domain::plus)));
+      List<E> units = List.of(basis.get(bracket.left).scale(), basis.get(bracket.right).scale());
       SortedMap<Integer, E> freed = new TreeMap<>();
       SpanRows.kept(domain, rest)
           .forEach((p, v) -> freed.put(p, SpanRows.without(domain, v, units)));

@@ -10,8 +10,8 @@ import rankfall.exact.Domain;
  * The brackets of a basis e_1 .. e_n, kept free of fractions.
  *
  * <p>With y_i = scale_i * e_i the brackets are {@code [y_i, y_j] = (1/denominator) * sum_k C_ij^k
- * y_k}. The C alone are the structure constants of an isomorphic algebra (basis denominator * y_i), so
- * every question that does not depend on the basis may be asked of the C.
+ * y_k}. The C alone are the structure constants of an isomorphic algebra (basis denominator * y_i),
+ * so every question that does not depend on the basis may be asked of the C.
  *
  * @param domain the ring of the C
  * @param dimension n, 0 or more

@@ -30,8 +30,7 @@ public record BranchAlgebra(
 
   /** The same algebra at the general point of a set inside the branch where nothing degenerates. */
   public BranchAlgebra on(Chain chain) {
-    return new BranchAlgebra(
-        reduced(chain, constants), basis, reducedMatrix(chain, killing));
+    return new BranchAlgebra(reduced(chain, constants), basis, reducedMatrix(chain, killing));
   }
 
   /** Structure constants reduced on a chain, up to a common factor. */
@@ -62,13 +61,10 @@ public record BranchAlgebra(
     if (g.bitLength() < 2) {
       return all;
     }
-    return all.stream()
-        .map(p -> p.over(Polynomial.constant(p.variables(), g)))
-        .toList();
+    return all.stream().map(p -> p.over(Polynomial.constant(p.variables(), g))).toList();
   }
 
-  static List<List<Polynomial>> reducedMatrix(
-      Chain chain, List<List<Polynomial>> matrix) {
+  static List<List<Polynomial>> reducedMatrix(Chain chain, List<List<Polynomial>> matrix) {
     List<Polynomial> all = new ArrayList<>();
     matrix.forEach(all::addAll);
     if (all.isEmpty()) {
@@ -90,7 +86,8 @@ public record BranchAlgebra(
   public List<List<Polynomial>> kernel() {
     Chain chain = (Chain) constants.domain();
     List<List<Polynomial>> out = new ArrayList<>();
-    for (SortedMap<Integer, Polynomial> v : killingRank(new KnownNonZero(chain, List.of())).kernel()) {
+    for (SortedMap<Integer, Polynomial> v :
+        killingRank(new KnownNonZero(chain, List.of())).kernel()) {
       List<Polynomial> x = new ArrayList<>();
       for (int i = 0; i < basis.size(); i++) {
         Polynomial c = v.getOrDefault(i, chain.zero());
@@ -143,8 +140,7 @@ public record BranchAlgebra(
         int source = i;
         constants
             .bracket(i, j)
-            .forEach(
-                (k, c) -> byTarget.computeIfAbsent(k, x -> new TreeMap<>()).put(source, c));
+            .forEach((k, c) -> byTarget.computeIfAbsent(k, x -> new TreeMap<>()).put(source, c));
       }
       rows.addAll(byTarget.values());
     }

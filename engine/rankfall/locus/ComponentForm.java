@@ -20,8 +20,8 @@ import rankfall.lie.SpanInput;
 import rankfall.lie.StructureConstants;
 
 /**
- * The algebra and its Killing form at the general point of an irreducible set, with exact values in the
- * basis of the listed generators; checked before anybody sees it.
+ * The algebra and its Killing form at the general point of an irreducible set, with exact values in
+ * the basis of the listed generators; checked before anybody sees it.
  *
  * @param chain the set
  * @param basis names of the basis
@@ -83,8 +83,8 @@ public record ComponentForm(
   }
 
   /**
-   * Of brackets that the spec lists nothing is solved for: constants and form keep their polynomials,
-   * in normal form modulo the equations of the set.
+   * Of brackets that the spec lists nothing is solved for: constants and form keep their
+   * polynomials, in normal form modulo the equations of the set.
    */
   private static ComponentForm ofTable(
       Family family,
@@ -96,11 +96,7 @@ public record ComponentForm(
     StructureConstants<Polynomial> given = table.table();
     StructureConstants<Polynomial> constants =
         new StructureConstants<>(
-            piece.chain(),
-            given.dimension(),
-            given.brackets(),
-            given.denominator(),
-            given.scale());
+            piece.chain(), given.dimension(), given.brackets(), given.denominator(), given.scale());
     List<List<Polynomial>> traces = new AdjointTraces(numbers.variables()).of(constants);
     GroebnerBasis bases = new GroebnerBasis(numbers);
     List<List<RationalFunction>> matrix = new ArrayList<>();
@@ -128,8 +124,7 @@ public record ComponentForm(
 
   /** The laws of the form on random elements, and the plain recomputation at a random point. */
   private void verify(Family family, Piece piece, List<List<Polynomial>> traces, long seed) {
-    Optional<FormCheck.Mismatch> law =
-        new FormCheck<>(LieBracket.of(constants), traces).all(seed);
+    Optional<FormCheck.Mismatch> law = new FormCheck<>(LieBracket.of(constants), traces).all(seed);
     if (law.isPresent()) {
       throw new Mismatch(law.get().law() + " does not hold");
     }
@@ -149,9 +144,7 @@ public record ComponentForm(
     Polynomial c = constants.bracket(i, j).getOrDefault(k, chain.zero());
     List<Polynomial> s = constants.scale();
     return ChainFractions.canonical(
-        solved,
-        c.times(s.get(k)),
-        constants.denominator().times(s.get(i)).times(s.get(j)));
+        solved, c.times(s.get(k)), constants.denominator().times(s.get(i)).times(s.get(j)));
   }
 
   /**

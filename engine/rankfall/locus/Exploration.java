@@ -11,9 +11,9 @@ import rankfall.exact.Polynomial;
 /**
  * Cuts the parameter variety into leaves: on each the profile is the same at every point.
  *
- * <p>Parametric elimination in the sense of Sit (An algorithm for solving parametric linear systems,
- * J. Symb. Comp. 13, 1992): at the general point of a piece the matrices are reduced; where a pivot
- * vanishes, the piece is cut and its part looked at anew.
+ * <p>Parametric elimination in the sense of Sit (An algorithm for solving parametric linear
+ * systems, J. Symb. Comp. 13, 1992): at the general point of a piece the matrices are reduced;
+ * where a pivot vanishes, the piece is cut and its part looked at anew.
  */
 public final class Exploration {
   private final Algebras algebras;
@@ -23,7 +23,9 @@ public final class Exploration {
   private final Deque<Task> open = new ArrayDeque<>();
   private final List<Leaf> leaves = new ArrayList<>();
 
-  /** A piece to look at, with the algebra of the piece that it was cut from, if that still holds. */
+  /**
+   * A piece to look at, with the algebra of the piece that it was cut from, if that still holds.
+   */
   private record Task(Piece piece, List<BranchAlgebra> inherited) {}
 
   private Exploration(Chain constants, Algebras algebras, Meter meter) {
@@ -41,8 +43,7 @@ public final class Exploration {
    * @param start disjoint pieces that cover the points to look at
    * @param meter ends the work early
    */
-  public static Result of(
-      Chain constants, Algebras algebras, List<Piece> start, Meter meter) {
+  public static Result of(Chain constants, Algebras algebras, List<Piece> start, Meter meter) {
     Exploration e = new Exploration(constants, algebras, meter);
     start.forEach(p -> e.open.add(new Task(p, List.of())));
     return e.run();
@@ -121,8 +122,7 @@ public final class Exploration {
     watched.addAll(centre.nonVanishing());
     watched.addAll(killing.nonVanishing());
     int n = algebra.constants().dimension();
-    Profile profile =
-        new Profile(n, killing.rank(), derived.rank(), n - centre.rank());
+    Profile profile = new Profile(n, killing.rank(), derived.rank(), n - centre.rank());
     return new Leaf.Defined(cut(piece, watched, List.of(algebra), cut), profile, algebra);
   }
 

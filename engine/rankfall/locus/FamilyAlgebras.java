@@ -51,11 +51,12 @@ public record FamilyAlgebras(Family family) implements Algebras {
     StructureConstants<Polynomial> c = t.table();
     return new SpanInput.Table<>(
         t.names(),
-        new StructureConstants<>(
-            domain, c.dimension(), c.brackets(), c.denominator(), c.scale()));
+        new StructureConstants<>(domain, c.dimension(), c.brackets(), c.denominator(), c.scale()));
   }
 
-  /** The polynomials that must not vanish at a point of the family: poles, and what `!=` excludes. */
+  /**
+   * The polynomials that must not vanish at a point of the family: poles, and what `!=` excludes.
+   */
   public List<Polynomial> excluded() {
     List<Polynomial> out = new ArrayList<>(family.poles());
     family.domain().stream()

@@ -17,8 +17,8 @@ import rankfall.lie.StructureConstants;
 import rankfall.lie.Subspace;
 
 /**
- * The dimensions of radical and nilradical all over a stratum: at its general point, and where inside it
- * they differ.
+ * The dimensions of radical and nilradical all over a stratum: at its general point, and where
+ * inside it they differ.
  *
  * @param general at the general point
  * @param deviations where inside the stratum they differ

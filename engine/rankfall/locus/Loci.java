@@ -11,8 +11,8 @@ import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
 
 /**
- * The loci of codimension one in a component on which the Killing form degenerates, or falls further in
- * rank.
+ * The loci of codimension one in a component on which the Killing form degenerates, or falls
+ * further in rank.
  */
 public final class Loci {
   private final Algebras algebras;
@@ -37,8 +37,8 @@ public final class Loci {
    *
    * @param closure its general point
    * @param equations those of its prime ideal that do not hold on the whole component
-   * @param multiplicity in the determinant; empty where there is none, or where the coordinates of the
-   *     component do not tell it
+   * @param multiplicity in the determinant; empty where there is none, or where the coordinates of
+   *     the component do not tell it
    * @param algebra at its general point; empty where the span is not closed there
    */
   public record Locus(
@@ -48,8 +48,7 @@ public final class Loci {
       Optional<BranchAlgebra> algebra) {
     /** The rank of the Killing form at the general point. */
     public Optional<Integer> rank() {
-      return algebra.map(
-          a -> a.constants().dimension() - a.kernel().size());
+      return algebra.map(a -> a.constants().dimension() - a.kernel().size());
     }
   }
 
@@ -60,8 +59,8 @@ public final class Loci {
    * @param profile at the general point
    * @param leaves of an exploration, complete or not
    * @param determinant the factors of the determinant's numerator; empty where it is 0
-   * @param blocks polynomials of which the determinant is the product on the component, up to a number;
-   *     empty where it is not known in this form
+   * @param blocks polynomials of which the determinant is the product on the component, up to a
+   *     number; empty where it is not known in this form
    * @return by text of the equations
    */
   public List<Locus> in(
@@ -113,9 +112,7 @@ public final class Loci {
       List<Polynomial> blocks,
       Optional<BranchAlgebra> algebra) {
     Optional<Integer> multiplicity =
-        isChart(component, w)
-            ? multiplicity(w, determinant)
-            : inAnotherChart(component, w, blocks);
+        isChart(component, w) ? multiplicity(w, determinant) : inAnotherChart(component, w, blocks);
     return new Locus(w, equations(component, w), multiplicity, algebra);
   }
 
@@ -135,8 +132,7 @@ public final class Loci {
   }
 
   /** The same in other free coordinates of the component, which serve near w. */
-  private Optional<Integer> inAnotherChart(
-      Chain component, Chain w, List<Polynomial> blocks) {
+  private Optional<Integer> inAnotherChart(Chain component, Chain w, List<Polynomial> blocks) {
     if (blocks.isEmpty()) {
       return Optional.empty();
     }
@@ -182,5 +178,4 @@ public final class Loci {
         ? Optional.of(closed.algebra())
         : Optional.empty();
   }
-
 }

@@ -2,7 +2,9 @@ package rankfall.locus;
 
 import java.time.Duration;
 
-/** Counts branches and watches the time of one family; asked often, ends a computation by throwing. */
+/**
+ * Counts branches and watches the time of one family; asked often, ends a computation by throwing.
+ */
 public final class Meter {
   private final long deadline;
   private final int limit;

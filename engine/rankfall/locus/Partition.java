@@ -45,23 +45,40 @@ public record Partition(
   }
 
   /**
-   * A family of which only the general point of the whole space was looked at.
+   * A family of which only the components of the relations (of the spec, of functions, and Jacobi's
+   * identity) were looked at, at their general points.
    *
    * @param family the family
-   * @return no leaf, unless every choice of parameters is a point; then that of the general point
+   * @param meter ends the work early
    */
-  public static Partition notYet(Family family) {
+  public static Partition start(Family family, Meter meter) {
     Chain constants = family.ring().constants();
-    Piece all = new Piece(constants, List.of());
+    FamilyAlgebras algebras = new FamilyAlgebras(family);
     List<Polynomial> conditions = generalConditions(family);
-    List<Leaf> leaves = new ArrayList<>();
-    if (conditions.isEmpty()
-        && family.relations().isEmpty()
-        && new FamilyAlgebras(family).on(all) instanceof Algebras.Closed closed) {
-      leaves.add(Exploration.general(all, closed.algebra()));
+    List<Polynomial> equations =
+        new ArrayList<>(family.relations().stream().map(FamilyRelation::polynomial).toList());
+    if (isTable(family)) {
+      equations.addAll(conditions);
     }
-    return new Partition(
-        conditions, Optional.empty(), leaves, Optional.empty(), List.of(all), "out of budget");
+    List<Leaf> leaves = new ArrayList<>();
+    Optional<Decomposition> variety = Optional.empty();
+    String reason = "out of budget";
+    try {
+      Decomposition d =
+          Decomposition.of(
+              constants, equations, irreducible(constants, algebras.excluded()), meter);
+      variety = Optional.of(d);
+      for (Decomposition.Component c : d.components()) {
+        Piece piece = new Piece(c.chain(), List.of());
+        if (algebras.on(piece) instanceof Algebras.Closed closed) {
+          leaves.add(Exploration.general(piece, closed.algebra()));
+        }
+      }
+    } catch (Meter.Exhausted e) {
+      reason = e.getMessage();
+    }
+    Piece all = new Piece(constants, List.of());
+    return new Partition(conditions, variety, leaves, Optional.empty(), List.of(all), reason);
   }
 
   /**
@@ -69,34 +86,31 @@ public record Partition(
    *
    * @param family the family
    * @param meter ends the work early
+   * @return this one if the components are not known
    */
-  public static Partition of(Family family, Meter meter) {
+  public Partition completed(Family family, Meter meter) {
+    if (variety.isEmpty()) {
+      return this;
+    }
     Chain constants = family.ring().constants();
     FamilyAlgebras algebras = new FamilyAlgebras(family);
-    List<Polynomial> excluded = irreducible(constants, algebras.excluded());
-    List<Polynomial> conditions = generalConditions(family);
-    List<Polynomial> equations =
-        new ArrayList<>(family.relations().stream().map(FamilyRelation::polynomial).toList());
-    if (isTable(family)) {
-      equations.addAll(conditions);
+    Exploration.Result e = Exploration.of(constants, algebras, variety.get().pieces(), meter);
+    if (!e.undecided().isEmpty()) {
+      return new Partition(
+          conditions, variety, e.leaves(), Optional.empty(), e.undecided(), e.reason());
     }
     try {
-      Decomposition variety = Decomposition.of(constants, equations, excluded, meter);
-      Exploration.Result e = Exploration.of(constants, algebras, variety.pieces(), meter);
-      Optional<Strata.Result> strata =
-          e.undecided().isEmpty()
-              ? Optional.of(Strata.of(constants, e.leaves(), excluded, meter))
-              : Optional.empty();
-      return new Partition(
-          conditions, Optional.of(variety), e.leaves(), strata, e.undecided(), e.reason());
-    } catch (Meter.Exhausted e) {
+      List<Polynomial> excluded = irreducible(constants, algebras.excluded());
+      Strata.Result strata = Strata.of(constants, e.leaves(), excluded, meter);
+      return new Partition(conditions, variety, e.leaves(), Optional.of(strata), List.of(), "");
+    } catch (Meter.Exhausted x) {
       return new Partition(
           conditions,
+          variety,
+          e.leaves(),
           Optional.empty(),
-          List.of(),
-          Optional.empty(),
-          List.of(new Piece(constants, List.of())),
-          e.getMessage());
+          variety.get().pieces(),
+          x.getMessage());
     }
   }
 

@@ -7,8 +7,8 @@ import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
 
 /**
- * An irreducible locally closed set: the points that satisfy the rules of a chain, at which no initial
- * and none of some polynomials vanishes.
+ * An irreducible locally closed set: the points that satisfy the rules of a chain, at which no
+ * initial and none of some polynomials vanishes.
  *
  * @param chain irreducible
  * @param nonZero primitive irreducible polynomials, none of which vanishes on the chain; the

@@ -50,8 +50,7 @@ public final class RealPoints {
     }
     for (Leaf.Defined leaf : stratum.leaves()) {
       Chain chain = leaf.piece().chain();
-      List<Polynomial> equations =
-          chain.rules().stream().map(Chain.Rule::equation).toList();
+      List<Polynomial> equations = chain.rules().stream().map(Chain.Rule::equation).toList();
       RealZeros.Answer answer = ask(equations, leaf.piece().nonZero());
       if (answer.verdict() == RealZeros.Verdict.YES) {
         return answer;
@@ -67,8 +66,7 @@ public final class RealPoints {
     List<Polynomial> all = new ArrayList<>(equations);
     family.ring().constants().rules().forEach(r -> all.add(r.equation()));
     List<RealZeros.Condition> conditions = new ArrayList<>();
-    nonZero.forEach(
-        p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));
+    nonZero.forEach(p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));
     family.poles().stream()
         .filter(p -> !equations.contains(p))
         .forEach(p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));

@@ -16,8 +16,8 @@ import rankfall.lie.Span;
 import rankfall.lie.StructureConstants;
 
 /**
- * Recomputes a Killing form from the generators at one exact point by plain sums, and compares it with
- * the symbolic matrix evaluated there.
+ * Recomputes a Killing form from the generators at one exact point by plain sums, and compares it
+ * with the symbolic matrix evaluated there.
  */
 public final class SecondPath {
   private static final int TRIES = 60;
@@ -110,8 +110,7 @@ public final class SecondPath {
     for (int i = 0; i < plain.size(); i++) {
       for (int j = 0; j < plain.size(); j++) {
         RationalFunction f = form.matrix().get(i).get(j);
-        Polynomial below =
-            squared.times(constants.scale().get(i)).times(constants.scale().get(j));
+        Polynomial below = squared.times(constants.scale().get(i)).times(constants.scale().get(j));
         Polynomial difference =
             f.numerator().times(below).minus(plain.get(i).get(j).times(f.denominator()));
         if (!point.vanishes(difference)) {

@@ -13,10 +13,10 @@ import rankfall.exact.Polynomial;
 /**
  * Cuts the zeros of polynomials into irreducible locally closed pieces.
  *
- * <p>Products are cut into their factors, equations linear in a variable are solved with a branch on
- * the coefficient, what remains becomes a tower of irreducible equations (characteristic sets of Ritt
- * and Wu; Wang, Elimination Methods, 2001, ch. 4). Every step divides a set into disjoint parts, so the
- * pieces are disjoint and cover exactly the zeros.
+ * <p>Products are cut into their factors, equations linear in a variable are solved with a branch
+ * on the coefficient, what remains becomes a tower of irreducible equations (characteristic sets of
+ * Ritt and Wu; Wang, Elimination Methods, 2001, ch. 4). Every step divides a set into disjoint
+ * parts, so the pieces are disjoint and cover exactly the zeros.
  */
 public final class Splitter {
   private static final int UNWELCOME = 100_000;
@@ -44,8 +44,8 @@ public final class Splitter {
   }
 
   /**
-   * A splitter that solves, where it can, only for variables whose coefficient does not vanish on a set,
-   * so that its pieces serve near the general point of that set.
+   * A splitter that solves, where it can, only for variables whose coefficient does not vanish on a
+   * set, so that its pieces serve near the general point of that set.
    *
    * @param near the general point of the set
    */

@@ -37,9 +37,9 @@ record LatexStrata(Formulas formulas) {
           Words.realPoints(s.realPoints()));
     }
     return "\\n"
-               + "oindent Columns: codimension $c$ of the closure; dimensions $n$ of the algebra,"
-               + " $d$ of the derived algebra, $z$ of the centre, $s$ of the radical, $u$ of the"
-               + " nilradical; rank $r$ of the Killing form.\n\n"
+        + "oindent Columns: codimension $c$ of the closure; dimensions $n$ of the algebra,"
+        + " $d$ of the derived algebra, $z$ of the centre, $s$ of the radical, $u$ of the"
+        + " nilradical; rank $r$ of the Killing form.\n\n"
         + table.text();
   }
 

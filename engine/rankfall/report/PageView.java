@@ -71,11 +71,7 @@ record PageView(
 
   /** A locus of degeneration. */
   record ConditionView(
-      SafeString formula,
-      String multiplicity,
-      String rank,
-      SafeString kernel,
-      String realPoints) {}
+      SafeString formula, String multiplicity, String rank, SafeString kernel, String realPoints) {}
 
   /** An entry of a large matrix. */
   record EntryView(SafeString row, SafeString column, SafeString value) {}

@@ -41,11 +41,7 @@ final class RotationAlgebra {
       }
     }
     return new StructureConstants<>(
-        ring,
-        planes.size(),
-        brackets,
-        ring.one(),
-        planes.stream().map(p -> ring.one()).toList());
+        ring, planes.size(), brackets, ring.one(), planes.stream().map(p -> ring.one()).toList());
   }
 
   private static SortedMap<Integer, Polynomial> bracket(

@@ -53,8 +53,7 @@ final class ReportFolders {
    * @param found by path
    * @return a sentence for each file that is missing, not due, or different
    */
-  static List<String> differences(
-      SortedMap<String, String> due, SortedMap<String, String> found) {
+  static List<String> differences(SortedMap<String, String> due, SortedMap<String, String> found) {
     TreeSet<String> names = new TreeSet<>(due.keySet());
     names.addAll(found.keySet());
     List<String> out = new ArrayList<>();

@@ -86,8 +86,7 @@ class ShippedReportsTest {
     SortedMap<String, String> found = ReportFolders.read(folder);
     List<String> summary = found.get("summary.csv").lines().toList();
     assertEquals(2, summary.size());
-    assertTrue(
-        summary.get(1).startsWith("symplectic-two-modes,incomplete,10,"), summary.get(1));
+    assertTrue(summary.get(1).startsWith("symplectic-two-modes,incomplete,10,"), summary.get(1));
     assertTrue(summary.get(1).contains("not decided (out of time)"), summary.get(1));
     String result = found.get("symplectic-two-modes/result.json");
     assertTrue(result.contains("\"status\" : \"incomplete\""), result);

@@ -30,8 +30,7 @@ class ChainFractionsTest {
     assertEquals("s/2", ChainFractions.canonical(roots, one, s).toString());
     // 1/(sqrt 2 + sqrt 3) = sqrt 3 - sqrt 2
     assertEquals("-s + t", ChainFractions.canonical(roots, one, s.plus(t)).toString());
-    assertEquals(
-        "(a + s)/(a^2 - 2)", ChainFractions.canonical(roots, one, a.minus(s)).toString());
+    assertEquals("(a + s)/(a^2 - 2)", ChainFractions.canonical(roots, one, a.minus(s)).toString());
   }
 
   @Test
@@ -43,8 +42,7 @@ class ChainFractionsTest {
         ChainFractions.canonical(roots, b.times(k), d.times(k)));
     RationalFunction inverse = ChainFractions.canonical(roots, one, d);
     assertEquals(
-        "1",
-        ChainFractions.canonical(roots, inverse.times(RationalFunction.of(d))).toString());
+        "1", ChainFractions.canonical(roots, inverse.times(RationalFunction.of(d))).toString());
   }
 
   /** The tower s^2 = 2, t with (a*s)*t^3 = t + 1: an initial that is not 1. */

@@ -57,7 +57,8 @@ class AnalysisReadingTest {
                       RationalFunction.of(
                           Polynomial.one(T), VARIABLE.times(Polynomial.constant(T, 4)))),
                   new MatrixEntry(2, 2, RationalFunction.of(T, BigFraction.of(1, 8))))),
-          List.of(new Analysis.Condition(
+          List.of(
+              new Analysis.Condition(
                   List.of(VARIABLE),
                   Optional.of(2),
                   Optional.of(1),

@@ -77,8 +77,7 @@ final class FormulaPoints {
       constants.forEach(
           (name, c) ->
               numbers.put(
-                  name.toString(),
-                  constant(name.toString(), ((Map<?, ?>) c).get("minimal"))));
+                  name.toString(), constant(name.toString(), ((Map<?, ?>) c).get("minimal"))));
     }
     return List.copyOf(numbers.values());
   }

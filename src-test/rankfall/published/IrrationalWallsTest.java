@@ -32,11 +32,10 @@ class IrrationalWallsTest {
     List<Analysis.Condition> conditions =
         analysis.findings().orElseThrow().components().get(0).conditions();
     List<String> due = second == null ? List.of(first) : List.of(first, second);
-    assertEquals(
-        due, conditions.stream().map(c -> c.equations().get(0).toString()).toList());
+    assertEquals(due, conditions.stream().map(c -> c.equations().get(0).toString()).toList());
     for (Analysis.Condition c : conditions) {
       assertEquals(1, c.equations().size());
-      assertEquals(2, c.multiplicity());
+      assertEquals(2, c.multiplicity().orElseThrow());
       assertEquals(1, c.rank().orElseThrow());
       assertEquals(RealPoints.YES, c.realPoints());
     }

@@ -77,9 +77,7 @@ final class PublishedComparison {
         .conditions()
         .ifPresent(due -> differences.addAll(conditions(due, observed.conditions())));
     PublishedSets sets = PublishedSets.of(published);
-    published
-        .strata()
-        .ifPresent(due -> differences.addAll(sets.strata(due, observed.strata())));
+    published.strata().ifPresent(due -> differences.addAll(sets.strata(due, observed.strata())));
     published
         .loci()
         .forEach((key, due) -> differences.addAll(sets.union(key, due, observed.components())));

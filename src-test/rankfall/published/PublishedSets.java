@@ -31,8 +31,7 @@ import rankfall.published.Quantity.Root;
 record PublishedSets(List<Root> numbers, List<String> relations) {
   private static final Pattern NAME =
       Pattern.compile("\\p{L}[\\p{L}\\d_]*(\\([^()]*\\))?", Pattern.UNICODE_CHARACTER_CLASS);
-  private static final Pattern FUNCTION =
-      Pattern.compile("(cos|sin|cosh|sinh)\\(([^()]*)\\)");
+  private static final Pattern FUNCTION = Pattern.compile("(cos|sin|cosh|sinh)\\(([^()]*)\\)");
 
   static PublishedSets of(PublishedEntry entry) {
     return new PublishedSets(FormulaPoints.numbers(entry), FormulaPoints.relations(entry));

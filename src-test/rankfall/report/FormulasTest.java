@@ -57,7 +57,7 @@ class FormulasTest {
         "exp(t)|\\exp(t)",
         "sqrt(2)|\\sqrt{2}",
         "sqrt(1/2)|\\sqrt{\\frac{1}{2}}",
-        "[X,[Y_1,Z]]|[X, [Y_{1}, Z]]",
+        "[X,[Y_1,Z]]|[X, \\allowbreak [Y_{1}, Z]]",
         "a*b - 2*c^2 >= 0|ab - 2c^{2} \\geq 0",
         "a != -1/2|a \\neq -\\frac{1}{2}",
         "(a + b)^2*c = 0|(a + b)^{2}c = 0",

@@ -119,7 +119,13 @@ final class SampleAnalyses {
                     new MatrixEntry(1, 2, RationalFunction.of(b, a.times(BigInteger.valueOf(4)))))),
             List.of(
                 new Condition(
-                    List.of(a), Optional.of(2), Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES)));
+                    List.of(a),
+                    Optional.of(2),
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 1), unit(v, 3, 2)),
+                    RealPoints.YES)));
     return new Analysis(
         spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
         "0.1.0",
@@ -198,9 +204,21 @@ final class SampleAnalyses {
             Optional.empty(),
             List.of(
                 new Condition(
-                    List.of(a), Optional.of(2), Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 1), unit(v, 3, 2)), RealPoints.YES),
+                    List.of(a),
+                    Optional.of(2),
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 1), unit(v, 3, 2)),
+                    RealPoints.YES),
                 new Condition(
-                    List.of(b), Optional.of(2), Optional.of(1), Optional.of(2), basis, List.of(unit(v, 3, 0), unit(v, 3, 2)), RealPoints.YES),
+                    List.of(b),
+                    Optional.of(2),
+                    Optional.of(1),
+                    Optional.of(2),
+                    basis,
+                    List.of(unit(v, 3, 0), unit(v, 3, 2)),
+                    RealPoints.YES),
                 new Condition(
                     List.of(c),
                     Optional.of(2),

@@ -76,10 +76,10 @@ final class Brackets {
                       terms.put(
                           k,
                           quotient(
-                                  v.multiply(c.scale().get(k)),
-                                  c.denominator()
-                                      .multiply(c.scale().get(p.left()))
-                                      .multiply(c.scale().get(p.right())))));
+                              v.multiply(c.scale().get(k)),
+                              c.denominator()
+                                  .multiply(c.scale().get(p.left()))
+                                  .multiply(c.scale().get(p.right())))));
               out.add(line(closed.names(), p, terms));
             });
     return out;

@@ -38,10 +38,10 @@ class FamilyTest {
     assertEquals(
         List.of("a^2 + b^2 - 1"),
         f.relations().stream().map(r -> r.polynomial().toString()).toList());
-    assertEquals(List.of(Relation.GREATER), f.domain().stream().map(FamilyCondition::relation).toList());
-    assertEquals(List.of("b"), f.poles().stream().map(Polynomial::toString).toList());
     assertEquals(
-        "the point is off the relation a^2 + b^2 - 1 = 0", outside(f, "a=1", "b=1"));
+        List.of(Relation.GREATER), f.domain().stream().map(FamilyCondition::relation).toList());
+    assertEquals(List.of("b"), f.poles().stream().map(Polynomial::toString).toList());
+    assertEquals("the point is off the relation a^2 + b^2 - 1 = 0", outside(f, "a=1", "b=1"));
     assertEquals("entry has a pole: b = 0", outside(f, "a=1", "b=0"));
     assertEquals("outside the domain: b GREATER 0", outside(f, "a=3/5", "b=-4/5"));
     assertInstanceOf(FamilySite.Algebraic.class, f.at(Specs.point("a=3/5", "b=4/5")));
@@ -53,9 +53,7 @@ class FamilyTest {
   void signOfAnAlgebraicNumberIsCertified() {
     Family f =
         Brackets.family(
-            Specs.real("a")
-                .where("a", Relation.LESS, "sqrt(2) + sqrt(3)")
-                .bracket("X", "Y", "Y"));
+            Specs.real("a").where("a", Relation.LESS, "sqrt(2) + sqrt(3)").bracket("X", "Y", "Y"));
     // sqrt(2) + sqrt(3) = 3.14626436994...
     assertInstanceOf(FamilySite.Algebraic.class, f.at(Specs.point("a=314626436/100000000")));
     assertTrue(outside(f, "a=314626437/100000000").startsWith("outside the domain"));
@@ -85,8 +83,7 @@ class FamilyTest {
         List.of("cos(t)", "sin(t)", "exp(t)", "cos(u)", "sin(u)"), f.ring().variables().names());
     assertEquals(
         List.of("cos(u)", "exp(t)"), f.poles().stream().map(Polynomial::toString).toList());
-    assertEquals(
-        List.of("exp(t) > 0"), f.domain().stream().map(FamilyCondition::text).toList());
+    assertEquals(List.of("exp(t) > 0"), f.domain().stream().map(FamilyCondition::text).toList());
     assertEquals(
         List.of("cos(t)^2 + sin(t)^2 - 1", "cos(u)^2 + sin(u)^2 - 1"),
         f.relations().stream().map(r -> r.polynomial().toString()).toList());
@@ -111,8 +108,7 @@ class FamilyTest {
     assertEquals(List.of("t", "cosh(t)", "sinh(t)"), f.ring().variables().names());
     assertEquals(List.of("[X,Y]=(2*cosh(t)^2 + t - 1)Y"), Brackets.of(f));
     Family g = Brackets.family(Specs.real("t").bracket("X", "Y", "cosh(t)*Y"));
-    assertEquals(
-        "outside the domain: cosh(t) >= 1", outside(g, "cosh(t)=-1", "sinh(t)=0"));
+    assertEquals("outside the domain: cosh(t) >= 1", outside(g, "cosh(t)=-1", "sinh(t)=0"));
     assertInstanceOf(FamilySite.Rational.class, g.at(Specs.point("t=0")));
   }
 
@@ -187,16 +183,14 @@ class FamilyTest {
                 .matrix("X", "0,D*(a-1);0,0")
                 .matrix("Y", "a/a,0;0,0"));
     assertEquals(
-        List.of("a", "a + 1", "a - 1"),
-        f.poles().stream().map(Polynomial::toString).toList());
+        List.of("a", "a + 1", "a - 1"), f.poles().stream().map(Polynomial::toString).toList());
     assertEquals("entry has a pole: a - 1 = 0", outside(f, "a=1"));
     Polynomial a = Polynomial.variable(f.ring().variables(), 0);
     Chain point =
         new Chain(
             f.ring().variables(),
             List.of(new Chain.Rule(0, a.plus(Polynomial.one(f.ring().variables())))));
-    assertEquals(
-        new FamilySite.Outside("entry has a pole: a + 1 = 0"), f.on(point));
+    assertEquals(new FamilySite.Outside("entry has a pole: a + 1 = 0"), f.on(point));
   }
 
   @Test

@@ -28,8 +28,7 @@ class SpanTest {
   @Test
   void rotationsOfAMetric() {
     Family f = Brackets.family(rotations());
-    assertEquals(
-        List.of("[X,Y]=(c)Z", "[X,Z]=(-b)Y", "[Y,Z]=(a)X"), Brackets.of(f));
+    assertEquals(List.of("[X,Y]=(c)Z", "[X,Z]=(-b)Y", "[Y,Z]=(a)X"), Brackets.of(f));
     assertEquals(List.of("a", "b", "c"), f.ring().variables().names());
   }
 
@@ -45,8 +44,7 @@ class SpanTest {
   }
 
   private static Span<BigInteger> rational(Family f, String... point) {
-    return Span.of(
-        assertInstanceOf(FamilySite.Rational.class, f.at(Specs.point(point))).input());
+    return Span.of(assertInstanceOf(FamilySite.Rational.class, f.at(Specs.point(point))).input());
   }
 
   @Test
@@ -86,8 +84,7 @@ class SpanTest {
             .matrix("B", "0,-i/2; i/2,0")
             .matrix("C", "1/2,0; 0,-1/2");
     assertEquals(
-        List.of("[A,B]=(1)C", "[A,C]=(-1)B", "[B,C]=(1)A"),
-        Brackets.of(Brackets.family(matrices)));
+        List.of("[A,B]=(1)C", "[A,C]=(-1)B", "[B,C]=(1)A"), Brackets.of(Brackets.family(matrices)));
   }
 
   @Test
@@ -102,8 +99,7 @@ class SpanTest {
             .matrix("iF", "0,0;i,0");
     Span.Closed<Polynomial> c = Brackets.closed(Brackets.family(s));
     assertEquals(6, c.constants().dimension());
-    assertTrue(
-        Brackets.of(Brackets.family(s)).containsAll(List.of("[H,E]=(2)E", "[iH,iE]=(-2)E")));
+    assertTrue(Brackets.of(Brackets.family(s)).containsAll(List.of("[H,E]=(2)E", "[iH,iE]=(-2)E")));
     Specs over = Specs.complex().matrix("H", "1,0;0,-1").matrix("iH", "i,0;0,-i");
     assertEquals(List.of(0), Brackets.closed(Brackets.family(over)).kept());
   }
@@ -130,9 +126,7 @@ class SpanTest {
   void cubicConstant() {
     Family f =
         Brackets.family(
-            Specs.real()
-                .constant("w", 1.3247, -1, -1, 0, 1)
-                .bracket("H", "E", "w^3*E + E/w"));
+            Specs.real().constant("w", 1.3247, -1, -1, 0, 1).bracket("H", "E", "w^3*E + E/w"));
     // 1/w = w^2 - 1 and w^3 = w + 1
     assertEquals(List.of("[H,E]=(w^2 + w)E"), Brackets.of(f));
   }
@@ -150,8 +144,7 @@ class SpanTest {
     assertEquals(List.of("[X,Y]=(1)Z", "[X,Z]=(-1)Y", "[Y,Z]=(1)X"), Brackets.of(f));
     assertEquals(
         List.of("[X,Y]=(1)Z", "[X,Z]=(-1)Y", "[Y,Z]=(1)X"),
-        Brackets.ofIntegers(
-            (Span.Closed<BigInteger>) rational(f, "cos(t)=3/5", "sin(t)=4/5")));
+        Brackets.ofIntegers((Span.Closed<BigInteger>) rational(f, "cos(t)=3/5", "sin(t)=4/5")));
   }
 
   @Test
@@ -166,10 +159,8 @@ class SpanTest {
     assertEquals(List.of("[X,Y]=(1)[X,Y]"), Brackets.of(f));
     assertEquals(List.of("X"), rational(f, "a=0").names());
     Family sl2 =
-        Brackets.family(
-            Specs.real("a").generate().matrix("E", "0,a;0,0").matrix("F", "0,0;1/a,0"));
-    assertEquals(
-        List.of("[E,F]=(1)[E,F]", "[E,[E,F]]=(-2)E", "[F,[E,F]]=(2)F"), Brackets.of(sl2));
+        Brackets.family(Specs.real("a").generate().matrix("E", "0,a;0,0").matrix("F", "0,0;1/a,0"));
+    assertEquals(List.of("[E,F]=(1)[E,F]", "[E,[E,F]]=(-2)E", "[F,[E,F]]=(2)F"), Brackets.of(sl2));
   }
 
   /** By hand: [X, Y] = (a - b) E13 leaves the span unless a = b. */
@@ -238,8 +229,7 @@ class SpanTest {
       }
     }
     Family f = Brackets.family(s);
-    Span.Closed<Polynomial> c =
-        assertTimeout(Duration.ofSeconds(10), () -> Brackets.closed(f));
+    Span.Closed<Polynomial> c = assertTimeout(Duration.ofSeconds(10), () -> Brackets.closed(f));
     assertEquals(120, c.constants().dimension());
     assertEquals(16 * 15 * 14 / 2, c.constants().brackets().size());
   }

@@ -66,7 +66,9 @@ final class Specs {
     constants.add(
         new Spec.Constant(
             name,
-            Arrays.stream(coefficients).mapToObj(c -> BigFraction.of(BigInteger.valueOf(c))).toList(),
+            Arrays.stream(coefficients)
+                .mapToObj(c -> BigFraction.of(BigInteger.valueOf(c)))
+                .toList(),
             BigFraction.from(near),
             place()));
     return this;
@@ -272,8 +274,7 @@ final class Specs {
           String[] factors = part.split("\\*");
           String p = factors[factors.length - 1];
           BigInteger k = factors.length > 1 ? new BigInteger(factors[0]) : BigInteger.ONE;
-          argument.put(
-              p.replace("-", ""), p.startsWith("-") ? k.negate() : k);
+          argument.put(p.replace("-", ""), p.startsWith("-") ? k.negate() : k);
         }
       }
       return new Expression.Function(
