@@ -125,9 +125,8 @@ class PublishedPartitionsTest {
   }
 
   /**
-   * Shelton, Taylor and Wecht 2005: the quadratic constraints of the fluxes, here f1 q1 = f2 q2 = h
-   * r. Without the
-   * non-geometric fluxes q1, q2 and r the general algebra is iso(3).
+   * Shelton, Taylor and Wecht 2005: the quadratic constraints of the fluxes, here f1 q1 = f2 q2
+   * = h r. Without the non-geometric fluxes q1, q2 and r the general algebra is iso(3).
    */
   @Test
   void quadraticConstraintsOfSixFluxes() {
