@@ -13,6 +13,7 @@ import rankfall.Engine;
 import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
 import rankfall.lie.Family;
+import rankfall.lie.FamilyRelation;
 import rankfall.published.PublishedTables;
 import rankfall.spec.Spec;
 import rankfall.spec.SpecException;
@@ -55,6 +56,17 @@ record Analysed(Spec spec, Analysis analysis) {
         throw new IllegalStateException(analysis.message());
       }
       return new Analysed(spec, analysis);
+    } catch (SpecException e) {
+      throw new IllegalArgumentException(e.diagnostics().toString(), e);
+    }
+  }
+
+  /** The polynomials that a spec wants to vanish. */
+  static List<Polynomial> relations(String yaml) {
+    try {
+      Spec spec =
+          SpecReader.read("test.yaml", yaml.getBytes(StandardCharsets.UTF_8)).get(0).orThrow();
+      return Family.of(spec).relations().stream().map(FamilyRelation::polynomial).toList();
     } catch (SpecException e) {
       throw new IllegalArgumentException(e.diagnostics().toString(), e);
     }
