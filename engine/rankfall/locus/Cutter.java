@@ -6,16 +6,13 @@ import java.util.List;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import rankfall.exact.Chain;
-import rankfall.exact.ChainFactoring;
 import rankfall.exact.Polynomial;
 
 /** Cuts the zeros of polynomials off a piece. */
 final class Cutter {
-  private final Chain constants;
   private final Splitter splitter;
 
   Cutter(Chain constants, Meter meter) {
-    this.constants = constants;
     this.splitter = new Splitter(constants, meter);
   }
 
@@ -33,7 +30,7 @@ final class Cutter {
     for (Polynomial w : watched) {
       Polynomial r = piece.chain().reduced(w);
       if (!r.isConstant()) {
-        for (Polynomial f : ChainFactoring.irreducible(constants, r)) {
+        for (Polynomial f : splitter.factors().of(r)) {
           if (!piece.nonZero().contains(f)) {
             factors.put(f.toString(), f);
           }

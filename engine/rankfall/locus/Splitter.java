@@ -24,6 +24,7 @@ public final class Splitter {
   private final Chain constants;
   private final Set<Integer> numbers;
   private final Meter meter;
+  private final Factors factors;
   private final Optional<Chain> near;
 
   /**
@@ -33,10 +34,11 @@ public final class Splitter {
    * @param meter asked at every branch
    */
   public Splitter(Chain constants, Meter meter) {
-    this(constants, meter, Optional.empty());
+    this(constants, meter, Optional.empty(), new Factors(constants));
   }
 
-  private Splitter(Chain constants, Meter meter, Optional<Chain> near) {
+  private Splitter(Chain constants, Meter meter, Optional<Chain> near, Factors factors) {
+    this.factors = factors;
     this.near = near;
     this.constants = constants;
     this.numbers = new HashSet<>(constants.rules().stream().map(Chain.Rule::variable).toList());
@@ -50,7 +52,12 @@ public final class Splitter {
    * @param near the general point of the set
    */
   Splitter near(Chain near) {
-    return new Splitter(constants, meter, Optional.of(near));
+    return new Splitter(constants, meter, Optional.of(near), factors);
+  }
+
+  /** The factors that it remembers. */
+  Factors factors() {
+    return factors;
   }
 
   /**
@@ -79,7 +86,7 @@ public final class Splitter {
         return out;
       }
       if (!p.isConstant()) {
-        off.addAll(ChainFactoring.irreducible(constants, p));
+        off.addAll(factors.of(p));
       }
     }
     split(new State(piece.chain(), equations, off), out);
@@ -149,7 +156,7 @@ public final class Splitter {
       return List.of();
     }
     List<Polynomial> out = new ArrayList<>();
-    for (Polynomial f : ChainFactoring.irreducible(constants, r)) {
+    for (Polynomial f : factors.of(r)) {
       if (!s.nonZero().contains(f)) {
         out.add(f);
       }
@@ -223,7 +230,7 @@ public final class Splitter {
       split(s.with(degenerate), out);
     }
     List<Polynomial> off =
-        l.cost() == 0 ? List.of() : ChainFactoring.irreducible(constants, l.slope());
+        l.cost() == 0 ? List.of() : factors.of(l.slope());
     List<Chain.Rule> demoted = storeysWith(s.chain(), l.variable());
     demoted.forEach(r -> others.add(r.equation()));
     Chain below = without(s.chain(), demoted);
@@ -256,7 +263,7 @@ public final class Splitter {
     for (Polynomial p : s.nonZero()) {
       Polynomial r = chain.reduced(p);
       if (!r.isZero() && !r.equals(p)) {
-        known.addAll(ChainFactoring.irreducible(constants, r));
+        known.addAll(factors.of(r));
       }
     }
     return s.on(chain).off(known);
@@ -376,7 +383,7 @@ public final class Splitter {
 
   private void addFactors(List<Polynomial> off, Polynomial p) {
     if (!numbers.containsAll(p.support())) {
-      off.addAll(ChainFactoring.irreducible(constants, p));
+      off.addAll(factors.of(p));
     }
   }
 }
