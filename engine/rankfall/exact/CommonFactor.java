@@ -41,7 +41,9 @@ final class CommonFactor {
     }
     Polynomial g = rest.get(0);
     for (Polynomial p : rest) {
-      g = g.gcd(p);
+      if (p.dividedBy(g).isEmpty()) {
+        g = g.gcd(p);
+      }
       if (g.isConstant()) {
         return monomial;
       }
