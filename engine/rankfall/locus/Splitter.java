@@ -257,12 +257,17 @@ public final class Splitter {
         chain.variables(), chain.rules().stream().filter(r -> !rules.contains(r)).toList());
   }
 
+  /** Longer polynomials are not worth a factorization only to recognise their factors later. */
+  private static boolean isShort(Polynomial p) {
+    return p.termCount() <= 40 && p.totalDegree() <= 12;
+  }
+
   /** The state on another chain, with what follows for the polynomials that do not vanish. */
   private State moved(State s, Chain chain) {
     List<Polynomial> known = new ArrayList<>();
     for (Polynomial p : s.nonZero()) {
       Polynomial r = chain.reduced(p);
-      if (!r.isZero() && !r.equals(p)) {
+      if (!r.isZero() && !r.equals(p) && isShort(r)) {
         known.addAll(factors.of(r));
       }
     }
