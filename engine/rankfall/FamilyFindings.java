@@ -67,7 +67,10 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     List<Analysis.Stratum> strata = List.of();
     if (partition.strata().isPresent()) {
       if (components.isEmpty()) {
-        undecided.add("not decided (out of budget): the components and their conditions");
+        undecided.add(
+            "not decided ("
+                + meter.spent().orElse("out of budget")
+                + "): the components and their conditions");
       }
       try {
         strata = new StratumFindings(family, partition.strata().get(), meter).all();

@@ -9,6 +9,8 @@ import java.nio.file.Path;
 import java.time.Duration;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
+import rankfall.Analysis.Component;
+import rankfall.Analysis.Condition;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.Status;
 import rankfall.spec.Spec;
@@ -33,7 +35,7 @@ class EngineBudgetTest {
       Findings some = part.findings().orElseThrow();
       assertEquals(part.undecided().get(0), part.message());
       assertTrue(part.message().contains("more than " + branches + " branches"), part.message());
-      assertTrue(some.components().isEmpty() || some.components().equals(all.components()));
+      some.components().forEach(c -> assertTrue(all.components().stream().anyMatch(d -> isPart(c, d))));
       assertTrue(some.strata().isEmpty() || some.strata().equals(all.strata()));
       assertTrue(all.coverings().containsAll(some.coverings()));
       assertEquals(all.poles(), some.poles());
@@ -41,5 +43,27 @@ class EngineBudgetTest {
       part = Engine.analyse(spec, new Budget(Duration.ofHours(1), branches));
     }
     assertEquals(whole, part);
+  }
+
+  /** Whether the same is said of a component, conditions and signature apart that are still open. */
+  private static boolean isPart(Component some, Component all) {
+    return some.equations().equals(all.equations())
+        && some.basis().equals(all.basis())
+        && some.structure().equals(all.structure())
+        && some.killing().entries().equals(all.killing().entries())
+        && some.killing().rank() == all.killing().rank()
+        && some.killing().determinant().equals(all.killing().determinant())
+        && some.dual().equals(all.dual())
+        && some.conditions().stream()
+            .allMatch(c -> all.conditions().stream().anyMatch(d -> isSame(c, d)));
+  }
+
+  /** The same locus and rank; a kernel has many bases. */
+  private static boolean isSame(Condition c, Condition d) {
+    return c.equations().equals(d.equations())
+        && c.multiplicity().equals(d.multiplicity())
+        && c.rank().equals(d.rank())
+        && c.kernel().size() == d.kernel().size()
+        && c.realPoints() == d.realPoints();
   }
 }

@@ -1,6 +1,7 @@
 package rankfall.locus;
 
 import java.time.Duration;
+import java.util.Optional;
 
 /**
  * Counts branches and watches the time of one family; asked often, ends a computation by throwing.
@@ -27,21 +28,32 @@ public final class Meter {
    * @throws Exhausted if the time or the branches are used up
    */
   public void branch() {
-    if (++branches > limit) {
-      throw new Exhausted("more than " + limit + " branches");
-    }
+    branches++;
     check();
   }
 
   /**
-   * Looks at the clock.
+   * Looks at the clock and the count.
    *
-   * @throws Exhausted if the time is used up
+   * @throws Exhausted if the time or the branches are used up
    */
   public void check() {
-    if (System.nanoTime() > deadline) {
-      throw new Exhausted("out of time");
+    Optional<String> spent = spent();
+    if (spent.isPresent()) {
+      throw new Exhausted(spent.get());
     }
+  }
+
+  /**
+   * What is used up.
+   *
+   * @return time or branches, in words; empty while there is some of both
+   */
+  public Optional<String> spent() {
+    if (branches > limit) {
+      return Optional.of("more than " + limit + " branches");
+    }
+    return System.nanoTime() > deadline ? Optional.of("out of time") : Optional.empty();
   }
 
   /** How many branches were looked at. */

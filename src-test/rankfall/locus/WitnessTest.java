@@ -51,7 +51,7 @@ class WitnessTest {
             "  [Z, X] = Y",
             "generators: [X, Y, Z]");
     assertEquals(
-        "[] YES m=0\n[m^2 - m + 1] NO m=root(x^2 - x + 1, 0.50000000 + 0.86602540*i)", told(s));
+        "[] YES m=1\n[m^2 - m + 1] NO m=root(x^2 - x + 1, 0.50000000 + 0.86602540*i)", told(s));
   }
 
   /** Free parameters get values at which the stratum's exclusions are met. */
