@@ -14,6 +14,7 @@ import rankfall.Analysis.Relation;
 import rankfall.Analysis.Status;
 import rankfall.exact.ChainFactoring;
 import rankfall.exact.Polynomial;
+import rankfall.exact.RealZeros;
 import rankfall.lie.Family;
 import rankfall.lie.FamilyRelation;
 import rankfall.locus.Decomposition;
@@ -21,6 +22,7 @@ import rankfall.locus.Leaf;
 import rankfall.locus.Meter;
 import rankfall.locus.Partition;
 import rankfall.locus.Piece;
+import rankfall.locus.RealPoints;
 import rankfall.locus.Strata;
 import rankfall.spec.Spec;
 
@@ -33,6 +35,11 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
    * @param published takes what is known after a step, for the case that the next one does not end
    */
   static Analysis of(Spec spec, Family family, Meter meter, Consumer<Analysis> published) {
+    Optional<String> contradiction = contradiction(spec, family);
+    if (contradiction.isPresent()) {
+      return new FamilyFindings(spec, family, Partition.unknown(family), meter)
+          .failed(contradiction.get());
+    }
     FamilyFindings start = new FamilyFindings(spec, family, Partition.start(family, meter), meter);
     List<Component> general = start.components(List.of());
     published.accept(start.analysis(general));
@@ -45,6 +52,25 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
       return done.failed(done.nothingLeft());
     }
     return done.analysis(done.components(general));
+  }
+
+  /** Says where, if the conditions of a spec leave no real point. */
+  private static Optional<String> contradiction(Spec spec, Family family) {
+    if (spec.where().isEmpty() || spec.ground() == Spec.Ground.COMPLEX) {
+      return Optional.empty();
+    }
+    List<Polynomial> relations =
+        family.relations().stream().map(FamilyRelation::polynomial).toList();
+    if (new RealPoints(family).onZeros(relations).verdict() != RealZeros.Verdict.NO) {
+      return Optional.empty();
+    }
+    return Optional.of(
+        spec.source()
+            .fault(
+                spec.where().get(0).place(),
+                "the conditions contradict each other: no parameter point is left",
+                Optional.of("drop or mend one of them"))
+            .headline());
   }
 
   /** What is known before anything was computed. */

@@ -45,7 +45,7 @@ record GeneralSignature(Family family, Profile profile, List<Leaf> leaves) {
   }
 
   private boolean mayCut(Polynomial pole) {
-    return new RealPoints(family).onZeros(pole).verdict() != RealZeros.Verdict.NO;
+    return new RealPoints(family).onZeros(List.of(pole)).verdict() != RealZeros.Verdict.NO;
   }
 
   /** Whether the span falls, or fails to close, on a hypersurface. */

@@ -35,7 +35,8 @@ class EngineBudgetTest {
       Findings some = part.findings().orElseThrow();
       assertEquals(part.undecided().get(0), part.message());
       assertTrue(part.message().contains("more than " + branches + " branches"), part.message());
-      some.components().forEach(c -> assertTrue(all.components().stream().anyMatch(d -> isPart(c, d))));
+      some.components()
+          .forEach(c -> assertTrue(all.components().stream().anyMatch(d -> isPart(c, d))));
       assertTrue(some.strata().isEmpty() || some.strata().equals(all.strata()));
       assertTrue(all.coverings().containsAll(some.coverings()));
       assertEquals(all.poles(), some.poles());
@@ -45,7 +46,9 @@ class EngineBudgetTest {
     assertEquals(whole, part);
   }
 
-  /** Whether the same is said of a component, conditions and signature apart that are still open. */
+  /**
+   * Whether the same is said of a component, conditions and signature apart that are still open.
+   */
   private static boolean isPart(Component some, Component all) {
     return some.equations().equals(all.equations())
         && some.basis().equals(all.basis())

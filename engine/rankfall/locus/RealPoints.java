@@ -33,9 +33,9 @@ public final class RealPoints {
         .orElseGet(() -> ask(closures.ideal(chain), List.of()));
   }
 
-  /** Whether a polynomial has a real zero within the domain. */
-  public RealZeros.Answer onZeros(Polynomial p) {
-    return ask(List.of(p), List.of());
+  /** Whether polynomials have a common real zero within the domain. */
+  public RealZeros.Answer onZeros(List<Polynomial> polynomials) {
+    return ask(polynomials, List.of());
   }
 
   /** Whether a stratum has a real point within the domain: one of its leaves has. */

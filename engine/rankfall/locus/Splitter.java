@@ -229,8 +229,7 @@ public final class Splitter {
       degenerate.add(l.rest());
       split(s.with(degenerate), out);
     }
-    List<Polynomial> off =
-        l.cost() == 0 ? List.of() : factors.of(l.slope());
+    List<Polynomial> off = l.cost() == 0 ? List.of() : factors.of(l.slope());
     List<Chain.Rule> demoted = storeysWith(s.chain(), l.variable());
     demoted.forEach(r -> others.add(r.equation()));
     Chain below = without(s.chain(), demoted);
