@@ -1,6 +1,5 @@
 package rankfall.exact;
 
-import java.math.BigInteger;
 import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
 
@@ -123,11 +122,6 @@ public record RationalFunction(Polynomial numerator, Polynomial denominator) {
   /** Whether no variable occurs. */
   public boolean isConstant() {
     return numerator.isConstant() && denominator.isConstant();
-  }
-
-  /** Whether the denominator is an integer. */
-  public boolean isIntegral() {
-    return denominator.isConstant() && denominator.constantValue().equals(BigInteger.ONE);
   }
 
   /** The text of the reports. */

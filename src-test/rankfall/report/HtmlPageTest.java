@@ -28,9 +28,9 @@ class HtmlPageTest {
         SampleAnalyses.failed(),
         SampleAnalyses.stratified(),
         SampleAnalyses.undecomposed(),
-        SampleAnalyses.large(9),
-        SampleAnalyses.large(50),
-        SampleAnalyses.manyStrata(25));
+        LargeAnalyses.large(9),
+        LargeAnalyses.large(50),
+        LargeAnalyses.manyStrata(25));
   }
 
   private static List<Element> elements(Document d, String tag) {
@@ -129,7 +129,7 @@ class HtmlPageTest {
 
   @Test
   void boxesOfTheDiagramDoNotOverlap() throws Exception {
-    Analysis a = SampleAnalyses.manyStrata(25);
+    Analysis a = LargeAnalyses.manyStrata(25);
     Document d = Xml.parse(HtmlPage.of(a));
     List<Element> boxes = elements(d, "rect");
     assertEquals(25, boxes.size());
@@ -151,7 +151,7 @@ class HtmlPageTest {
 
   @Test
   void matrixTooLargeForAPageIsGivenByItsEntries() {
-    assertTrue(HtmlPage.of(SampleAnalyses.large(9)).contains("<mtable>"));
-    assertFalse(HtmlPage.of(SampleAnalyses.large(50)).contains("<mtable>"));
+    assertTrue(HtmlPage.of(LargeAnalyses.large(9)).contains("<mtable>"));
+    assertFalse(HtmlPage.of(LargeAnalyses.large(50)).contains("<mtable>"));
   }
 }

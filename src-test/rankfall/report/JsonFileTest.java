@@ -36,7 +36,7 @@ class JsonFileTest {
         SampleAnalyses.failed(),
         SampleAnalyses.stratified(),
         SampleAnalyses.undecomposed(),
-        SampleAnalyses.large(6));
+        LargeAnalyses.large(6));
   }
 
   @ParameterizedTest

@@ -71,7 +71,7 @@ class LatexAppendixTest {
             "K = \\begin{pmatrix}\n8 & 0 & 0 \\\\\n0 & 0 & \\frac{4\\alpha}{b_{1}} \\\\\n"
                 + "0 & \\frac{4\\alpha}{b_{1}} & 0\n\\end{pmatrix}"));
     assertTrue(small.contains("$\\det K = -\\frac{128\\alpha^{2}}{b_{1}^{2}}$"));
-    String large = LatexAppendix.of(SampleAnalyses.large(15));
+    String large = LatexAppendix.of(LargeAnalyses.large(15));
     assertFalse(large.contains("pmatrix"));
     assertTrue(large.contains("Non-zero entries of the Killing matrix"));
   }

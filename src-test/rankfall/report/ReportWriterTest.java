@@ -85,7 +85,7 @@ class ReportWriterTest {
   @Test
   void sameAnalysisGivesSameBytes() throws IOException {
     for (String run : List.of("one", "two")) {
-      ReportWriter.write(SampleAnalyses.manyStrata(25), out.resolve(run));
+      ReportWriter.write(LargeAnalyses.manyStrata(25), out.resolve(run));
     }
     Path one = out.resolve("one/stretched-rotor");
     for (String name : names(one)) {
