@@ -54,7 +54,7 @@ record ComponentFindings(
 
   private Component component(int number, Leaf.Defined leaf, List<Polynomial> equations) {
     for (Component k : known) {
-      if (k.equations().equals(equations)) {
+      if (equations.isEmpty() && k.equations().isEmpty()) {
         List<Factor> zeros =
             k.killing().determinant().map(d -> d.numerator().factors()).orElse(List.of());
         List<Condition> conditions = conditions(leaf, zeros, List.of());
