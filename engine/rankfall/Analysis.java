@@ -247,20 +247,97 @@ public record Analysis(
    *
    * @param stratum name of the stratum
    * @param name {@code R1} and so on within the stratum
-   * @param conditions sign conditions as text, all hold
+   * @param conditions all hold; none follows from the others and the stratum
    * @param signature of the Killing form
-   * @param type the name of the real algebra, where known
+   * @param type the real algebra, where its name is known
    * @param exact whether an exact decomposition established the list
    * @param witness a point of it
    */
   public record Region(
       String stratum,
       String name,
-      List<String> conditions,
+      List<SignCondition> conditions,
       Signature signature,
-      Optional<String> type,
+      Optional<AlgebraType> type,
       boolean exact,
-      List<Coordinate> witness) {}
+      List<Coordinate> witness) {
+    /** Copies the lists. */
+    public Region {
+      conditions = List.copyOf(conditions);
+      witness = List.copyOf(witness);
+    }
+  }
+
+  /** How a polynomial compares with 0. */
+  public enum Comparison {
+    EQUAL("="),
+    UNEQUAL("!="),
+    GREATER(">"),
+    LESS("<"),
+    NOT_LESS(">="),
+    NOT_GREATER("<=");
+
+    private final String symbol;
+
+    Comparison(String symbol) {
+      this.symbol = symbol;
+    }
+
+    /** As it is written between two numbers. */
+    public String symbol() {
+      return symbol;
+    }
+
+    /**
+     * Whether a number of some sign compares so with 0.
+     *
+     * @param sign -1, 0 or 1
+     */
+    public boolean holds(int sign) {
+      return switch (this) {
+        case EQUAL -> sign == 0;
+        case UNEQUAL -> sign != 0;
+        case GREATER -> sign > 0;
+        case LESS -> sign < 0;
+        case NOT_LESS -> sign >= 0;
+        case NOT_GREATER -> sign <= 0;
+      };
+    }
+  }
+
+  /**
+   * A sign condition.
+   *
+   * @param polynomial primitive
+   * @param comparison with 0
+   */
+  public record SignCondition(Polynomial polynomial, Comparison comparison) {
+    /** The text of the condition: {@code b - c < 0}. */
+    @Override
+    public String toString() {
+      return polynomial + " " + comparison.symbol() + " 0";
+    }
+  }
+
+  /**
+   * A Lie algebra by name.
+   *
+   * @param name the preferred name, such as {@code so(3,1)}
+   * @param otherNames names that are as right, such as a Bianchi type; may be empty
+   * @param everywhere whether it is proved for all points of the region; else it is the algebra at
+   *     the witness
+   */
+  public record AlgebraType(String name, List<String> otherNames, boolean everywhere) {
+    /** Copies the list. */
+    public AlgebraType {
+      otherNames = List.copyOf(otherNames);
+    }
+
+    /** The name, with a note where it is known at the witness only. */
+    public String text() {
+      return everywhere ? name : "at the witness: " + name;
+    }
+  }
 
   /**
    * The brackets at the general point of a component, followed to the general point of a stratum.

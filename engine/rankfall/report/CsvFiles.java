@@ -8,12 +8,14 @@ import java.util.Locale;
 import java.util.stream.Collectors;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.RealPoints;
+import rankfall.Analysis.SignCondition;
 import rankfall.exact.Polynomial;
 
 /**
@@ -125,11 +127,13 @@ final class CsvFiles {
                     List.of(
                         r.stratum(),
                         r.name(),
-                        String.join("; ", r.conditions()),
+                        r.conditions().stream()
+                            .map(SignCondition::toString)
+                            .collect(Collectors.joining("; ")),
                         Integer.toString(r.signature().plus()),
                         Integer.toString(r.signature().minus()),
                         Integer.toString(r.signature().zero()),
-                        r.type().orElse(""),
+                        r.type().map(AlgebraType::text).orElse(""),
                         proof(r.exact()),
                         witness(r.witness())))
             .toList());

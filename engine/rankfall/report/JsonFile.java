@@ -13,6 +13,7 @@ import java.util.Locale;
 import java.util.Optional;
 import java.util.function.BiConsumer;
 import rankfall.Analysis;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Combination;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
@@ -23,6 +24,7 @@ import rankfall.Analysis.Findings;
 import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
+import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Signature;
 import rankfall.Analysis.Stratum;
 import rankfall.Analysis.StructureEntry;
@@ -217,9 +219,10 @@ final class JsonFile {
   private static void region(ObjectNode out, Region r) {
     out.put("stratum", r.stratum());
     out.put("name", r.name());
-    out.set("conditions", texts(r.conditions()));
+    out.set("conditions", texts(r.conditions().stream().map(SignCondition::toString).toList()));
     out.set("signature", signature(r.signature()));
-    optional(out, "type", r.type());
+    optional(out, "type", r.type().map(AlgebraType::text));
+    out.set("otherNames", texts(r.type().map(AlgebraType::otherNames).orElse(List.of())));
     out.put("proof", CsvFiles.proof(r.exact()));
     out.set("witness", point(r.witness()));
   }

@@ -4,6 +4,7 @@ import java.util.List;
 import java.util.stream.Collectors;
 import java.util.stream.Stream;
 import rankfall.Analysis;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Findings;
@@ -267,13 +268,14 @@ final class LatexAppendix {
           r.conditions().isEmpty()
               ? "all points"
               : Latex.inline(
-                  Formulas.sequence(r.conditions().stream().map(formulas::text).toList())),
+                  Formulas.sequence(
+                      r.conditions().stream().map(c -> formulas.text(c.toString())).toList())),
           "$("
               + Stream.of(r.signature().plus(), r.signature().minus(), r.signature().zero())
                   .map(n -> Integer.toString(n))
                   .collect(Collectors.joining(","))
               + ")$",
-          text(r.type().orElse("")),
+          text(r.type().map(AlgebraType::text).orElse("")),
           CsvFiles.proof(r.exact()));
     }
     out.append(table.text());

@@ -6,6 +6,7 @@ import java.util.Optional;
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
 import rankfall.Analysis;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Contracted;
@@ -186,9 +187,9 @@ final class PageParts {
     return new PageView.RegionView(
         r.stratum(),
         r.name(),
-        r.conditions().stream().map(this::text).toList(),
+        r.conditions().stream().map(c -> text(c.toString())).toList(),
         Words.signature(r.signature()),
-        r.type().orElse(""),
+        r.type().map(AlgebraType::text).orElse(""),
         CsvFiles.proof(r.exact()),
         witness(r.witness()));
   }

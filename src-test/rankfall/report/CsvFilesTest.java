@@ -60,7 +60,7 @@ class CsvFilesTest {
     Findings f = SampleAnalyses.stratified().findings().orElseThrow();
     assertEquals(
         "stratum,region,conditions,plus,minus,zero,type,proof,witness\r\n"
-            + "S1,R1,a > 0; b*c - 2*a^2 < 0,2,1,0,\"sl(2,R)\",exact,"
+            + "S1,R1,a > 0; 2*a^2 - b*c > 0,2,1,0,\"sl(2,R)\",exact,"
             + "\"a=1; b=1; c=root(x^2 - 2, 1.41421356)\"\r\n"
             + "S4,R1,,0,0,3,,sampled,a=0; b=0; c=0\r\n",
         CsvFiles.regions(f));

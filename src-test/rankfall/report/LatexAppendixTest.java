@@ -86,7 +86,7 @@ class LatexAppendixTest {
     assertTrue(tex.contains("\\raggedright Kernel: "));
     assertTrue(tex.contains("\\raggedright Point: "));
     assertTrue(tex.contains("No limit: these brackets of the general point have none."));
-    assertTrue(tex.contains("$a > 0,\\; \\allowbreak bc - 2a^{2} < 0$"));
+    assertTrue(tex.contains("$a > 0,\\; \\allowbreak 2a^{2} - bc > 0$"));
     assertTrue(tex.contains("\\raggedright sampled"));
   }
 }

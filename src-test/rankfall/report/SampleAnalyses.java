@@ -7,7 +7,9 @@ import java.util.Optional;
 import java.util.stream.IntStream;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Combination;
+import rankfall.Analysis.Comparison;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Contracted;
@@ -22,6 +24,7 @@ import rankfall.Analysis.Quotient;
 import rankfall.Analysis.RealPoints;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Relation;
+import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Signature;
 import rankfall.Analysis.Status;
 import rankfall.Analysis.Stratum;
@@ -278,9 +281,12 @@ final class SampleAnalyses {
             new Region(
                 "S1",
                 "R1",
-                List.of("a > 0", "b*c - 2*a^2 < 0"),
+                List.of(
+                    new SignCondition(a, Comparison.GREATER),
+                    new SignCondition(
+                        b.times(c).plus(a.times(a).times(m2)).negate(), Comparison.GREATER)),
                 new Signature(2, 1, 0),
-                Optional.of("sl(2,R)"),
+                Optional.of(new AlgebraType("sl(2,R)", List.of("so(2,1)"), true)),
                 true,
                 point("1", "1", "root(x^2 - 2, 1.41421356)")),
             new Region(
