@@ -2,12 +2,9 @@ package rankfall.identify;
 
 import java.util.List;
 import rankfall.exact.AlgebraicNumber;
-import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
 import rankfall.lie.LieBracket;
 import rankfall.lie.Signature;
-import rankfall.lie.SignRule;
-import rankfall.lie.StructureConstants;
 
 /**
  * The names of the real algebras of dimension 0 to 3.
@@ -15,7 +12,8 @@ import rankfall.lie.StructureConstants;
  * <ul>
  *   <li>dimension 0 to 2: {@code 0}, {@code R}, {@code R^2}, {@code aff(1,R)};
  *   <li>abelian, nilpotent, simple: {@code R^3} (Bianchi I), {@code h3} (Bianchi II), {@code
- *       sl(2,R)} (Bianchi VIII), {@code so(3)} (Bianchi IX), the Bianchi type among the other names;
+ *       sl(2,R)} (Bianchi VIII), {@code so(3)} (Bianchi IX), the Bianchi type among the other
+ *       names;
  *   <li>the others by their type: {@code Bianchi III}, {@code Bianchi IV}, {@code Bianchi V},
  *       {@code Bianchi VI_0}, {@code Bianchi VI_h, h = -4/9}, {@code Bianchi VII_0}, {@code Bianchi
  *       VII_h, h = 1}.
@@ -33,14 +31,10 @@ public final class Bianchi {
   /**
    * The name of a real algebra.
    *
-   * @param constants of dimension 3 at most, over a chain; the numbers hold only variables with a
-   *     rule
-   * @param signs the order of the numbers
+   * @param g real, of dimension 3 at most
    */
-  public static TypeName of(StructureConstants<Polynomial> constants, SignRule<Polynomial> signs) {
-    return of(
-        SmallAlgebra.of(LieBracket.of(constants)),
-        new RealField((Chain) constants.domain(), signs));
+  public static TypeName of(ExactAlgebra g) {
+    return of(SmallAlgebra.of(LieBracket.of(g.constants())), RealField.of(g));
   }
 
   static TypeName of(SmallAlgebra<Polynomial> g, RealField field) {
@@ -56,8 +50,7 @@ public final class Bianchi {
       case ABELIAN -> new TypeName("R^3", List.of("Bianchi I", "3A_1"));
       case HEISENBERG -> new TypeName("h3", List.of("Bianchi II", "A_{3,1}"));
       case AFFINE ->
-          new TypeName(
-              "Bianchi III", List.of("aff(1,R) + R", "Bianchi VI_h, h = -1", "A_2 + A_1"));
+          new TypeName("Bianchi III", List.of("aff(1,R) + R", "Bianchi VI_h, h = -1", "A_2 + A_1"));
       default -> core(g, field);
     };
   }

@@ -56,7 +56,9 @@ record CubicRoots(RealField field, List<Polynomial> coefficients) {
     return new Ratios(out.get(0), out.get(1));
   }
 
-  /** The position of the root of largest absolute value; the sum of the other two is c1 minus it. */
+  /**
+   * The position of the root of largest absolute value; the sum of the other two is c1 minus it.
+   */
   private int largest() {
     if (signum(0) == signum(2)) {
       return signum(0) > 0 ? 2 : 0;
@@ -244,9 +246,7 @@ record CubicRoots(RealField field, List<Polynomial> coefficients) {
   }
 
   private Polynomial[] inTwoMore(List<Polynomial> p) {
-    return p.stream()
-        .map(c -> NumberFieldTower.inRing(c, twoMore()))
-        .toArray(Polynomial[]::new);
+    return p.stream().map(c -> NumberFieldTower.inRing(c, twoMore())).toArray(Polynomial[]::new);
   }
 
   /**

@@ -5,11 +5,8 @@ import java.util.ArrayList;
 import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.AlgebraicNumber;
-import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
 import rankfall.lie.LieBracket;
-import rankfall.lie.SignRule;
-import rankfall.lie.StructureConstants;
 
 /**
  * The names of the real algebras of dimension 4: the classes A_{4,1} to A_{4,12} of Patera, Sharp,
@@ -22,8 +19,8 @@ import rankfall.lie.StructureConstants;
  *   <li>A_{4,2}: a, and a block of size 2 for 1; a not 0. A_{4,4}: a block of size 3 for 1;
  *   <li>A_{4,5}: 1, a, b with -1 &lt;= a &lt;= b &lt;= 1, not 0, and b positive if a = -1;
  *   <li>A_{4,6}: a, and b + i, b - i; a not 0, b &gt;= 0, and a positive if b = 0;
- *   <li>on h3: A_{4,7}: a block of size 2 for 1 modulo the centre; A_{4,8}: 1 and -1; A_{4,9}: 1 and
- *       b, -1 &lt; b &lt;= 1; A_{4,10}: i and -i; A_{4,11}: a + i and a - i, a &gt; 0.
+ *   <li>on h3: A_{4,7}: a block of size 2 for 1 modulo the centre; A_{4,8}: 1 and -1; A_{4,9}: 1
+ *       and b, -1 &lt; b &lt;= 1; A_{4,10}: i and -i; A_{4,11}: a + i and a - i, a &gt; 0.
  * </ul>
  */
 public final class FourDimensional {
@@ -32,23 +29,19 @@ public final class FourDimensional {
   /**
    * The name of a real algebra.
    *
-   * @param constants of dimension 4, over a chain; the numbers hold only variables with a rule
-   * @param signs the order of the numbers
+   * @param g real, of dimension 4
    */
-  public static TypeName of(StructureConstants<Polynomial> constants, SignRule<Polynomial> signs) {
-    if (constants.dimension() != 4) {
-      throw new IllegalArgumentException("dimension " + constants.dimension());
+  public static TypeName of(ExactAlgebra g) {
+    if (g.dimension() != 4) {
+      throw new IllegalArgumentException("dimension " + g.dimension());
     }
-    return of(
-        SmallAlgebra.of(LieBracket.of(constants)),
-        new RealField((Chain) constants.domain(), signs));
+    return of(SmallAlgebra.of(LieBracket.of(g.constants())), RealField.of(g));
   }
 
   static TypeName of(SmallAlgebra<Polynomial> g, RealField field) {
     return switch (g.shape()) {
       case ABELIAN -> new TypeName("R^4", List.of("4A_1"));
-      case AFFINE ->
-          new TypeName("aff(1,R) + R^2", List.of("Bianchi III + R", "A_2 + 2A_1"));
+      case AFFINE -> new TypeName("aff(1,R) + R^2", List.of("Bianchi III + R", "A_2 + 2A_1"));
       case HEISENBERG -> new TypeName("h3 + R", List.of("Bianchi II + R", "A_{3,1} + A_1"));
       case SIMPLE, PLANE_SCALAR, PLANE_BLOCK, PLANE_TRACELESS, PLANE ->
           plusLine(Bianchi.core(g, field));
@@ -70,8 +63,7 @@ public final class FourDimensional {
           field.signs().signum(g.data().get(1)) < 0
               ? TypeName.of("A_{4,8}")
               : new TypeName("A_{4,10}", List.of("oscillator algebra", "diamond algebra"));
-      case SYMPLECTIC ->
-          symplectic(new PlaneMatrix(field, g.data().get(0), g.data().get(1)));
+      case SYMPLECTIC -> symplectic(new PlaneMatrix(field, g.data().get(0), g.data().get(1)));
     };
   }
 
@@ -91,7 +83,9 @@ public final class FourDimensional {
     int comma = name.indexOf(", ");
     String head = comma < 0 ? name : name.substring(0, comma);
     String line = head.startsWith("A_") ? " + A_1" : " + R";
-    return head + line + (comma < 0 ? "" : name.substring(comma));
+    return (head.contains("|x") ? "(" + head + ")" : head)
+        + line
+        + (comma < 0 ? "" : name.substring(comma));
   }
 
   /** The simple eigenvalue over the double one, which is (c1 c2 - 9 c3) over 2 (c1^2 - 3 c2). */
@@ -126,8 +120,7 @@ public final class FourDimensional {
   private static String diagonal(SmallAlgebra<Polynomial> g, RealField field) {
     AlgebraicNumber a = simpleOverDouble(g, field);
     boolean doubleIsLarger =
-        a.compareTo(BigFraction.ONE) <= 0
-            && a.compareTo(BigFraction.of(-1)) >= 0;
+        a.compareTo(BigFraction.ONE) <= 0 && a.compareTo(BigFraction.of(-1)) >= 0;
     if (doubleIsLarger) {
       return "a = " + a + ", b = 1";
     }

@@ -35,17 +35,12 @@ record IdealAction<E>(Domain<E> domain, List<List<E>> matrix, List<E> assumed) {
    * @param within a subspace that is larger than the ideal
    */
   static <E> IdealAction<E> of(LieBracket<E> bracket, Subspace<E> ideal, Subspace<E> within) {
-    Domain<E> domain = bracket.domain();
-    Echelon<E> basis = Elimination.of(domain, ideal.basis(), bracket.dimension());
+    IdealBasis<E> basis = IdealBasis.of(bracket, ideal);
     List<E> assumed = new ArrayList<>(ideal.nonVanishing());
     assumed.addAll(within.nonVanishing());
-    assumed.addAll(basis.nonVanishing());
+    assumed.addAll(basis.echelon().nonVanishing());
     SortedMap<Integer, E> z = outside(ideal, within, assumed);
-    List<List<E>> columns = new ArrayList<>();
-    for (SortedMap<Integer, E> u : basis.rows()) {
-      columns.add(coordinates(domain, basis, bracket.of(z, u)));
-    }
-    return normal(domain, columns, assumed);
+    return normal(bracket.domain(), basis.action(bracket, z), assumed);
   }
 
   private static <E> SortedMap<Integer, E> outside(
@@ -62,39 +57,17 @@ record IdealAction<E>(Domain<E> domain, List<List<E>> matrix, List<E> assumed) {
     throw new IllegalArgumentException("the ideal is not smaller");
   }
 
-  /** In the basis, times the product of all pivots. */
-  private static <E> List<E> coordinates(
-      Domain<E> domain, Echelon<E> basis, SortedMap<Integer, E> v) {
-    Arithmetic<E> ring = new Arithmetic<>(domain);
-    List<E> out = new ArrayList<>();
-    for (int i = 0; i < basis.rank(); i++) {
-      List<E> factors = new ArrayList<>();
-      factors.add(v.getOrDefault(basis.pivots().get(i), domain.zero()));
-      for (int k = 0; k < basis.rank(); k++) {
-        if (k != i) {
-          factors.add(basis.rows().get(k).get(basis.pivots().get(k)));
-        }
-      }
-      out.add(ring.product(factors));
-    }
-    return out;
-  }
-
-  /** The transposed matrix, all entries freed of a common factor. */
+  /** The matrix, all entries freed of a common factor. */
   private static <E> IdealAction<E> normal(
-      Domain<E> domain, List<List<E>> columns, List<E> assumed) {
-    int n = columns.size();
+      Domain<E> domain, List<List<E>> matrix, List<E> assumed) {
     List<E> all = new ArrayList<>();
-    for (int i = 0; i < n; i++) {
-      for (int j = 0; j < n; j++) {
-        all.add(columns.get(j).get(i));
-      }
-    }
+    matrix.forEach(all::addAll);
     Domain.Normal<E> normal = domain.normal(all);
     boolean zero = normal.entries().stream().allMatch(domain::isZero);
     if (!zero && domain.weight(normal.content()) > 0) {
       assumed.add(normal.content());
     }
+    int n = matrix.size();
     List<List<E>> rows = new ArrayList<>();
     for (int i = 0; i < n; i++) {
       rows.add(normal.entries().subList(i * n, (i + 1) * n));

@@ -31,6 +31,15 @@ record RealField(Chain chain, SignRule<Polynomial> signs) {
     int compare(BigFraction q);
   }
 
+  /**
+   * The field of a real algebra.
+   *
+   * @throws java.util.NoSuchElementException if it is complex
+   */
+  static RealField of(ExactAlgebra g) {
+    return new RealField(g.chain(), g.signs().orElseThrow());
+  }
+
   /** The sign of {@code a/b - q}. */
   int compare(Polynomial a, Polynomial b, BigFraction q) {
     Polynomial difference =

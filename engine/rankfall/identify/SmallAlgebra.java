@@ -47,7 +47,9 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
     AFFINE,
     /** [x, y] = z, and a centre. */
     HEISENBERG,
-    /** A simple algebra of dimension 3, and a centre; data: the polynomial of the Killing matrix. */
+    /**
+     * A simple algebra of dimension 3, and a centre; data: the polynomial of the Killing matrix.
+     */
     SIMPLE,
     /** A multiple of 1 on the plane. */
     PLANE_SCALAR,
@@ -249,7 +251,9 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
       return is(isZero(t) ? Shape.SYMPLECTIC_TRACELESS : Shape.SYMPLECTIC, List.of(t, d));
     }
 
-    /** The determinant of the Killing form on a complement of the nilradical, which is its kernel. */
+    /**
+     * The determinant of the Killing form on a complement of the nilradical, which is its kernel.
+     */
     private E pairing() {
       Subspace<E> nilradical = facts.nilradical();
       List<Integer> pivots = Elimination.of(domain, nilradical.basis(), n).pivots();
