@@ -203,11 +203,25 @@ record LeviName<E>(Ground<E> ground, Function<ExactAlgebra, Optional<TypeName>> 
             .toList());
   }
 
-  private Optional<ModuleName> module(Levi<E> levi, LieBracket<E> bracket, Subspace<E> ideal) {
+  /** Algebra and module by summands, where all of them have names. */
+  private Optional<List<ModuleName>> modules(
+      Levi<E> levi, LieBracket<E> bracket, Subspace<E> ideal) {
     List<SimpleIdeals.Part<E>> parts = SimpleIdeals.parts(ground, levi.constants());
     Action<E> action = Action.of(ground, bracket, levi.representatives(), ideal.basis());
-    return ModuleParts.of(ground, PlainKilling.of(levi.constants()), levi.scale(), parts, action)
-        .flatMap(m -> ModuleName.of(parts, m));
+    Optional<ModuleParts> module =
+        ModuleParts.of(ground, PlainKilling.of(levi.constants()), levi.scale(), parts, action);
+    if (module.isEmpty()) {
+      return Optional.empty();
+    }
+    List<ModuleName> out = new ArrayList<>();
+    for (ModuleParts.Summand s : module.get().summands()) {
+      ModuleName.of(s.ideals().stream().map(parts::get).toList(), s.module()).ifPresent(out::add);
+    }
+    return out.size() == module.get().summands().size() ? Optional.of(out) : Optional.empty();
+  }
+
+  private Optional<ModuleName> module(Levi<E> levi, LieBracket<E> bracket, Subspace<E> ideal) {
+    return modules(levi, bracket, ideal).filter(m -> m.size() == 1).map(m -> m.get(0));
   }
 
   /**
@@ -223,11 +237,12 @@ record LeviName<E>(Ground<E> ground, Function<ExactAlgebra, Optional<TypeName>> 
     if (outside > 1 || hasInvariants(action)) {
       return Optional.empty();
     }
-    Optional<ModuleName> module = module(levi, bracket, facts.nilradical());
     if (outside == 0) {
-      return module.map(ModuleName::semidirect);
+      return modules(levi, bracket, facts.nilradical())
+          .map(all -> sum(all.stream().map(ModuleName::semidirect).toList(), 0));
     }
-    return module.flatMap(m -> m.withCentre(facts.unimodular(), power(1)));
+    return module(levi, bracket, facts.nilradical())
+        .flatMap(m -> m.withCentre(facts.unimodular(), power(1)));
   }
 
   private boolean hasInvariants(Action<E> action) {

@@ -6,6 +6,7 @@ import java.util.List;
 import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
+import java.util.stream.IntStream;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Elimination;
 import rankfall.exact.Rationals;
@@ -38,6 +39,47 @@ record ModuleParts(List<Isotypic> parts) {
     Isotypic {
       labels = labels.stream().map(List::copyOf).toList();
     }
+
+    /** Whether an ideal does not act as 0. */
+    boolean moves(int ideal) {
+      return labels.get(ideal).stream()
+          .anyMatch(tuple -> tuple.stream().anyMatch(w -> w.stream().anyMatch(c -> c != 0)));
+    }
+
+    private Isotypic only(List<Integer> ideals) {
+      return new Isotypic(ideals.stream().map(labels::get).toList(), dimension);
+    }
+  }
+
+  /**
+   * Some of the ideals and the parts on which they act, no other ideal acting there.
+   *
+   * @param ideals positions
+   * @param module its labels are those of the ideals only
+   */
+  record Summand(List<Integer> ideals, ModuleParts module) {}
+
+  /** The finest decomposition of algebra and module, each ideal and each part in one summand. */
+  List<Summand> summands() {
+    int count = parts.isEmpty() ? 0 : parts.get(0).labels.size();
+    List<Summand> out = new ArrayList<>();
+    List<Integer> open = new ArrayList<>(IntStream.range(0, count).boxed().toList());
+    while (!open.isEmpty()) {
+      List<Integer> some = new ArrayList<>(List.of(open.get(0)));
+      List<Isotypic> own = new ArrayList<>();
+      for (int k = 0; k < some.size(); k++) {
+        for (Isotypic part : parts) {
+          if (part.moves(some.get(k)) && !own.contains(part)) {
+            own.add(part);
+            open.stream().filter(i -> part.moves(i) && !some.contains(i)).forEach(some::add);
+          }
+        }
+      }
+      Collections.sort(some);
+      open.removeAll(some);
+      out.add(new Summand(some, new ModuleParts(own.stream().map(p -> p.only(some)).toList())));
+    }
+    return out;
   }
 
   /** A value of a Casimir element with the weights that have it. */

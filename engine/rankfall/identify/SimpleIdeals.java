@@ -29,7 +29,6 @@ import rankfall.lie.Subspace;
  * 1853).
  */
 final class SimpleIdeals {
-  private static final int TRIES = 8;
   private static final long SEED = 1867;
 
   private SimpleIdeals() {}

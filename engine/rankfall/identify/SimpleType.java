@@ -3,6 +3,7 @@ package rankfall.identify;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 import java.util.Set;
 import java.util.stream.IntStream;
 
@@ -74,6 +75,19 @@ public record SimpleType(Series series, int rank) implements Comparable<SimpleTy
       }
     }
     return List.copyOf(out);
+  }
+
+  /**
+   * The type with a letter and a rank.
+   *
+   * @param series the letter
+   * @param rank any
+   * @return empty if there is none
+   */
+  static Optional<SimpleType> ofRank(Series series, int rank) {
+    return rank >= series.least && rank <= last(series, Integer.MAX_VALUE - 1)
+        ? Optional.of(new SimpleType(series, rank))
+        : Optional.empty();
   }
 
   private static int last(Series s, int dimension) {
