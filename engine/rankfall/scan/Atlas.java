@@ -26,9 +26,10 @@ import rankfall.scan.Finding.Status;
  * independent there to first order), and let no condition of the spec be an equality at p. Then
  * every neighbourhood of p meets some region; such a region has p in its closure, so that p
  * satisfies its conditions with {@code <=} in place of {@code <}; and p has the signature of that
- * region. If all regions whose conditions p satisfies in this weak sense have one signature, it is
- * that of p, whether p lies in one of them or between them. At any other point the signature is
- * asked for, and never concluded.
+ * region. If p satisfies the strict conditions of one region, a neighbourhood does, and since
+ * regions are disjoint that region is the one. Else, if all regions whose conditions p satisfies in
+ * the weak sense have one signature, it is that of p. At any other point the signature is asked
+ * for, and never concluded.
  */
 public final class Atlas {
   private final Frame frame;
@@ -80,6 +81,13 @@ public final class Atlas {
 
     boolean holds(Signs at) {
       return comparison.holds(sign(at));
+    }
+
+    /** Whether the set where it holds is open. */
+    boolean isStrict() {
+      return comparison == Comparison.GREATER
+          || comparison == Comparison.LESS
+          || comparison == Comparison.UNEQUAL;
     }
 
     /** Whether it holds in the closure of the set where it holds. */
@@ -191,7 +199,9 @@ public final class Atlas {
     List<Part> inside = weak.stream().filter(p -> all(p.tests, at)).toList();
     String region = inside.size() == 1 ? inside.get(0).name : "";
     String type = inside.size() == 1 ? inside.get(0).type : s.stratum.type().orElse("");
-    Optional<Signature> signature = complex ? Optional.empty() : signature(s, weak, at);
+    boolean open = inside.size() == 1 && inside.get(0).tests.stream().allMatch(Test::isStrict);
+    Optional<Signature> signature =
+        complex ? Optional.empty() : signature(s, open ? inside : weak, at);
     if (!complex && signature.isEmpty()) {
       return new Decision.Ask(
           s.stratum.name(),
@@ -213,17 +223,17 @@ public final class Atlas {
             false));
   }
 
-  /** The signature, where it follows from the regions; see the description of the class. */
-  private Optional<Signature> signature(Sheet s, List<Part> weak, Signs at) {
+  /** The signature, where it follows from the regions near; see the description of the class. */
+  private Optional<Signature> signature(Sheet s, List<Part> near, Signs at) {
     if (s.stratum.rank() == 0) {
       return Optional.of(new Signature(0, 0, s.stratum.dimension()));
     }
-    boolean oneSignature = weak.stream().map(Part::signature).distinct().count() == 1;
+    boolean oneSignature = near.stream().map(Part::signature).distinct().count() == 1;
     boolean conclusive =
         s.exact
             && oneSignature
             && (s.smooth || s.minors.stream().anyMatch(t -> t.holds(at)))
             && domain.stream().noneMatch(t -> t.sign(at) == 0);
-    return conclusive ? Optional.of(weak.get(0).signature) : Optional.empty();
+    return conclusive ? Optional.of(near.get(0).signature) : Optional.empty();
   }
 }
