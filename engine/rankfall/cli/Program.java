@@ -64,7 +64,7 @@ final class Program implements FrontDoors {
 
   @Override
   public PointAnswers points(Spec spec, PointForm form) throws SpecException {
-    Points points = Points.of(spec, StratumLookup.of(spec, Engine.analyse(spec, FOR_NAMES)));
+    Points points = Points.of(spec, StratumLookup.of(spec, Engine.withoutGrid(spec, FOR_NAMES)));
     return new ProgramPoints(points, writer(points, form));
   }
 
@@ -80,7 +80,7 @@ final class Program implements FrontDoors {
   /** An analysis of a spec that is known to describe a family. */
   private static Analysis known(Spec spec, Budget budget, Messages messages) {
     try {
-      Analysis analysis = Engine.analyse(spec, budget);
+      Analysis analysis = Engine.withoutGrid(spec, budget);
       messages.shortcoming(analysis);
       return analysis;
     } catch (SpecException e) {

@@ -7,15 +7,22 @@ import java.util.Comparator;
 import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.OptionalInt;
 import java.util.stream.Collectors;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
+import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.Region;
+import rankfall.Analysis.ScanAxis;
+import rankfall.Analysis.ScanCount;
+import rankfall.Analysis.ScanCounts;
 import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Stratum;
+import rankfall.exact.Rationals;
 import rankfall.scan.Columns;
+import rankfall.scan.DecimalText;
 import rankfall.scan.Finding;
 import rankfall.scan.Tally;
 
@@ -74,6 +81,53 @@ public final class ScanTables {
       out.append(cells(row)).append("\r\n");
     }
     return out.toString();
+  }
+
+  /**
+   * {@code scan.csv} of a default grid.
+   *
+   * @param scan whose points are listed
+   */
+  static String points(ScanCounts scan) {
+    List<String> names = scan.axes().stream().map(ScanAxis::name).toList();
+    StringBuilder out = new StringBuilder();
+    out.append(cells(Columns.all(names).header())).append("\r\n");
+    int[] at = new int[names.size()];
+    for (int place : scan.points()) {
+      List<BigFraction> values = new ArrayList<>();
+      for (int v = 0; v < at.length; v++) {
+        values.add(scan.axes().get(v).values().get(at[v]));
+      }
+      List<String> row = new ArrayList<>();
+      values.forEach(v -> row.add(Rationals.text(v)));
+      values.forEach(v -> row.add(DecimalText.of(v)));
+      row.addAll(facts(scan.counts().get(place)));
+      out.append(cells(row)).append("\r\n");
+      for (int v = at.length - 1; v >= 0; v--) {
+        at[v] = (at[v] + 1) % scan.axes().get(v).values().size();
+        if (at[v] > 0) {
+          break;
+        }
+      }
+    }
+    return out.toString();
+  }
+
+  private static List<String> facts(ScanCount c) {
+    return List.of(
+        c.status(),
+        number(c.dimension()),
+        number(c.rank()),
+        c.signature().map(s -> Integer.toString(s.plus())).orElse(""),
+        c.signature().map(s -> Integer.toString(s.minus())).orElse(""),
+        c.signature().map(s -> Integer.toString(s.zero())).orElse(""),
+        c.stratum(),
+        c.region(),
+        c.type());
+  }
+
+  private static String number(OptionalInt n) {
+    return n.isPresent() ? Integer.toString(n.getAsInt()) : "";
   }
 
   private static List<List<String>> rows(Analysis analysis, Tally tally) {

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.Arrays;
 import java.util.List;
 import org.apache.commons.numbers.fraction.BigFraction;
+import rankfall.exact.Rationals;
 import rankfall.scan.Columns.Column;
 import rankfall.scan.Columns.Decimal;
 import rankfall.scan.Columns.Fact;
@@ -105,7 +106,7 @@ final class RowText {
   private String value(PointList.Row row, Column c) {
     if (row.values().isPresent()) {
       BigFraction value = row.values().get().get(name(c));
-      return c instanceof Value ? ValueText.fraction(value) : ValueText.decimal(value);
+      return c instanceof Value ? Rationals.text(value) : DecimalText.of(value);
     }
     boolean given = c instanceof Value && name(c) < row.texts().size();
     return given ? cells.joined(List.of(row.texts().get(name(c)))) : "";

@@ -3,6 +3,7 @@ package rankfall.scan;
 import java.io.ByteArrayOutputStream;
 import java.io.IOException;
 import java.util.ArrayDeque;
+import java.util.List;
 import java.util.Queue;
 import java.util.concurrent.ConcurrentLinkedQueue;
 import java.util.concurrent.ExecutionException;
@@ -29,6 +30,25 @@ public record ScanRun(ScanPlan plan, long from, long to, int threads) {
   public interface Sink {
     /** Takes one block. */
     void take(ScanPart part) throws IOException;
+  }
+
+  /**
+   * What is said of each point of a small lattice, in order, on this thread.
+   *
+   * @param plan whose points form a lattice
+   */
+  public static List<Finding> each(ScanPlan plan) {
+    return new ScanWorker(plan).each((Lattice) plan.points());
+  }
+
+  /**
+   * The tally of all points, on this thread.
+   *
+   * @param plan whose points form a lattice
+   */
+  public static Tally tally(ScanPlan plan) {
+    Lattice lattice = (Lattice) plan.points();
+    return new ScanWorker(plan).work(new ScanBlock.Range(lattice, 0, lattice.size())).tally();
   }
 
   /** How many blocks there are; the first points of all have one, were there none. */

@@ -37,10 +37,28 @@ final class ScanWorker {
     rows = plan.table().map(t -> new RowText(t.columns(), denominators, t.cells()));
   }
 
+  /** What is said of each point of a lattice, in order. */
+  List<Finding> each(Lattice lattice) {
+    List<Finding> out = new ArrayList<>();
+    walk(new ScanBlock.Range(lattice, 0, lattice.size()), (at, leaf, f) -> out.add(f));
+    return out;
+  }
+
+  /** Hears of a point: its numerators, where the signs led, and the finding. */
+  private interface Heard {
+    void point(long[] at, Leaf leaf, Finding f);
+  }
+
+  private void write(long[] at, Leaf leaf, Finding f) {
+    RowText text = rows.orElseThrow();
+    boolean known = leaf.decision() instanceof Decision.Known;
+    text.row(at, known ? text.facts(leaf, f) : text.facts(f));
+  }
+
   /** Works through a block. */
   ScanPart work(ScanBlock block) {
     if (block instanceof ScanBlock.Range range) {
-      walk(range);
+      walk(range, rows.isPresent() ? this::write : (at, leaf, f) -> {});
     } else {
       for (PointList.Row row : ((ScanBlock.Rows) block).rows()) {
         answer(row);
@@ -57,7 +75,7 @@ final class ScanWorker {
     return out;
   }
 
-  private void walk(ScanBlock.Range range) {
+  private void walk(ScanBlock.Range range, Heard heard) {
     Lattice lattice = range.lattice();
     int inner = lattice.inner();
     long length = lattice.lineLength();
@@ -75,14 +93,9 @@ final class ScanWorker {
         Leaf leaf = tree.find(signs);
         if (leaf.decision() instanceof Decision.Known known) {
           count(leaf, known.finding());
-          if (rows.isPresent()) {
-            rows.get().row(at, rows.get().facts(leaf, known.finding()));
-          }
+          heard.point(at, leaf, known.finding());
         } else {
-          Finding f = asked((Decision.Ask) leaf.decision(), values(at));
-          if (rows.isPresent()) {
-            rows.get().row(at, rows.get().facts(f));
-          }
+          heard.point(at, leaf, asked((Decision.Ask) leaf.decision(), values(at)));
         }
       }
     }

@@ -1,20 +1,13 @@
 package rankfall.scan;
 
-import java.math.BigDecimal;
 import java.math.BigInteger;
-import java.math.MathContext;
-import java.math.RoundingMode;
-import org.apache.commons.numbers.fraction.BigFraction;
-import rankfall.exact.Rationals;
 
 /**
  * The texts of numerators over one denominator, those of the last values kept. One thread at a
  * time.
  */
 final class ValueText {
-  private static final MathContext DIGITS = new MathContext(15, RoundingMode.HALF_EVEN);
   private static final int KEPT = 1 << 12;
-  private static final int LONGEST_PLAIN = 15;
 
   private final long denominator;
   private final boolean decimal;
@@ -53,7 +46,7 @@ final class ValueText {
   }
 
   private String decimal(long numerator) {
-    return decimal(BigInteger.valueOf(numerator), BigInteger.valueOf(denominator));
+    return DecimalText.of(BigInteger.valueOf(numerator), BigInteger.valueOf(denominator));
   }
 
   private static long gcd(long a, long b) {
@@ -65,28 +58,5 @@ final class ValueText {
       y = rest;
     }
     return x;
-  }
-
-  /** The text of a fraction. */
-  static String fraction(BigFraction value) {
-    return Rationals.text(value);
-  }
-
-  /**
-   * A number as a decimal of 15 significant digits, the last one rounded half to even, without
-   * needless zeros; very large and very small ones with a power of ten.
-   */
-  static String decimal(BigFraction value) {
-    return decimal(Rationals.numerator(value), Rationals.denominator(value));
-  }
-
-  private static String decimal(BigInteger numerator, BigInteger denominator) {
-    if (numerator.signum() == 0) {
-      return "0";
-    }
-    BigDecimal d =
-        new BigDecimal(numerator).divide(new BigDecimal(denominator), DIGITS).stripTrailingZeros();
-    boolean plain = d.precision() - d.scale() <= LONGEST_PLAIN && d.scale() <= 2 * LONGEST_PLAIN;
-    return plain ? d.toPlainString() : d.toString();
   }
 }
