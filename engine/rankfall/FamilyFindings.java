@@ -41,10 +41,18 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
           .failed(contradiction.get());
     }
     FamilyFindings start = new FamilyFindings(spec, family, Partition.start(family, meter), meter);
-    List<Component> general = start.components(List.of());
-    published.accept(start.analysis(general));
+    try {
+      return start.completed(published);
+    } catch (TorusFindings.Fault e) {
+      return start.failed(e.getMessage());
+    }
+  }
+
+  private Analysis completed(Consumer<Analysis> published) {
+    List<Component> general = components(List.of());
+    published.accept(analysis(general));
     FamilyFindings done =
-        new FamilyFindings(spec, family, start.partition.completed(family, meter), meter);
+        new FamilyFindings(spec, family, partition.completed(family, meter), meter);
     if (done.partition.strata().isEmpty()) {
       return done.analysis(general);
     }
@@ -100,6 +108,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
       }
       try {
         strata = new StratumFindings(family, partition.strata().get(), meter).all();
+        withoutForms(strata).ifPresent(undecided::add);
       } catch (Meter.Exhausted e) {
         undecided.add("not decided (" + e.getMessage() + "): the strata");
       }
@@ -125,6 +134,21 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
+  }
+
+  private Optional<String> withoutForms(List<Analysis.Stratum> strata) {
+    String names =
+        strata.stream()
+            .filter(s -> s.invariantForms().isEmpty())
+            .map(Analysis.Stratum::name)
+            .collect(Collectors.joining(", "));
+    return names.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            "not decided ("
+                + meter.spent().orElse("out of budget")
+                + "): the invariant forms of "
+                + names);
   }
 
   private List<Analysis.Contraction> contractions(
