@@ -158,6 +158,8 @@ public record Analysis(
    * @param dual the non-zero entries of the inverse of the Killing matrix, upper triangle, where it
    *     exists
    * @param conditions where the form degenerates (further)
+   * @param torus the form on the torus of the spec, if it names one
+   * @param casimir the quadratic Casimir element, where the dual exists
    */
   public record Component(
       int number,
@@ -167,7 +169,9 @@ public record Analysis(
       List<StructureEntry> structure,
       Killing killing,
       Optional<List<MatrixEntry>> dual,
-      List<Condition> conditions) {}
+      List<Condition> conditions,
+      Optional<Forms.TorusForm> torus,
+      Optional<Forms.Casimir> casimir) {}
 
   /**
    * A structure constant: the coefficient of {@code target} in {@code [left, right]}; indices from
@@ -254,6 +258,7 @@ public record Analysis(
    * @param basis names of a basis of the algebra at the general point
    * @param kernel a basis of the kernel of the Killing form at the general point
    * @param remarks where a stated fact changes inside the stratum, a sentence each
+   * @param invariantForms its invariant forms; empty where they were not decided
    */
   public record Stratum(
       String name,
@@ -272,7 +277,8 @@ public record Analysis(
       List<Coordinate> witness,
       List<String> basis,
       List<Combination> kernel,
-      List<String> remarks) {
+      List<String> remarks,
+      Optional<Forms.InvariantForms> invariantForms) {
     /** The dimension of the kernel of the Killing form. */
     public int kernelDimension() {
       return dimension - rank;
