@@ -69,6 +69,8 @@ public record Analysis(
    * @param regions the real regions of all strata; empty where they were not computed
    * @param contractions of a family of matrices: for each stratum where the span is smaller than at
    *     the general point of a component around it, what the brackets of that point become
+   * @param maps pictures of the parameters, or why there is none; empty without parameters or
+   *     strata
    */
   public record Findings(
       List<String> listed,
@@ -79,7 +81,8 @@ public record Analysis(
       List<Stratum> strata,
       List<Covering> coverings,
       List<Region> regions,
-      List<Contraction> contractions) {
+      List<Contraction> contractions,
+      List<RegionMap> maps) {
     /** Copies the lists. */
     public Findings {
       listed = List.copyOf(listed);
@@ -91,6 +94,7 @@ public record Analysis(
       coverings = List.copyOf(coverings);
       regions = List.copyOf(regions);
       contractions = List.copyOf(contractions);
+      maps = List.copyOf(maps);
     }
   }
 

@@ -116,7 +116,8 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
             List.of(),
-            contractions(components, strata));
+            contractions(components, strata),
+            maps(components, strata, List.of(), undecided));
     return new Analysis(
         spec,
         Version.text(),
@@ -125,6 +126,24 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
+  }
+
+  private List<RegionMap> maps(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      List<Analysis.Region> regions,
+      List<String> undecided) {
+    if (!undecided.isEmpty()) {
+      return strata.isEmpty()
+          ? List.of()
+          : List.of(new RegionMap.Missing("The analysis did not finish, so nothing is drawn."));
+    }
+    try {
+      return new MapFindings(family, components, strata, regions, meter).all();
+    } catch (Meter.Exhausted e) {
+      undecided.add("not decided (" + e.getMessage() + "): the map of regions");
+      return List.of();
+    }
   }
 
   private List<Analysis.Contraction> contractions(

@@ -51,8 +51,12 @@ record PlaneSets(
         List<Set<Polynomial>> rest = factors.stream().map(f -> without(f, common)).toList();
         if (rest.stream().noneMatch(Set::isEmpty)) {
           List<Polynomial> products = rest.stream().map(f -> product(constants, f)).toList();
-          finite.add(products);
-          rest.get(0).forEach(h -> abscissae.add(below(constants, h, rest, products, y)));
+          List<Polynomial> below =
+              rest.get(0).stream().map(h -> below(constants, h, rest, products, y)).toList();
+          if (below.stream().anyMatch(p -> !p.isConstant())) {
+            finite.add(products);
+            abscissae.addAll(below);
+          }
         }
       }
     }
@@ -73,18 +77,26 @@ record PlaneSets(
     return constants.reduced(factors.stream().reduce(constants.one(), Polynomial::times));
   }
 
-  /** A polynomial without y that vanishes below the common zeros of h and the products. */
+  /**
+   * A polynomial without y that vanishes below the common zeros of h and the products: the common
+   * divisor of resultants, of one only where numbers may hide a common divisor.
+   */
   private static Polynomial below(
       Chain constants,
       Polynomial h,
       List<Set<Polynomial>> factors,
       List<Polynomial> products,
       int y) {
-    int other = 1;
-    while (factors.get(other).contains(h)) {
-      other++;
+    Polynomial out = constants.zero();
+    for (int k = 1;
+        k < products.size() && (out.isZero() || constants.rules().isEmpty() && !out.isOne());
+        k++) {
+      if (!factors.get(k).contains(h)) {
+        Polynomial p = products.get(k);
+        out =
+            out.gcd(!h.contains(y) ? h : !p.contains(y) ? p : constants.reduced(h.resultant(p, y)));
+      }
     }
-    Polynomial p = products.get(other);
-    return !h.contains(y) ? h : !p.contains(y) ? p : constants.reduced(h.resultant(p, y));
+    return out;
   }
 }

@@ -134,6 +134,7 @@ final class LargeAnalyses {
                 List.of(),
                 List.of(),
                 List.of(),
+                List.of(),
                 List.of())));
   }
 
@@ -194,6 +195,7 @@ final class LargeAnalyses {
                 strata,
                 coverings,
                 f.regions(),
-                f.contractions())));
+                f.contractions(),
+                f.maps())));
   }
 }
