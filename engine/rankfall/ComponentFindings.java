@@ -9,11 +9,12 @@ import rankfall.Analysis.Condition;
 import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
-import rankfall.Analysis.Signature;
 import rankfall.Analysis.StructureEntry;
+import rankfall.Forms.Casimir;
 import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
+import rankfall.lie.CasimirElement;
 import rankfall.lie.DualForm;
 import rankfall.lie.Family;
 import rankfall.lie.KillingForm;
@@ -58,7 +59,7 @@ record ComponentFindings(
         List<Factor> zeros =
             k.killing().determinant().map(d -> d.numerator().factors()).orElse(List.of());
         List<Condition> conditions = conditions(leaf, zeros, List.of());
-        return withConditions(k, number, conditions, signature(leaf, conditions));
+        return withConditions(k, number, conditions);
       }
     }
     ComponentForm c = ComponentForm.of(family, leaf.piece(), equations, seed());
@@ -74,10 +75,10 @@ record ComponentFindings(
             leaf.algebra().kernel().stream().map(Combination::new).toList(),
             c.form().blocks(),
             determinant.map(d -> new Quotient(d.numerator(), d.denominator())),
-            signature(leaf, conditions));
-    Optional<List<MatrixEntry>> dual =
+            Optional.empty());
+    Optional<DualForm> dual =
         determinant.isPresent() && c.basis().size() > 0
-            ? DualForm.of(c.chain(), c.form().matrix()).map(d -> entries(d.matrix()))
+            ? DualForm.of(c.chain(), c.form().matrix())
             : Optional.empty();
     return new Component(
         number,
@@ -86,8 +87,14 @@ record ComponentFindings(
         c.basis(),
         structure(c),
         killing,
-        dual,
-        conditions);
+        dual.map(d -> entries(d.matrix())),
+        conditions,
+        new TorusFindings(spec, family, c).find(),
+        dual.map(d -> casimir(c, d)));
+  }
+
+  private static Casimir casimir(ComponentForm c, DualForm dual) {
+    return new Casimir(entries(CasimirElement.of(c.chain(), c.constants(), dual).coefficients()));
   }
 
   private List<Condition> conditions(
@@ -99,8 +106,7 @@ record ComponentFindings(
   }
 
   /** A component that is known, its conditions told anew from all leaves. */
-  private static Component withConditions(
-      Component c, int number, List<Condition> conditions, Optional<Signature> signature) {
+  private static Component withConditions(Component c, int number, List<Condition> conditions) {
     Killing k = c.killing();
     return new Component(
         number,
@@ -108,16 +114,11 @@ record ComponentFindings(
         c.parameterDimension(),
         c.basis(),
         c.structure(),
-        new Killing(k.entries(), k.rank(), k.kernel(), k.blocks(), k.determinant(), signature),
+        new Killing(k.entries(), k.rank(), k.kernel(), k.blocks(), k.determinant(), k.signature()),
         c.dual(),
-        conditions);
-  }
-
-  /** Only a complete exploration tells that nothing cuts the space. */
-  private Optional<Signature> signature(Leaf.Defined leaf, List<Condition> conditions) {
-    return partition.strata().isEmpty()
-        ? Optional.empty()
-        : new GeneralSignature(family, leaf.profile(), partition.leaves()).of(conditions);
+        conditions,
+        c.torus(),
+        c.casimir());
   }
 
   /** Depends on the text of the spec alone. */

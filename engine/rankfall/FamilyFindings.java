@@ -41,17 +41,44 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
           .failed(contradiction.get());
     }
     FamilyFindings start = new FamilyFindings(spec, family, Partition.start(family, meter), meter);
-    List<Component> general = start.components(List.of());
-    published.accept(start.analysis(general));
+    try {
+      return start.completed(published);
+    } catch (TorusFindings.Fault e) {
+      return start.failed(e.getMessage());
+    }
+  }
+
+  private Analysis completed(Consumer<Analysis> published) {
+    List<Component> general = components(List.of());
+    published.accept(analysis(general));
     FamilyFindings done =
-        new FamilyFindings(spec, family, start.partition.completed(family, meter), meter);
+        new FamilyFindings(spec, family, partition.completed(family, meter), meter);
     if (done.partition.strata().isEmpty()) {
       return done.analysis(general);
     }
     if (done.partition.strata().get().strata().isEmpty()) {
       return done.failed(done.nothingLeft());
     }
-    return done.analysis(done.components(general));
+    return done.withRegions(done.components(general), done.strata(), published);
+  }
+
+  private Analysis withRegions(
+      List<Component> components, List<Analysis.Stratum> strata, Consumer<Analysis> published) {
+    Analysis without = analysis(components, strata, Optional.empty());
+    if (strata.isEmpty() || family.ring().complex()) {
+      return without;
+    }
+    published.accept(without);
+    try {
+      Strata.Result cut = partition.strata().orElseThrow();
+      RegionFindings.Result regions =
+          new RegionFindings(family, cut, RegionFindings.NONE, meter).all();
+      List<Component> signed =
+          components.isEmpty() ? components : regions.withSignatures(components, cut);
+      return analysis(signed, strata, Optional.of(regions));
+    } catch (Meter.Exhausted e) {
+      return without;
+    }
   }
 
   /** Says where, if the conditions of a spec leave no real point. */
@@ -88,22 +115,27 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     }
   }
 
-  private Analysis analysis(List<Component> components) {
-    List<String> undecided = new ArrayList<>(openPieces());
-    List<Analysis.Stratum> strata = List.of();
-    if (partition.strata().isPresent()) {
-      if (components.isEmpty()) {
-        undecided.add(
-            "not decided ("
-                + meter.spent().orElse("out of budget")
-                + "): the components and their conditions");
-      }
-      try {
-        strata = new StratumFindings(family, partition.strata().get(), meter).all();
-      } catch (Meter.Exhausted e) {
-        undecided.add("not decided (" + e.getMessage() + "): the strata");
-      }
+  private List<Analysis.Stratum> strata() {
+    try {
+      return new StratumFindings(family, partition.strata().orElseThrow(), meter).all();
+    } catch (Meter.Exhausted e) {
+      return List.of();
     }
+  }
+
+  private Analysis analysis(List<Component> components) {
+    return analysis(components, List.of(), Optional.empty());
+  }
+
+  private Analysis analysis(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      Optional<RegionFindings.Result> regions) {
+    List<String> undecided = new ArrayList<>(openPieces());
+    if (partition.strata().isPresent()) {
+      undecided.addAll(undecided(components, strata, regions));
+    }
+    List<Analysis.Region> found = regions.map(RegionFindings.Result::regions).orElse(List.of());
     Findings findings =
         new Findings(
             family.names(),
@@ -115,8 +147,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            List.of(),
-            contractions(components, strata));
+            found,
+            contractions(components, strata),
+            maps(components, strata, found, undecided));
     return new Analysis(
         spec,
         Version.text(),
@@ -125,6 +158,58 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
+  }
+
+  private List<String> undecided(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      Optional<RegionFindings.Result> regions) {
+    String why = "not decided (" + meter.spent().orElse("out of budget") + "): ";
+    List<String> out = new ArrayList<>();
+    if (components.isEmpty()) {
+      out.add(why + "the components and their conditions");
+    }
+    if (strata.isEmpty()) {
+      out.add(why + "the strata");
+    } else if (regions.isEmpty() && !family.ring().complex()) {
+      out.add(why + "the real regions");
+    }
+    withoutForms(strata).ifPresent(out::add);
+    regions.ifPresent(r -> out.addAll(r.undecided()));
+    return out;
+  }
+
+  private Optional<String> withoutForms(List<Analysis.Stratum> strata) {
+    String names =
+        strata.stream()
+            .filter(s -> s.invariantForms().isEmpty())
+            .map(Analysis.Stratum::name)
+            .collect(Collectors.joining(", "));
+    return names.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            "not decided ("
+                + meter.spent().orElse("out of budget")
+                + "): the invariant forms of "
+                + names);
+  }
+
+  private List<RegionMap> maps(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      List<Analysis.Region> regions,
+      List<String> undecided) {
+    if (!undecided.isEmpty()) {
+      return strata.isEmpty()
+          ? List.of()
+          : List.of(new RegionMap.Missing("The analysis did not finish, so nothing is drawn."));
+    }
+    try {
+      return new MapFindings(family, components, strata, regions, meter).all();
+    } catch (Meter.Exhausted e) {
+      undecided.add("not decided (" + e.getMessage() + "): the map of regions");
+      return List.of();
+    }
   }
 
   private List<Analysis.Contraction> contractions(

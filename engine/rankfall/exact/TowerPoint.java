@@ -51,6 +51,17 @@ public final class TowerPoint {
         point = point.with(r, nearest(point.roots(r), value, name(chain, r), r.equation()));
       }
     }
+    return point.withLinear();
+  }
+
+  /** The point with given values of the tower variables, which satisfy the rules. */
+  static TowerPoint of(Chain chain, SortedMap<Integer, AlgebraicNumber> coordinates) {
+    return new TowerPoint(chain, coordinates, List.of()).withLinear();
+  }
+
+  /** Linear rules in the chosen variables give values too. */
+  private TowerPoint withLinear() {
+    TowerPoint point = this;
     for (Rule r : chain.rules()) {
       if (r.isLinear() && point.covers(r.equation(), r.variable())) {
         List<Rule> more = new ArrayList<>(point.linear);
@@ -90,6 +101,30 @@ public final class TowerPoint {
     return a.compareTo(images.get(images.size() - 1 - conjugates.indexOf(b)));
   }
 
+  /**
+   * The points above this one, ascending in the variable of one more rule.
+   *
+   * @param r free of variables of linear rules; irreducible over the numbers of this point, or at
+   *     least without multiple roots there
+   */
+  List<TowerPoint> extended(Rule r) {
+    List<Rule> more = new ArrayList<>(chain.rules());
+    more.add(r.isLinear() ? 0 : more.size(), r);
+    Chain longer = new Chain(chain.variables(), more);
+    if (r.isLinear()) {
+      List<Rule> solved = new ArrayList<>(linear);
+      solved.add(r);
+      return List.of(new TowerPoint(longer, coordinates, solved));
+    }
+    TowerPoint above = new TowerPoint(longer, coordinates, linear);
+    return roots(r).stream().map(a -> above.with(r, a)).toList();
+  }
+
+  /** The rules that define the numbers of this point. */
+  Chain chain() {
+    return chain;
+  }
+
   private TowerPoint with(Rule r, AlgebraicNumber value) {
     SortedMap<Integer, AlgebraicNumber> more = new TreeMap<>(coordinates);
     more.put(r.variable(), value);
@@ -107,7 +142,7 @@ public final class TowerPoint {
    *     over the field that these generate
    * @return ascending
    */
-  private List<AlgebraicNumber> roots(Rule r) {
+  List<AlgebraicNumber> roots(Rule r) {
     if (!covers(r.equation(), r.variable())) {
       throw new IllegalArgumentException(
           "the rule of "
