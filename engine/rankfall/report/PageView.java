@@ -35,6 +35,7 @@ import rankfall.spec.Spec;
  * @param regions rows of the table of regions
  * @param contractions rows of the table of contracted algebras
  * @param contractionWords what that table shows
+ * @param forms torus, Casimir elements and invariant forms
  * @param citation a line
  * @param version of the program
  * @param sha256 of the spec
@@ -62,6 +63,7 @@ record PageView(
     List<RegionView> regions,
     List<ContractionView> contractions,
     String contractionWords,
+    FormsView forms,
     String citation,
     String version,
     String sha256) {
@@ -172,6 +174,7 @@ record PageView(
         f.map(x -> x.regions().stream().map(parts::region).toList()).orElse(List.of()),
         f.map(x -> x.contractions().stream().map(parts::contraction).toList()).orElse(List.of()),
         Words.CONTRACTIONS,
+        FormsView.of(a),
         Words.citation(a),
         a.version(),
         spec.source().sha256());
