@@ -2,6 +2,8 @@ package rankfall;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
+import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Factorization;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
@@ -69,6 +71,7 @@ public record Analysis(
    * @param regions the real regions of all strata; empty where they were not computed
    * @param contractions of a family of matrices: for each stratum where the span is smaller than at
    *     the general point of a component around it, what the brackets of that point become
+   * @param scan the default grid, where the spec has one that was counted
    */
   public record Findings(
       List<String> listed,
@@ -79,7 +82,8 @@ public record Analysis(
       List<Stratum> strata,
       List<Covering> coverings,
       List<Region> regions,
-      List<Contraction> contractions) {
+      List<Contraction> contractions,
+      Optional<ScanCounts> scan) {
     /** Copies the lists. */
     public Findings {
       listed = List.copyOf(listed);
@@ -91,6 +95,45 @@ public record Analysis(
       coverings = List.copyOf(coverings);
       regions = List.copyOf(regions);
       contractions = List.copyOf(contractions);
+    }
+
+    /** What was found before a grid is counted. */
+    public Findings(
+        List<String> listed,
+        List<String> variables,
+        List<Relation> relations,
+        List<Polynomial> poles,
+        List<Component> components,
+        List<Stratum> strata,
+        List<Covering> coverings,
+        List<Region> regions,
+        List<Contraction> contractions) {
+      this(
+          listed,
+          variables,
+          relations,
+          poles,
+          components,
+          strata,
+          coverings,
+          regions,
+          contractions,
+          Optional.empty());
+    }
+
+    /** The same with a grid that was counted. */
+    public Findings with(ScanCounts counts) {
+      return new Findings(
+          listed,
+          variables,
+          relations,
+          poles,
+          components,
+          strata,
+          coverings,
+          regions,
+          contractions,
+          Optional.of(counts));
     }
   }
 
@@ -393,4 +436,51 @@ public record Analysis(
    */
   public record Unfollowed(List<StructureEntry> structure, String reason)
       implements ContractionOutcome {}
+
+  /**
+   * The default grid of a family, counted.
+   *
+   * @param axes the values of each name; the last one changes fastest
+   * @param counts how many points had which answer; in the order of strata and regions
+   * @param points for each point in order its place in the counts; empty for a grid of more than 20
+   *     000 points
+   */
+  public record ScanCounts(List<ScanAxis> axes, List<ScanCount> counts, List<Integer> points) {
+    /** Copies the lists. */
+    public ScanCounts {
+      axes = List.copyOf(axes);
+      counts = List.copyOf(counts);
+      points = List.copyOf(points);
+    }
+  }
+
+  /** The values of one name in a grid, at least one. */
+  public record ScanAxis(String name, List<BigFraction> values) {
+    /** Copies the list. */
+    public ScanAxis {
+      values = List.copyOf(values);
+    }
+  }
+
+  /**
+   * Points of a grid of which the same is said.
+   *
+   * @param status {@code ok}, {@code outside}, {@code pole}, {@code off} or {@code open}
+   * @param stratum its name; empty where there is no algebra, or strata are not known
+   * @param region its name; empty where the points lie in none
+   * @param dimension of the algebra; empty where there is none
+   * @param rank of its Killing form; empty where there is none
+   * @param signature of its Killing form, where there is one
+   * @param type the algebra, where known; else empty
+   * @param points how many
+   */
+  public record ScanCount(
+      String status,
+      String stratum,
+      String region,
+      OptionalInt dimension,
+      OptionalInt rank,
+      Optional<Signature> signature,
+      String type,
+      long points) {}
 }

@@ -59,7 +59,26 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     if (done.partition.strata().get().strata().isEmpty()) {
       return done.failed(done.nothingLeft());
     }
-    return done.analysis(done.components(general));
+    return done.withRegions(done.components(general), done.strata(), published);
+  }
+
+  private Analysis withRegions(
+      List<Component> components, List<Analysis.Stratum> strata, Consumer<Analysis> published) {
+    Analysis without = analysis(components, strata, Optional.empty());
+    if (strata.isEmpty() || family.ring().complex()) {
+      return without;
+    }
+    published.accept(without);
+    try {
+      Strata.Result cut = partition.strata().orElseThrow();
+      RegionFindings.Result regions =
+          new RegionFindings(family, cut, RegionFindings.NONE, meter).all();
+      List<Component> signed =
+          components.isEmpty() ? components : regions.withSignatures(components, cut);
+      return analysis(signed, strata, Optional.of(regions));
+    } catch (Meter.Exhausted e) {
+      return without;
+    }
   }
 
   /** Says where, if the conditions of a spec leave no real point. */
@@ -96,22 +115,25 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     }
   }
 
+  private List<Analysis.Stratum> strata() {
+    try {
+      return new StratumFindings(family, partition.strata().orElseThrow(), meter).all();
+    } catch (Meter.Exhausted e) {
+      return List.of();
+    }
+  }
+
   private Analysis analysis(List<Component> components) {
+    return analysis(components, List.of(), Optional.empty());
+  }
+
+  private Analysis analysis(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      Optional<RegionFindings.Result> regions) {
     List<String> undecided = new ArrayList<>(openPieces());
-    List<Analysis.Stratum> strata = List.of();
     if (partition.strata().isPresent()) {
-      if (components.isEmpty()) {
-        undecided.add(
-            "not decided ("
-                + meter.spent().orElse("out of budget")
-                + "): the components and their conditions");
-      }
-      try {
-        strata = new StratumFindings(family, partition.strata().get(), meter).all();
-        withoutForms(strata).ifPresent(undecided::add);
-      } catch (Meter.Exhausted e) {
-        undecided.add("not decided (" + e.getMessage() + "): the strata");
-      }
+      undecided.addAll(undecided(components, strata, regions));
     }
     Findings findings =
         new Findings(
@@ -124,7 +146,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            List.of(),
+            regions.map(RegionFindings.Result::regions).orElse(List.of()),
             contractions(components, strata));
     return new Analysis(
         spec,
@@ -134,6 +156,25 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
+  }
+
+  private List<String> undecided(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      Optional<RegionFindings.Result> regions) {
+    String why = "not decided (" + meter.spent().orElse("out of budget") + "): ";
+    List<String> out = new ArrayList<>();
+    if (components.isEmpty()) {
+      out.add(why + "the components and their conditions");
+    }
+    if (strata.isEmpty()) {
+      out.add(why + "the strata");
+    } else if (regions.isEmpty() && !family.ring().complex()) {
+      out.add(why + "the real regions");
+    }
+    withoutForms(strata).ifPresent(out::add);
+    regions.ifPresent(r -> out.addAll(r.undecided()));
+    return out;
   }
 
   private Optional<String> withoutForms(List<Analysis.Stratum> strata) {
