@@ -71,6 +71,8 @@ public record Analysis(
    * @param regions the real regions of all strata; empty where they were not computed
    * @param contractions of a family of matrices: for each stratum where the span is smaller than at
    *     the general point of a component around it, what the brackets of that point become
+   * @param maps pictures of the parameters, or why there is none; empty without parameters or
+   *     strata
    * @param scan the default grid, where the spec has one that was counted
    */
   public record Findings(
@@ -83,6 +85,7 @@ public record Analysis(
       List<Covering> coverings,
       List<Region> regions,
       List<Contraction> contractions,
+      List<RegionMap> maps,
       Optional<ScanCounts> scan) {
     /** Copies the lists. */
     public Findings {
@@ -95,6 +98,7 @@ public record Analysis(
       coverings = List.copyOf(coverings);
       regions = List.copyOf(regions);
       contractions = List.copyOf(contractions);
+      maps = List.copyOf(maps);
     }
 
     /** What was found before a grid is counted. */
@@ -107,7 +111,8 @@ public record Analysis(
         List<Stratum> strata,
         List<Covering> coverings,
         List<Region> regions,
-        List<Contraction> contractions) {
+        List<Contraction> contractions,
+        List<RegionMap> maps) {
       this(
           listed,
           variables,
@@ -118,6 +123,7 @@ public record Analysis(
           coverings,
           regions,
           contractions,
+          maps,
           Optional.empty());
     }
 
@@ -133,6 +139,7 @@ public record Analysis(
           coverings,
           regions,
           contractions,
+          maps,
           Optional.of(counts));
     }
   }

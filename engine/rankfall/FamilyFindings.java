@@ -135,6 +135,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     if (partition.strata().isPresent()) {
       undecided.addAll(undecided(components, strata, regions));
     }
+    List<Analysis.Region> found = regions.map(RegionFindings.Result::regions).orElse(List.of());
     Findings findings =
         new Findings(
             family.names(),
@@ -146,8 +147,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            regions.map(RegionFindings.Result::regions).orElse(List.of()),
-            contractions(components, strata));
+            found,
+            contractions(components, strata),
+            maps(components, strata, found, undecided));
     return new Analysis(
         spec,
         Version.text(),
@@ -190,6 +192,24 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
                 + meter.spent().orElse("out of budget")
                 + "): the invariant forms of "
                 + names);
+  }
+
+  private List<RegionMap> maps(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      List<Analysis.Region> regions,
+      List<String> undecided) {
+    if (!undecided.isEmpty()) {
+      return strata.isEmpty()
+          ? List.of()
+          : List.of(new RegionMap.Missing("The analysis did not finish, so nothing is drawn."));
+    }
+    try {
+      return new MapFindings(family, components, strata, regions, meter).all();
+    } catch (Meter.Exhausted e) {
+      undecided.add("not decided (" + e.getMessage() + "): the map of regions");
+      return List.of();
+    }
   }
 
   private List<Analysis.Contraction> contractions(

@@ -36,6 +36,7 @@ import rankfall.spec.Spec;
  * @param contractions rows of the table of contracted algebras
  * @param contractionWords what that table shows
  * @param forms torus, Casimir elements and invariant forms
+ * @param maps the region maps; one or none
  * @param citation a line
  * @param version of the program
  * @param sha256 of the spec
@@ -64,6 +65,7 @@ record PageView(
     List<ContractionView> contractions,
     String contractionWords,
     FormsView forms,
+    List<MapView> maps,
     String citation,
     String version,
     String sha256) {
@@ -175,6 +177,7 @@ record PageView(
         f.map(x -> x.contractions().stream().map(parts::contraction).toList()).orElse(List.of()),
         Words.CONTRACTIONS,
         FormsView.of(a),
+        f.map(parts::maps).orElse(List.of()),
         Words.citation(a),
         a.version(),
         spec.source().sha256());
