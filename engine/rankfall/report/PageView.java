@@ -35,6 +35,7 @@ import rankfall.spec.Spec;
  * @param regions rows of the table of regions
  * @param contractions rows of the table of contracted algebras
  * @param contractionWords what that table shows
+ * @param forms torus, Casimir elements and invariant forms
  * @param maps the region maps; one or none
  * @param citation a line
  * @param version of the program
@@ -63,6 +64,7 @@ record PageView(
     List<RegionView> regions,
     List<ContractionView> contractions,
     String contractionWords,
+    FormsView forms,
     List<MapView> maps,
     String citation,
     String version,
@@ -174,6 +176,7 @@ record PageView(
         f.map(x -> x.regions().stream().map(parts::region).toList()).orElse(List.of()),
         f.map(x -> x.contractions().stream().map(parts::contraction).toList()).orElse(List.of()),
         Words.CONTRACTIONS,
+        FormsView.of(a),
         f.map(parts::maps).orElse(List.of()),
         Words.citation(a),
         a.version(),
