@@ -9,7 +9,6 @@ import rankfall.Analysis.Condition;
 import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
-import rankfall.Analysis.Signature;
 import rankfall.Analysis.StructureEntry;
 import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
@@ -58,7 +57,7 @@ record ComponentFindings(
         List<Factor> zeros =
             k.killing().determinant().map(d -> d.numerator().factors()).orElse(List.of());
         List<Condition> conditions = conditions(leaf, zeros, List.of());
-        return withConditions(k, number, conditions, signature(leaf, conditions));
+        return withConditions(k, number, conditions);
       }
     }
     ComponentForm c = ComponentForm.of(family, leaf.piece(), equations, seed());
@@ -74,7 +73,7 @@ record ComponentFindings(
             leaf.algebra().kernel().stream().map(Combination::new).toList(),
             c.form().blocks(),
             determinant.map(d -> new Quotient(d.numerator(), d.denominator())),
-            signature(leaf, conditions));
+            Optional.empty());
     Optional<List<MatrixEntry>> dual =
         determinant.isPresent() && c.basis().size() > 0
             ? DualForm.of(c.chain(), c.form().matrix()).map(d -> entries(d.matrix()))
@@ -99,8 +98,7 @@ record ComponentFindings(
   }
 
   /** A component that is known, its conditions told anew from all leaves. */
-  private static Component withConditions(
-      Component c, int number, List<Condition> conditions, Optional<Signature> signature) {
+  private static Component withConditions(Component c, int number, List<Condition> conditions) {
     Killing k = c.killing();
     return new Component(
         number,
@@ -108,16 +106,9 @@ record ComponentFindings(
         c.parameterDimension(),
         c.basis(),
         c.structure(),
-        new Killing(k.entries(), k.rank(), k.kernel(), k.blocks(), k.determinant(), signature),
+        new Killing(k.entries(), k.rank(), k.kernel(), k.blocks(), k.determinant(), k.signature()),
         c.dual(),
         conditions);
-  }
-
-  /** Only a complete exploration tells that nothing cuts the space. */
-  private Optional<Signature> signature(Leaf.Defined leaf, List<Condition> conditions) {
-    return partition.strata().isEmpty()
-        ? Optional.empty()
-        : new GeneralSignature(family, leaf.profile(), partition.leaves()).of(conditions);
   }
 
   /** Depends on the text of the spec alone. */

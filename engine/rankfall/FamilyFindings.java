@@ -51,7 +51,26 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     if (done.partition.strata().get().strata().isEmpty()) {
       return done.failed(done.nothingLeft());
     }
-    return done.analysis(done.components(general));
+    return done.withRegions(done.components(general), done.strata(), published);
+  }
+
+  private Analysis withRegions(
+      List<Component> components, List<Analysis.Stratum> strata, Consumer<Analysis> published) {
+    Analysis without = analysis(components, strata, Optional.empty());
+    if (strata.isEmpty() || family.ring().complex()) {
+      return without;
+    }
+    published.accept(without);
+    try {
+      Strata.Result cut = partition.strata().orElseThrow();
+      RegionFindings.Result regions =
+          new RegionFindings(family, cut, RegionFindings.NONE, meter).all();
+      List<Component> signed =
+          components.isEmpty() ? components : regions.withSignatures(components, cut);
+      return analysis(signed, strata, Optional.of(regions));
+    } catch (Meter.Exhausted e) {
+      return without;
+    }
   }
 
   /** Says where, if the conditions of a spec leave no real point. */
@@ -88,21 +107,25 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     }
   }
 
+  private List<Analysis.Stratum> strata() {
+    try {
+      return new StratumFindings(family, partition.strata().orElseThrow(), meter).all();
+    } catch (Meter.Exhausted e) {
+      return List.of();
+    }
+  }
+
   private Analysis analysis(List<Component> components) {
+    return analysis(components, List.of(), Optional.empty());
+  }
+
+  private Analysis analysis(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      Optional<RegionFindings.Result> regions) {
     List<String> undecided = new ArrayList<>(openPieces());
-    List<Analysis.Stratum> strata = List.of();
     if (partition.strata().isPresent()) {
-      if (components.isEmpty()) {
-        undecided.add(
-            "not decided ("
-                + meter.spent().orElse("out of budget")
-                + "): the components and their conditions");
-      }
-      try {
-        strata = new StratumFindings(family, partition.strata().get(), meter).all();
-      } catch (Meter.Exhausted e) {
-        undecided.add("not decided (" + e.getMessage() + "): the strata");
-      }
+      undecided.addAll(undecided(components, strata, regions));
     }
     Findings findings =
         new Findings(
@@ -115,9 +138,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            List.of(),
+            regions.map(RegionFindings.Result::regions).orElse(List.of()),
             contractions(components, strata),
-            maps(components, strata, List.of(), undecided));
+            maps(components, strata, regions, undecided));
     return new Analysis(
         spec,
         Version.text(),
@@ -131,19 +154,36 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
   private List<RegionMap> maps(
       List<Component> components,
       List<Analysis.Stratum> strata,
-      List<Analysis.Region> regions,
+      Optional<RegionFindings.Result> regions,
       List<String> undecided) {
-    if (!undecided.isEmpty()) {
-      return strata.isEmpty()
-          ? List.of()
-          : List.of(new RegionMap.Missing("The analysis did not finish, so nothing is drawn."));
+    if (strata.isEmpty() || (regions.isEmpty() && !family.ring().complex())) {
+      return List.of();
     }
     try {
-      return new MapFindings(family, components, strata, regions, meter).all();
+      List<Analysis.Region> known = regions.map(RegionFindings.Result::regions).orElse(List.of());
+      return new MapFindings(family, components, strata, known, meter).all();
     } catch (Meter.Exhausted e) {
       undecided.add("not decided (" + e.getMessage() + "): the map of regions");
       return List.of();
     }
+  }
+
+  private List<String> undecided(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      Optional<RegionFindings.Result> regions) {
+    String why = "not decided (" + meter.spent().orElse("out of budget") + "): ";
+    List<String> out = new ArrayList<>();
+    if (components.isEmpty()) {
+      out.add(why + "the components and their conditions");
+    }
+    if (strata.isEmpty()) {
+      out.add(why + "the strata");
+    } else if (regions.isEmpty() && !family.ring().complex()) {
+      out.add(why + "the real regions");
+    }
+    regions.ifPresent(r -> out.addAll(r.undecided()));
+    return out;
   }
 
   private List<Analysis.Contraction> contractions(

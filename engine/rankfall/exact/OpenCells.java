@@ -25,18 +25,40 @@ public final class OpenCells {
   private OpenCells() {}
 
   /**
-   * Points, at least one in every connected piece of the complement.
+   * A decomposition.
    *
-   * @param polynomials of one ring, none 0
+   * @param points with one value a variable of the ring, 0 for those that are no coordinates; at
+   *     least one in every connected piece of the complement
+   * @param walls irreducible polynomials, those given and those of the projections: none vanishes
+   *     in a cell, so each has one sign there
+   */
+  public record Decomposition(List<List<BigFraction>> points, List<Polynomial> walls) {
+    /** Copies the lists. */
+    public Decomposition {
+      points = List.copyOf(points);
+      walls = List.copyOf(walls);
+    }
+  }
+
+  /**
+   * Decomposes the complement of hypersurfaces into open cells.
+   *
+   * @param ring the ring of the polynomials
+   * @param polynomials none 0
    * @param variables positions of the coordinates of the space; all that occur in the polynomials
    * @param most number of points that is not to be passed
-   * @param ring the ring of the polynomials
-   * @return points with one value a variable of the ring, 0 for those not listed; empty where the
-   *     bound, or a bound on the size of the projection, would be passed
+   * @return a point in each cell; empty where the bound, or a bound on the size of the projection,
+   *     would be passed
    */
-  public static Optional<List<List<BigFraction>>> samples(
+  public static Optional<Decomposition> of(
       Variables ring, List<Polynomial> polynomials, List<Integer> variables, int most) {
     return lifted(ring, irreducible(polynomials), variables, most);
+  }
+
+  /** The points of {@link #of}. */
+  static Optional<List<List<BigFraction>>> samples(
+      Variables ring, List<Polynomial> polynomials, List<Integer> variables, int most) {
+    return of(ring, polynomials, variables, most).map(Decomposition::points);
   }
 
   /**
@@ -86,21 +108,22 @@ public final class OpenCells {
     return out.stream().sorted(Comparator.comparing(Polynomial::toString)).toList();
   }
 
-  private static Optional<List<List<BigFraction>>> lifted(
+  private static Optional<Decomposition> lifted(
       Variables ring, List<Polynomial> polynomials, List<Integer> variables, int most) {
     if (variables.isEmpty()) {
-      return Optional.of(List.of(Collections.nCopies(ring.count(), BigFraction.ZERO)));
+      List<BigFraction> origin = Collections.nCopies(ring.count(), BigFraction.ZERO);
+      return Optional.of(new Decomposition(List.of(origin), polynomials));
     }
     int v = cheapest(polynomials, variables);
     List<Integer> rest = variables.stream().filter(w -> w != v).toList();
-    Optional<List<Polynomial>> below = projection(polynomials, v);
-    Optional<List<List<BigFraction>>> base = below.flatMap(p -> lifted(ring, p, rest, most));
-    if (base.isEmpty()) {
-      return base;
+    Optional<Decomposition> below =
+        projection(polynomials, v).flatMap(p -> lifted(ring, p, rest, most));
+    if (below.isEmpty()) {
+      return below;
     }
     List<Polynomial> upper = polynomials.stream().filter(p -> p.contains(v)).toList();
     List<List<BigFraction>> out = new ArrayList<>();
-    for (List<BigFraction> point : base.get()) {
+    for (List<BigFraction> point : below.get().points()) {
       for (BigFraction x : between(roots(upper, point, v))) {
         List<BigFraction> q = new ArrayList<>(point);
         q.set(v, x);
@@ -110,7 +133,9 @@ public final class OpenCells {
         return Optional.empty();
       }
     }
-    return Optional.of(List.copyOf(out));
+    Set<Polynomial> walls = new LinkedHashSet<>(polynomials);
+    walls.addAll(below.get().walls());
+    return Optional.of(new Decomposition(out, List.copyOf(walls)));
   }
 
   private static int cheapest(List<Polynomial> polynomials, List<Integer> variables) {

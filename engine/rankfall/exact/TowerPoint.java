@@ -51,6 +51,17 @@ public final class TowerPoint {
         point = point.with(r, nearest(point.roots(r), value, name(chain, r), r.equation()));
       }
     }
+    return point.withLinear();
+  }
+
+  /** The point with given values of the tower variables, which satisfy the rules. */
+  static TowerPoint of(Chain chain, SortedMap<Integer, AlgebraicNumber> coordinates) {
+    return new TowerPoint(chain, coordinates, List.of()).withLinear();
+  }
+
+  /** Linear rules in the chosen variables give values too. */
+  private TowerPoint withLinear() {
+    TowerPoint point = this;
     for (Rule r : chain.rules()) {
       if (r.isLinear() && point.covers(r.equation(), r.variable())) {
         List<Rule> more = new ArrayList<>(point.linear);
@@ -131,7 +142,7 @@ public final class TowerPoint {
    *     over the field that these generate
    * @return ascending
    */
-  private List<AlgebraicNumber> roots(Rule r) {
+  List<AlgebraicNumber> roots(Rule r) {
     if (!covers(r.equation(), r.variable())) {
       throw new IllegalArgumentException(
           "the rule of "
