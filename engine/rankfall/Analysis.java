@@ -71,9 +71,9 @@ public record Analysis(
    * @param regions the real regions of all strata; empty where they were not computed
    * @param contractions of a family of matrices: for each stratum where the span is smaller than at
    *     the general point of a component around it, what the brackets of that point become
-   * @param scan the default grid, where the spec has one that was counted
    * @param maps pictures of the parameters, or why there is none; empty without parameters or
    *     strata
+   * @param scan the default grid, where the spec has one that was counted
    */
   public record Findings(
       List<String> listed,
@@ -85,8 +85,8 @@ public record Analysis(
       List<Covering> coverings,
       List<Region> regions,
       List<Contraction> contractions,
-      Optional<ScanCounts> scan,
-      List<RegionMap> maps) {
+      List<RegionMap> maps,
+      Optional<ScanCounts> scan) {
     /** Copies the lists. */
     public Findings {
       listed = List.copyOf(listed);
@@ -101,7 +101,7 @@ public record Analysis(
       maps = List.copyOf(maps);
     }
 
-    /** What was found before a grid is counted and a picture drawn. */
+    /** What was found before a grid is counted. */
     public Findings(
         List<String> listed,
         List<String> variables,
@@ -111,7 +111,8 @@ public record Analysis(
         List<Stratum> strata,
         List<Covering> coverings,
         List<Region> regions,
-        List<Contraction> contractions) {
+        List<Contraction> contractions,
+        List<RegionMap> maps) {
       this(
           listed,
           variables,
@@ -122,8 +123,8 @@ public record Analysis(
           coverings,
           regions,
           contractions,
-          Optional.empty(),
-          List.of());
+          maps,
+          Optional.empty());
     }
 
     /** The same with a grid that was counted. */
@@ -138,8 +139,8 @@ public record Analysis(
           coverings,
           regions,
           contractions,
-          Optional.of(counts),
-          maps);
+          maps,
+          Optional.of(counts));
     }
   }
 

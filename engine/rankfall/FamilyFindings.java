@@ -135,6 +135,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     if (partition.strata().isPresent()) {
       undecided.addAll(undecided(components, strata, regions));
     }
+    List<Analysis.Region> found = regions.map(RegionFindings.Result::regions).orElse(List.of());
     Findings findings =
         new Findings(
             family.names(),
@@ -146,10 +147,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            regions.map(RegionFindings.Result::regions).orElse(List.of()),
+            found,
             contractions(components, strata),
-            Optional.empty(),
-            maps(components, strata, regions, undecided));
+            maps(components, strata, found, undecided));
     return new Analysis(
         spec,
         Version.text(),
@@ -158,23 +158,6 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
         remarks(),
         undecided,
         Optional.of(findings));
-  }
-
-  private List<RegionMap> maps(
-      List<Component> components,
-      List<Analysis.Stratum> strata,
-      Optional<RegionFindings.Result> regions,
-      List<String> undecided) {
-    if (strata.isEmpty() || (regions.isEmpty() && !family.ring().complex())) {
-      return List.of();
-    }
-    try {
-      List<Analysis.Region> known = regions.map(RegionFindings.Result::regions).orElse(List.of());
-      return new MapFindings(family, components, strata, known, meter).all();
-    } catch (Meter.Exhausted e) {
-      undecided.add("not decided (" + e.getMessage() + "): the map of regions");
-      return List.of();
-    }
   }
 
   private List<String> undecided(
@@ -209,6 +192,22 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
                 + meter.spent().orElse("out of budget")
                 + "): the invariant forms of "
                 + names);
+  }
+
+  private List<RegionMap> maps(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      List<Analysis.Region> regions,
+      List<String> undecided) {
+    if (regions.isEmpty() && !family.ring().complex()) {
+      return List.of();
+    }
+    try {
+      return new MapFindings(family, components, strata, regions, meter).all();
+    } catch (Meter.Exhausted e) {
+      undecided.add("not decided (" + e.getMessage() + "): the map of regions");
+      return List.of();
+    }
   }
 
   private List<Analysis.Contraction> contractions(
