@@ -71,6 +71,8 @@ public record Analysis(
    * @param regions the real regions of all strata; empty where they were not computed
    * @param contractions of a family of matrices: for each stratum where the span is smaller than at
    *     the general point of a component around it, what the brackets of that point become
+   * @param maps pictures of the parameters, or why there is none; empty without parameters or
+   *     strata
    * @param scan the default grid, where the spec has one that was counted
    */
   public record Findings(
@@ -83,6 +85,7 @@ public record Analysis(
       List<Covering> coverings,
       List<Region> regions,
       List<Contraction> contractions,
+      List<RegionMap> maps,
       Optional<ScanCounts> scan) {
     /** Copies the lists. */
     public Findings {
@@ -95,6 +98,7 @@ public record Analysis(
       coverings = List.copyOf(coverings);
       regions = List.copyOf(regions);
       contractions = List.copyOf(contractions);
+      maps = List.copyOf(maps);
     }
 
     /** What was found before a grid is counted. */
@@ -107,7 +111,8 @@ public record Analysis(
         List<Stratum> strata,
         List<Covering> coverings,
         List<Region> regions,
-        List<Contraction> contractions) {
+        List<Contraction> contractions,
+        List<RegionMap> maps) {
       this(
           listed,
           variables,
@@ -118,6 +123,7 @@ public record Analysis(
           coverings,
           regions,
           contractions,
+          maps,
           Optional.empty());
     }
 
@@ -133,6 +139,7 @@ public record Analysis(
           coverings,
           regions,
           contractions,
+          maps,
           Optional.of(counts));
     }
   }
@@ -158,6 +165,8 @@ public record Analysis(
    * @param dual the non-zero entries of the inverse of the Killing matrix, upper triangle, where it
    *     exists
    * @param conditions where the form degenerates (further)
+   * @param torus the form on the torus of the spec, if it names one
+   * @param casimir the quadratic Casimir element, where the dual exists
    */
   public record Component(
       int number,
@@ -167,7 +176,9 @@ public record Analysis(
       List<StructureEntry> structure,
       Killing killing,
       Optional<List<MatrixEntry>> dual,
-      List<Condition> conditions) {}
+      List<Condition> conditions,
+      Optional<Forms.TorusForm> torus,
+      Optional<Forms.Casimir> casimir) {}
 
   /**
    * A structure constant: the coefficient of {@code target} in {@code [left, right]}; indices from
@@ -254,6 +265,7 @@ public record Analysis(
    * @param basis names of a basis of the algebra at the general point
    * @param kernel a basis of the kernel of the Killing form at the general point
    * @param remarks where a stated fact changes inside the stratum, a sentence each
+   * @param invariantForms its invariant forms; empty where they were not decided
    */
   public record Stratum(
       String name,
@@ -272,7 +284,8 @@ public record Analysis(
       List<Coordinate> witness,
       List<String> basis,
       List<Combination> kernel,
-      List<String> remarks) {
+      List<String> remarks,
+      Optional<Forms.InvariantForms> invariantForms) {
     /** The dimension of the kernel of the Killing form. */
     public int kernelDimension() {
       return dimension - rank;

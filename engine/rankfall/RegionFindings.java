@@ -93,7 +93,9 @@ record RegionFindings(Family family, Strata.Result strata, Names names, Meter me
           c.structure(),
           killing,
           c.dual(),
-          c.conditions());
+          c.conditions(),
+          c.torus(),
+          c.casimir());
     }
   }
 
@@ -107,7 +109,8 @@ record RegionFindings(Family family, Strata.Result strata, Names names, Meter me
     List<String> undecided = new ArrayList<>();
     for (Strata.Stratum s : strata.strata()) {
       String name = FamilyFindings.name(perStratum.size());
-      Regions r = Regions.of(Cells.of(family, s, names.walls(s), meter), names.labels(s));
+      Cells cells = Cells.of(family, s, names.walls(s), meter);
+      Regions r = Regions.of(family, s, cells, names.labels(s), meter);
       List<Region> own = new ArrayList<>();
       for (Regions.Row row : r.rows()) {
         own.add(region(name, "R" + (own.size() + 1), s, row, r.exact()));

@@ -101,6 +101,30 @@ public final class TowerPoint {
     return a.compareTo(images.get(images.size() - 1 - conjugates.indexOf(b)));
   }
 
+  /**
+   * The points above this one, ascending in the variable of one more rule.
+   *
+   * @param r free of variables of linear rules; irreducible over the numbers of this point, or at
+   *     least without multiple roots there
+   */
+  List<TowerPoint> extended(Rule r) {
+    List<Rule> more = new ArrayList<>(chain.rules());
+    more.add(r.isLinear() ? 0 : more.size(), r);
+    Chain longer = new Chain(chain.variables(), more);
+    if (r.isLinear()) {
+      List<Rule> solved = new ArrayList<>(linear);
+      solved.add(r);
+      return List.of(new TowerPoint(longer, coordinates, solved));
+    }
+    TowerPoint above = new TowerPoint(longer, coordinates, linear);
+    return roots(r).stream().map(a -> above.with(r, a)).toList();
+  }
+
+  /** The rules that define the numbers of this point. */
+  Chain chain() {
+    return chain;
+  }
+
   private TowerPoint with(Rule r, AlgebraicNumber value) {
     SortedMap<Integer, AlgebraicNumber> more = new TreeMap<>(coordinates);
     more.put(r.variable(), value);

@@ -10,6 +10,7 @@ import java.util.Optional;
 import java.util.Random;
 import java.util.Set;
 import java.util.TreeSet;
+import java.util.function.Predicate;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Chain;
 import rankfall.exact.ConstantRoot;
@@ -31,6 +32,35 @@ import rankfall.lie.FamilyCondition;
 record CellSearch(Family family, Strata.Stratum stratum, Meter meter) {
   private static final int MOST_CELLS = 2000;
   private static final int SAMPLES = 400;
+  private static final int TRIES = 120;
+
+  /** Parts of right triangles with integer sides: of use on circles and hyperbolas. */
+  private static final List<BigFraction> PARTS =
+      List.of(
+          BigFraction.of(1),
+          BigFraction.of(-1),
+          BigFraction.of(0),
+          BigFraction.of(3, 5),
+          BigFraction.of(4, 5),
+          BigFraction.of(-3, 5),
+          BigFraction.of(-4, 5),
+          BigFraction.of(5, 3),
+          BigFraction.of(5, 4),
+          BigFraction.of(3, 4),
+          BigFraction.of(4, 3),
+          BigFraction.of(-5, 3),
+          BigFraction.of(-5, 4),
+          BigFraction.of(-3, 4),
+          BigFraction.of(-4, 3),
+          BigFraction.of(2),
+          BigFraction.of(-2),
+          BigFraction.of(1, 2),
+          BigFraction.of(-1, 2),
+          BigFraction.of(5, 13),
+          BigFraction.of(12, 13),
+          BigFraction.of(-5, 13),
+          BigFraction.of(-12, 13));
+
   private static final List<BigFraction> VALUES =
       List.of(
           BigFraction.of(1),
@@ -173,6 +203,38 @@ record CellSearch(Family family, Strata.Stratum stratum, Meter meter) {
       out.put(family.ring().constants().rules().get(k).variable(), roots.get(k));
     }
     return out;
+  }
+
+  /**
+   * A point with rational coordinates, short ones if possible.
+   *
+   * @param wanted what it must satisfy
+   * @return empty if none was found
+   */
+  Optional<RealSample> rational(Predicate<RealSample> wanted) {
+    Chart chart = new Chart(stratum.closure());
+    List<Integer> free = chart.chain().freeVariables();
+    Random random = new Random(1);
+    List<BigFraction> base =
+        new ArrayList<>(Collections.nCopies(chart.chain().variables().count(), BigFraction.ZERO));
+    for (int k = 0; k < TRIES; k++) {
+      meter.check();
+      int choices = Math.min(PARTS.size(), 3 + k / 4);
+      for (int v : free) {
+        base.set(v, PARTS.get(free.size() == 1 ? k % PARTS.size() : random.nextInt(choices)));
+      }
+      for (RealSample p : above(chart, base)) {
+        if (p.rationalCoordinates().isPresent()
+            && stratum.exclusions().stream().noneMatch(e -> holds(e, p))
+            && wanted.test(p)) {
+          return Optional.of(p);
+        }
+      }
+      if (free.isEmpty() || (free.size() == 1 && k >= PARTS.size())) {
+        break;
+      }
+    }
+    return Optional.empty();
   }
 
   /** Points at seeded random values of the free variables, off all walls. */

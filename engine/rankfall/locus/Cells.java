@@ -10,7 +10,6 @@ import rankfall.exact.Polynomial;
 import rankfall.exact.RealSample;
 import rankfall.lie.Family;
 import rankfall.lie.FamilyCondition;
-import rankfall.lie.Signature;
 
 /**
  * The real points of a stratum, cut into cells.
@@ -18,7 +17,8 @@ import rankfall.lie.Signature;
  * <p>Every real point of the stratum within the domain lies in a cell, or in the closure of one
  * within the stratum: the cells are those above the open cells of the free variables (open
  * cylindrical decomposition), and those of the pieces at whose points the closure of the stratum is
- * singular. On the connected pieces of the stratum the signature is constant, because the rank is.
+ * singular or on the border of the domain. On the connected pieces of the stratum the signature is
+ * constant, because the rank is.
  *
  * @param cells with a point each; none where the stratum has no real point in the domain
  * @param printed irreducible polynomials that bound the stratum or are walls given: their signs
@@ -51,10 +51,17 @@ public record Cells(
     Build build = new Build(family, stratum, new CellSearch(family, stratum, meter));
     List<Polynomial> printed = build.printed(walls);
     Cells plain = build.cells(printed, List.of(), meter);
-    if (SignTable.tells(plain, Cell::signature)) {
+    if (plain.exact() && SignTable.tells(plain, Cell::signature)) {
       return plain;
     }
-    return build.cells(printed, KillingMinors.of(stratum.leaves().get(0)), meter);
+    List<Polynomial> minors = KillingMinors.of(stratum.leaves().get(0));
+    if (plain.exact()) {
+      Cells finer = build.cells(printed, minors, meter);
+      if (finer.exact()) {
+        return finer;
+      }
+    }
+    return build.cells(build.deciding(printed, minors), List.of(), meter);
   }
 
   private record Build(Family family, Strata.Stratum stratum, CellSearch search) {
@@ -76,6 +83,15 @@ public record Cells(
       return List.copyOf(out);
     }
 
+    /** With these the signature is known wherever none vanishes. */
+    List<Polynomial> deciding(List<Polynomial> printed, List<Polynomial> minors) {
+      Set<Polynomial> out = new TreeSet<>(Chart.BY_SIZE);
+      out.addAll(printed);
+      out.addAll(minors);
+      stratum.closure().initials().forEach(p -> out.addAll(factors(p)));
+      return List.copyOf(out);
+    }
+
     Cells cells(List<Polynomial> printed, List<Polynomial> more, Meter meter) {
       Set<Polynomial> invariant = new LinkedHashSet<>(printed);
       invariant.addAll(more);
@@ -86,16 +102,12 @@ public record Cells(
       List<Cell> cells = new ArrayList<>();
       found.points().forEach(p -> cells.add(cell(p)));
       invariant.addAll(others);
-      for (Piece p : new SingularPieces(stratum, new Cutter(constants(), meter), meter).all()) {
+      for (Piece p : new HiddenPieces(family, stratum, meter).all()) {
         CellSearch.Found f = search.in(p.chain(), invariant);
         exact &= f.exact();
         f.points().forEach(x -> cells.add(cell(x)));
       }
       return new Cells(cells, printed, others, exact);
-    }
-
-    private rankfall.exact.Chain constants() {
-      return family.ring().constants();
     }
 
     /** What else keeps its sign: factors of exclusions and of the domain, then walls by size. */
@@ -120,21 +132,7 @@ public record Cells(
     }
 
     private Cell cell(RealSample point) {
-      PointAlgebra<?> algebra = PointAlgebra.at(family, point);
-      Signature s = algebra.signature();
-      Profile p = stratum.profile();
-      if (algebra.constants().dimension() != p.dimension() || s.rank() != p.rank()) {
-        throw new IllegalStateException(
-            "dimension "
-                + algebra.constants().dimension()
-                + ", signature "
-                + s
-                + " at "
-                + point
-                + " in a stratum with "
-                + p);
-      }
-      return new Cell(point, algebra, s);
+      return Cell.at(family, stratum, point);
     }
   }
 }

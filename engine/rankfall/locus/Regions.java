@@ -3,12 +3,14 @@ package rankfall.locus;
 import java.util.ArrayList;
 import java.util.BitSet;
 import java.util.Comparator;
+import java.util.IdentityHashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import java.util.function.Function;
 import java.util.stream.Collectors;
 import rankfall.exact.Polynomial;
+import rankfall.lie.Family;
 import rankfall.lie.Signature;
 
 /**
@@ -67,18 +69,24 @@ public record Regions(List<Row> rows, boolean exact, boolean complete) {
   private record Kind(Signature signature, String label) {}
 
   /**
-   * Merges cells of one signature and one label.
+   * Merges the cells of a stratum that have one signature and one label.
    *
-   * @param cells of a stratum
+   * @param family of a real ground
+   * @param stratum with the leaves inside it
+   * @param cells of the stratum
    * @param label names what lives in a cell; equal labels may share a row
+   * @param meter ends the work early
+   * @throws Meter.Exhausted if the budget is used up
    */
-  public static Regions of(Cells cells, Function<Cell, String> label) {
-    Map<Cell, Kind> kinds =
-        cells.cells().stream()
-            .distinct()
-            .collect(Collectors.toMap(c -> c, c -> new Kind(c.signature(), label.apply(c))));
+  public static Regions of(
+      Family family,
+      Strata.Stratum stratum,
+      Cells cells,
+      Function<Cell, String> label,
+      Meter meter) {
+    Map<Cell, Kind> kinds = new IdentityHashMap<>();
+    cells.cells().forEach(c -> kinds.put(c, new Kind(c.signature(), label.apply(c))));
     SignTable table = SignTable.of(cells, kinds::get);
-    List<List<Integer>> vectors = new ArrayList<>(table.groups().keySet());
     List<List<Cell>> groups = new ArrayList<>(table.groups().values());
     Map<Kind, BitSet> targets =
         new TreeMap<>(
@@ -91,36 +99,86 @@ public record Regions(List<Row> rows, boolean exact, boolean complete) {
         targets.computeIfAbsent(own.get(0), x -> new BitSet()).set(k);
       }
     }
-    ShortCover cover =
-        new ShortCover(vectors, table.polynomials().stream().map(Regions::cost).toList());
+    Merging merging =
+        new Merging(new CellSearch(family, stratum, meter), label, table, cells.exact());
     List<Row> rows = new ArrayList<>();
-    targets.forEach(
-        (kind, target) -> {
-          List<Row> own = new ArrayList<>();
-          for (ShortCover.Row r : cover.of(target)) {
-            own.add(row(kind, r, table.polynomials(), groups));
-          }
-          own.sort(Comparator.comparing(Row::text));
-          rows.addAll(own);
-        });
-    return new Regions(rows, cells.exact(), table.pure());
+    targets.forEach((kind, target) -> rows.addAll(merging.rows(kind, target)));
+    int told = rows.stream().mapToInt(r -> r.cells.size()).sum();
+    return new Regions(rows, cells.exact(), told >= cells.cells().size());
   }
 
-  private static int cost(Polynomial p) {
-    return Math.min(1000, 2 * p.totalDegree() + p.termCount());
-  }
+  private record Merging(
+      CellSearch search, Function<Cell, String> label, SignTable table, boolean exact) {
+    private static final int MOST_PLACES = 10;
 
-  private static Row row(
-      Kind kind, ShortCover.Row r, List<Polynomial> polynomials, List<List<Cell>> groups) {
-    List<Condition> conditions = new ArrayList<>();
-    for (ShortCover.Atom a : r.atoms()) {
-      Polynomial product =
-          a.places().stream().map(polynomials::get).reduce(Polynomial::times).orElseThrow();
-      conditions.add(new Condition(product.primitive(), a.sign()));
+    List<Row> rows(Kind kind, BitSet target) {
+      List<List<Integer>> vectors = new ArrayList<>(table.groups().keySet());
+      List<Integer> costs = table.polynomials().stream().map(Merging::cost).toList();
+      boolean closed = exact || costs.size() <= MOST_PLACES;
+      if (!exact && closed) {
+        addUnseen(vectors, costs.size());
+      }
+      ShortCover cover = new ShortCover(vectors, costs);
+      List<Row> out = new ArrayList<>();
+      for (ShortCover.Row r : closed ? cover.of(target) : cover.singles(target)) {
+        out.add(row(kind, r));
+      }
+      out.sort(Comparator.comparing(Row::text));
+      return out;
     }
-    conditions.sort(Comparator.comparing(Condition::polynomial, Chart.BY_SIZE));
-    List<Cell> cells = new ArrayList<>();
-    r.holds().stream().forEach(k -> cells.addAll(groups.get(k)));
-    return new Row(conditions, kind.signature, kind.label, cells, Witnesses.shortest(cells));
+
+    private static int cost(Polynomial p) {
+      return Math.min(1000, 2 * p.totalDegree() + p.termCount());
+    }
+
+    /** Signs that no sample has may occur all the same: no row may hold for them. */
+    private static void addUnseen(List<List<Integer>> vectors, int places) {
+      List<List<Integer>> all = List.of(List.of());
+      for (int p = 0; p < places; p++) {
+        List<List<Integer>> longer = new ArrayList<>();
+        for (List<Integer> v : all) {
+          for (int sign : new int[] {1, -1}) {
+            List<Integer> w = new ArrayList<>(v);
+            w.add(sign);
+            longer.add(w);
+          }
+        }
+        all = longer;
+      }
+      all.stream().filter(v -> !vectors.contains(v)).forEach(vectors::add);
+    }
+
+    private Row row(Kind kind, ShortCover.Row r) {
+      List<Condition> conditions = new ArrayList<>();
+      for (ShortCover.Atom a : r.atoms()) {
+        Polynomial product =
+            a.places().stream()
+                .map(table.polynomials()::get)
+                .reduce(Polynomial::times)
+                .orElseThrow();
+        conditions.add(new Condition(product.primitive(), a.sign()));
+      }
+      conditions.sort(Comparator.comparing(Condition::polynomial, Chart.BY_SIZE));
+      List<Cell> cells = new ArrayList<>();
+      List<List<Cell>> groups = new ArrayList<>(table.groups().values());
+      r.holds().stream().filter(k -> k < groups.size()).forEach(k -> cells.addAll(groups.get(k)));
+      Cell witness = witness(kind, conditions, Witnesses.shortest(cells));
+      if (!cells.contains(witness)) {
+        cells.add(witness);
+      }
+      return new Row(conditions, kind.signature, kind.label, cells, witness);
+    }
+
+    /** A rational point in place of an irrational one, where one is found. */
+    private Cell witness(Kind kind, List<Condition> conditions, Cell found) {
+      if (found.point().rationalCoordinates().isPresent()) {
+        return found;
+      }
+      return search
+          .rational(p -> conditions.stream().allMatch(c -> p.sign(c.polynomial()) == c.sign))
+          .map(p -> Cell.at(search.family(), search.stratum(), p))
+          .filter(c -> new Kind(c.signature(), label.apply(c)).equals(kind))
+          .orElse(found);
+    }
   }
 }

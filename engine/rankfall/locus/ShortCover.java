@@ -21,7 +21,8 @@ final class ShortCover {
   private static final int MOST_NODES = 20_000;
   private static final int MOST_ROWS = 6;
   private final List<List<Integer>> vectors;
-  private final List<Atom> atoms;
+  private final List<Integer> costs;
+  private final List<Atom> atoms = new ArrayList<>();
   private int nodes;
 
   /**
@@ -57,7 +58,6 @@ final class ShortCover {
    */
   ShortCover(List<List<Integer>> vectors, List<Integer> costs) {
     this.vectors = List.copyOf(vectors);
-    this.atoms = new ArrayList<>();
     this.costs = List.copyOf(costs);
     for (int i = 0; i < costs.size(); i++) {
       for (int sign : new int[] {1, -1}) {
@@ -72,8 +72,6 @@ final class ShortCover {
       }
     }
   }
-
-  private final List<Integer> costs;
 
   private int cost(Atom a) {
     return 40 * a.places.size() + a.places.stream().mapToInt(costs::get).sum();
@@ -93,7 +91,7 @@ final class ShortCover {
    * A cover of a set, by disjoint rows.
    *
    * @param target positions of vectors
-   * @return few rows, short ones
+   * @return few rows, short ones; they leave out what no conditions tell from other vectors
    */
   List<Row> of(BitSet target) {
     if (target.isEmpty()) {
@@ -132,8 +130,10 @@ final class ShortCover {
       open = new ArrayList<>(next.values());
     }
     for (int k = target.nextSetBit(0); k >= 0; k = target.nextSetBit(k + 1)) {
-      Row own = single(k);
-      found.putIfAbsent(own.holds, own);
+      Row own = single(k, extents);
+      if (isInside(own.holds, target)) {
+        found.putIfAbsent(own.holds, own);
+      }
     }
     List<Row> out = new ArrayList<>(found.values());
     out.sort(Comparator.comparingInt(Row::cost).thenComparing(r -> r.atoms.toString()));
@@ -164,21 +164,27 @@ final class ShortCover {
     }
   }
 
-  /** The vector alone, all its places told. */
-  private Row single(int k) {
+  /** The vector, and all that differ from it at its zeros only: all its signs told. */
+  private Row single(int k, List<BitSet> extents) {
     List<Atom> all = new ArrayList<>();
+    BitSet holds = new BitSet();
+    holds.set(0, vectors.size());
     int cost = 0;
-    for (int p = 0; p < costs.size(); p++) {
-      int sign = vectors.get(k).get(p);
-      if (sign != 0) {
-        Atom a = new Atom(List.of(p), sign);
+    for (int at = 0; at < 2 * costs.size(); at++) {
+      Atom a = atoms.get(at);
+      if (a.holds(vectors.get(k))) {
         all.add(a);
+        holds.and(extents.get(at));
         cost += cost(a);
       }
     }
-    BitSet holds = new BitSet();
-    holds.set(k);
     return new Row(List.copyOf(all), holds, cost);
+  }
+
+  /** Each vector of a set by all its signs, for a list of vectors that may not be complete. */
+  List<Row> singles(BitSet target) {
+    List<BitSet> extents = atoms.stream().map(this::extent).toList();
+    return target.stream().mapToObj(k -> single(k, extents)).toList();
   }
 
   /** The cheapest cover of what is left by exactly some number of disjoint rows. */
@@ -211,21 +217,24 @@ final class ShortCover {
     return best;
   }
 
-  /** The largest row that fits, again and again. */
+  /** The largest row that fits, again and again, as long as there is one. */
   private static List<Row> greedy(List<Row> rows, BitSet target) {
     BitSet left = (BitSet) target.clone();
     List<Row> out = new ArrayList<>();
-    while (!left.isEmpty()) {
-      Row best = null;
+    Row best = null;
+    do {
+      best = null;
       for (Row r : rows) {
         if (isInside(r.holds, left)
             && (best == null || r.holds.cardinality() > best.holds.cardinality())) {
           best = r;
         }
       }
-      out.add(best);
-      left.andNot(best.holds);
-    }
+      if (best != null) {
+        out.add(best);
+        left.andNot(best.holds);
+      }
+    } while (best != null && !left.isEmpty());
     return out;
   }
 }

@@ -26,9 +26,16 @@ record SignTable(
 
   /**
    * Groups cells: by all polynomials that bound the stratum and are not of one sign, then by as few
-   * others as are needed to tell the classes apart.
+   * others as are needed to tell the classes apart. Of cells that are samples only, signs that
+   * agree prove nothing: these are grouped by all polynomials that bound the stratum.
    */
   static SignTable of(Cells cells, Function<Cell, ?> classOf) {
+    if (!cells.exact()) {
+      List<Object> kinds = new ArrayList<>();
+      cells.cells().forEach(c -> kinds.add(classOf.apply(c)));
+      List<Column> all = cells.printed().stream().map(p -> column(p, cells)).toList();
+      return table(all, cells, impure(all, kinds) == 0);
+    }
     List<Column> printed = columns(cells.printed(), cells, Set.of());
     Set<List<Integer>> known = new HashSet<>();
     printed.forEach(c -> known.add(c.signs));
@@ -60,12 +67,16 @@ record SignTable(
   /** A polynomial and its signs at the cells, the first of which is not negative. */
   private record Column(Polynomial polynomial, List<Integer> signs) {}
 
+  private static Column column(Polynomial p, Cells cells) {
+    return new Column(p, cells.cells().stream().map(c -> c.point().sign(p)).toList());
+  }
+
   private static List<Column> columns(
       List<Polynomial> polynomials, Cells cells, Set<List<Integer>> known) {
     List<Column> out = new ArrayList<>();
     Set<List<Integer>> seen = new HashSet<>(known);
     for (Polynomial p : polynomials) {
-      List<Integer> signs = cells.cells().stream().map(c -> c.point().sign(p)).toList();
+      List<Integer> signs = column(p, cells).signs;
       List<Integer> negative = signs.stream().map(s -> -s).toList();
       boolean one = signs.stream().distinct().count() < 2;
       if (!one && !seen.contains(negative) && seen.add(signs)) {

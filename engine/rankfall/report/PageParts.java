@@ -168,6 +168,10 @@ final class PageParts {
     return new SafeString(ClosureDiagram.of(f.strata(), f.coverings()));
   }
 
+  List<MapView> maps(Findings f) {
+    return new MapParts(f, formulas).all();
+  }
+
   PageView.ContractionView contraction(Contraction c) {
     Optional<Contracted> limit =
         c.outcome() instanceof Contracted x ? Optional.of(x) : Optional.empty();

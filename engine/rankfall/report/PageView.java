@@ -35,6 +35,8 @@ import rankfall.spec.Spec;
  * @param regions rows of the table of regions
  * @param contractions rows of the table of contracted algebras
  * @param contractionWords what that table shows
+ * @param forms torus, Casimir elements and invariant forms
+ * @param maps the region maps; one or none
  * @param citation a line
  * @param version of the program
  * @param sha256 of the spec
@@ -62,6 +64,8 @@ record PageView(
     List<RegionView> regions,
     List<ContractionView> contractions,
     String contractionWords,
+    FormsView forms,
+    List<MapView> maps,
     String citation,
     String version,
     String sha256) {
@@ -172,6 +176,8 @@ record PageView(
         f.map(x -> x.regions().stream().map(parts::region).toList()).orElse(List.of()),
         f.map(x -> x.contractions().stream().map(parts::contraction).toList()).orElse(List.of()),
         Words.CONTRACTIONS,
+        FormsView.of(a),
+        f.map(parts::maps).orElse(List.of()),
         Words.citation(a),
         a.version(),
         spec.source().sha256());

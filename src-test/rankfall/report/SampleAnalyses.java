@@ -62,7 +62,7 @@ final class SampleAnalyses {
         List.of(),
         Map.of(),
         Map.of(),
-        new Spec.Source("sample.yaml", List.of("family: " + family), SHA, place));
+        new Spec.Source("sample.yaml", List.of("family: " + family), SHA, place, List.of()));
   }
 
   static RationalFunction whole(Polynomial p) {
@@ -127,7 +127,9 @@ final class SampleAnalyses {
                     Optional.of(2),
                     basis,
                     List.of(unit(v, 3, 1), unit(v, 3, 2)),
-                    RealPoints.YES)));
+                    RealPoints.YES)),
+            Optional.empty(),
+            Optional.empty());
     return new Analysis(
         spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
         "0.1.0",
@@ -144,6 +146,7 @@ final class SampleAnalyses {
                 List.of(),
                 List.of(b),
                 List.of(c),
+                List.of(),
                 List.of(),
                 List.of(),
                 List.of(),
@@ -228,7 +231,9 @@ final class SampleAnalyses {
                     Optional.of(2),
                     basis,
                     List.of(unit(v, 3, 0), unit(v, 3, 1)),
-                    RealPoints.UNKNOWN)));
+                    RealPoints.UNKNOWN)),
+            Optional.empty(),
+            Optional.empty());
     List<Coordinate> origin = point("0", "0", "0");
     List<Stratum> strata =
         List.of(
@@ -310,7 +315,8 @@ final class SampleAnalyses {
                 List.of(
                     new Covering("S2", "S1"), new Covering("S3", "S2"), new Covering("S4", "S3")),
                 regions,
-                contractions(a, v, basis))));
+                contractions(a, v, basis),
+                List.of())));
   }
 
   /** One of each outcome. */
@@ -356,6 +362,7 @@ final class SampleAnalyses {
                 List.of(),
                 List.of(),
                 List.of(),
+                List.of(),
                 List.of())));
   }
 
@@ -391,6 +398,7 @@ final class SampleAnalyses {
         witness,
         List.of("X", "Y", "Z"),
         kernel,
-        List.of());
+        List.of(),
+        Optional.empty());
   }
 }
