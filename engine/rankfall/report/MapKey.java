@@ -95,6 +95,11 @@ final class MapKey {
     return border ? "line-border" : "line-" + drawn.indexOf(p) % LINES;
   }
 
+  /** How many places are areas in some picture. */
+  int fills() {
+    return filled.size();
+  }
+
   /** Whether a place is an area in some picture. */
   boolean isFilled(Place p) {
     return filled.contains(p);
