@@ -161,11 +161,12 @@ record ProgramScan(
     return new FrontDoors.Scanned("", said(sum[0]), sum[0].unreadable() == 0);
   }
 
-  private static String said(Tally tally) {
+  private String said(Tally tally) {
     return Messages.count(tally.total(), "point", "points")
         + ", "
         + tally.direct()
-        + " of them computed directly"
+        + " of them computed directly, "
+        + progress.time()
         + (tally.unreadable() == 0 ? "" : ", " + tally.unreadable() + " unreadable");
   }
 

@@ -48,6 +48,11 @@ final class ScanProgress {
     }
   }
 
+  /** How long it took since the begin, as text. */
+  String time() {
+    return String.format(Locale.ROOT, "%.1f s", (System.nanoTime() - begun) / SECOND);
+  }
+
   /** Leaves the line of the terminal free. */
   void end() {
     if (shown) {

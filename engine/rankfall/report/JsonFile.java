@@ -3,6 +3,7 @@ package rankfall.report;
 import com.fasterxml.jackson.core.JsonProcessingException;
 import com.fasterxml.jackson.core.util.DefaultIndenter;
 import com.fasterxml.jackson.core.util.DefaultPrettyPrinter;
+import com.fasterxml.jackson.databind.JsonNode;
 import com.fasterxml.jackson.databind.ObjectMapper;
 import com.fasterxml.jackson.databind.node.ArrayNode;
 import com.fasterxml.jackson.databind.node.JsonNodeFactory;
@@ -24,12 +25,15 @@ import rankfall.Analysis.Findings;
 import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
+import rankfall.Analysis.ScanCount;
+import rankfall.Analysis.ScanCounts;
 import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Signature;
 import rankfall.Analysis.Stratum;
 import rankfall.Analysis.StructureEntry;
 import rankfall.Analysis.Unfollowed;
 import rankfall.exact.Polynomial;
+import rankfall.exact.Rationals;
 import rankfall.spec.Spec;
 
 /** The image of an analysis as JSON; the resource {@code result-schema.json} documents it. */
@@ -116,7 +120,37 @@ final class JsonFile {
     } else {
       out.putNull("contractions");
     }
+    if (f.scan().isPresent()) {
+      out.set("scan", scan(f.scan().get()));
+    } else {
+      out.putNull("scan");
+    }
     return out;
+  }
+
+  private static ObjectNode scan(ScanCounts s) {
+    ObjectNode out = NODES.objectNode();
+    out.set(
+        "axes",
+        array(
+            s.axes(),
+            (node, a) -> {
+              node.put("name", a.name());
+              node.set("values", texts(a.values().stream().map(Rationals::text).toList()));
+            }));
+    out.set("counts", array(s.counts(), JsonFile::count));
+    return out;
+  }
+
+  private static void count(ObjectNode out, ScanCount c) {
+    out.put("status", c.status());
+    out.put("stratum", c.stratum());
+    out.put("region", c.region());
+    out.put("rank", c.rank().isPresent() ? c.rank().getAsInt() : null);
+    out.put("dimension", c.dimension().isPresent() ? c.dimension().getAsInt() : null);
+    out.set("signature", c.signature().map(x -> (JsonNode) signature(x)).orElse(NODES.nullNode()));
+    out.put("type", c.type());
+    out.put("points", c.points());
   }
 
   private static void contraction(ObjectNode out, Contraction c) {

@@ -97,6 +97,16 @@ final class MapKey {
     return border ? "line-border" : "line-" + drawn.indexOf(p) % LINES;
   }
 
+  /** How many places are areas in some picture. */
+  int fills() {
+    return filled.size();
+  }
+
+  /** Whether a place is an area in some picture. */
+  boolean isFilled(Place p) {
+    return filled.contains(p);
+  }
+
   /** The short name that stands in a picture. */
   String name(Place p) {
     return switch (p.kind()) {

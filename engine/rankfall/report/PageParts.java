@@ -173,6 +173,10 @@ final class PageParts {
     return new MapParts(f, formulas).all();
   }
 
+  List<ScanView> scans(Findings f) {
+    return f.scan().map(s -> new ScanParts(f, s, formulas).view()).stream().toList();
+  }
+
   PageView.ContractionView contraction(Contraction c) {
     Optional<Contracted> limit =
         c.outcome() instanceof Contracted x ? Optional.of(x) : Optional.empty();

@@ -37,6 +37,7 @@ import rankfall.spec.Spec;
  * @param contractionWords what that table shows
  * @param forms torus, Casimir elements and invariant forms
  * @param maps the region maps; one or none
+ * @param scans the default grid; one or none
  * @param citation a line
  * @param version of the program
  * @param sha256 of the spec
@@ -66,6 +67,7 @@ record PageView(
     String contractionWords,
     FormsView forms,
     List<MapView> maps,
+    List<ScanView> scans,
     String citation,
     String version,
     String sha256) {
@@ -183,6 +185,7 @@ record PageView(
         Words.CONTRACTIONS,
         FormsView.of(a),
         f.map(parts::maps).orElse(List.of()),
+        f.map(parts::scans).orElse(List.of()),
         Words.citation(a),
         a.version(),
         spec.source().sha256());

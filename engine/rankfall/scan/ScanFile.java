@@ -4,6 +4,7 @@ import java.io.Closeable;
 import java.io.IOException;
 import java.nio.ByteBuffer;
 import java.nio.channels.FileChannel;
+import java.nio.channels.SeekableByteChannel;
 import java.nio.file.Path;
 import java.nio.file.StandardOpenOption;
 
@@ -19,16 +20,25 @@ import java.nio.file.StandardOpenOption;
 public final class ScanFile implements Closeable {
   private static final int PAGE = 4096;
 
-  private final FileChannel data;
+  private final SeekableByteChannel data;
   private final Checkpoint log;
   private final boolean zipped;
   private long end;
 
-  private ScanFile(FileChannel data, Checkpoint log, boolean zipped, long end) {
+  /**
+   * A file at the end of its last logged block.
+   *
+   * @param data where rows go
+   * @param log of the blocks that are there
+   * @param zipped whether a block is one gzip member
+   */
+  ScanFile(SeekableByteChannel data, Checkpoint log, boolean zipped) throws IOException {
     this.data = data;
     this.log = log;
     this.zipped = zipped;
-    this.end = end;
+    this.end = log.end();
+    data.truncate(end);
+    data.position(end);
   }
 
   /**
@@ -46,9 +56,7 @@ public final class ScanFile implements Closeable {
     Checkpoint log = resume ? Checkpoint.resume(path, claim) : Checkpoint.begin(path, claim);
     FileChannel data = FileChannel.open(path, StandardOpenOption.CREATE, StandardOpenOption.WRITE);
     log.backTo(data.size());
-    data.truncate(log.end());
-    data.position(log.end());
-    return new ScanFile(data, log, path.toString().endsWith(".gz"), log.end());
+    return new ScanFile(data, log, path.toString().endsWith(".gz"));
   }
 
   /** How many blocks are written. */
@@ -110,7 +118,9 @@ public final class ScanFile implements Closeable {
 
   /** Notes that all is written. */
   public void finish() throws IOException {
-    data.force(true);
+    if (data instanceof FileChannel file) {
+      file.force(true);
+    }
     log.finish();
   }
 

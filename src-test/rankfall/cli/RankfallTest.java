@@ -32,7 +32,7 @@ final class RankfallTest {
   }
 
   @ParameterizedTest
-  @ValueSource(strings = {"", "analyse", "analyze", "check", "point"})
+  @ValueSource(strings = {"", "analyse", "analyze", "check", "point", "scan"})
   void everyVerbExplainsItselfAndItsVersion(String verb) {
     String[] help = verb.isEmpty() ? new String[] {"--help"} : new String[] {verb, "--help"};
     assertEquals(0, run(help));
@@ -65,7 +65,24 @@ final class RankfallTest {
         "point SPEC a=1 --json --csv",
         "point SPEC a=1 --from SPEC",
         "point SPEC a=1 --family none",
-        "point SPEC --from none.csv"
+        "point SPEC --from none.csv",
+        "scan",
+        "scan SPEC",
+        "scan SPEC --count --out x.csv",
+        "scan SPEC --count --resume",
+        "scan SPEC --count --columns a",
+        "scan SPEC --count --threads 0",
+        "scan SPEC --count --shard 0/3",
+        "scan SPEC --count --shard 4/3",
+        "scan SPEC --count --shard half",
+        "scan SPEC --count --grid a=1 --from SPEC",
+        "scan SPEC --count --grid misfit",
+        "scan SPEC --count --sample 5",
+        "scan SPEC --count --sample 0 --range a=1:2",
+        "scan SPEC --count --seed 5",
+        "scan SPEC --count --from none.csv",
+        "scan SPEC --out none/x.csv",
+        "scan SPEC --out /"
       })
   void aWrongCallEndsWithTwoAndDoesNothing(String call) {
     doors.documents.add(Specs.read("one", spec, 1, "a"));
@@ -143,6 +160,26 @@ final class RankfallTest {
     Path table = Files.writeString(folder.resolve("p.csv"), "1\nx\n2\n");
     assertEquals(1, run("point", spec, "--from", table.toString(), "--csv"));
     assertEquals("CSV\n1\nerror\n2\n", out.toString());
+  }
+
+  @Test
+  void countsAreAResultAndATableIsNot() {
+    doors.documents.add(Specs.read("one", spec, 1, "a"));
+    assertEquals(0, run("scan", spec, "--count", "--grid", "a=-1:1:3"));
+    assertEquals("Axes[text=a=-1:1:3]\n", out.toString());
+    assertEquals("one: done\n", err.toString());
+    out.getBuffer().setLength(0);
+    assertEquals(0, run("scan", spec, "--out", folder + "/x.csv"));
+    assertEquals("", out.toString());
+  }
+
+  @Test
+  void aScanThatCannotBeWrittenSaysSoAndEndsWithOne() {
+    doors.documents.add(Specs.read("one", spec, 1, "a"));
+    doors.broken = true;
+    assertEquals(1, run("scan", spec, "--out", folder + "/x.csv"));
+    assertTrue(err.toString().contains("no room left"), err.toString());
+    assertTrue(err.toString().contains("--resume goes on"), err.toString());
   }
 
   private int run(String... arguments) {

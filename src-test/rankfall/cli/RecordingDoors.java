@@ -1,6 +1,7 @@
 package rankfall.cli;
 
 import java.io.BufferedReader;
+import java.io.IOException;
 import java.io.Reader;
 import java.nio.file.Path;
 import java.util.ArrayList;
@@ -57,6 +58,18 @@ final class RecordingDoors implements FrontDoors {
   @Override
   public void writeSummary(Path out, List<Outcome> outcomes) {
     written.add("summary of " + outcomes.size());
+  }
+
+  @Override
+  public Scanned scan(Spec spec, ScanOrder order, ScanProgress progress, Messages messages)
+      throws IOException {
+    if (broken) {
+      throw new IOException("no room left");
+    }
+    if (order.points() instanceof ScanOrder.Axes axes && axes.text().equals("misfit")) {
+      throw new IllegalArgumentException("no such parameter");
+    }
+    return new Scanned(order.out().isPresent() ? "" : order.points() + "\n", "done", true);
   }
 
   @Override
