@@ -154,7 +154,9 @@ record ModuleParts(List<Isotypic> parts) {
     }
     List<SortedMap<Integer, E>> weights =
         Elimination.of(ground.domain(), Action.transposed(columns, n), space.size()).kernel();
-    return weights.stream().map(w -> ground.normal(ground.combination(w, space))).toList();
+    List<SortedMap<Integer, E>> combined =
+        weights.stream().map(w -> ground.combination(w, space)).toList();
+    return ground.reduced(combined, n, n).rows();
   }
 
   /** The values of the Casimir element of an ideal on modules up to a dimension. */
