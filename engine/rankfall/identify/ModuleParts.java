@@ -89,7 +89,8 @@ record ModuleParts(List<Isotypic> parts) {
    * Splits a module.
    *
    * @param ground the field
-   * @param algebra the structure of the semisimple algebra, its Killing matrix
+   * @param killing the Killing matrix of the semisimple algebra in a multiple of its basis
+   * @param scale that multiple
    * @param ideals its ideals over the field
    * @param module what its basis elements do
    * @return empty if a type is unknown
