@@ -286,6 +286,29 @@ public record Analysis(
       List<Combination> kernel,
       List<String> remarks,
       Optional<Forms.InvariantForms> invariantForms) {
+    /** The same with the name of the algebra. */
+    public Stratum withType(String name) {
+      return new Stratum(
+          this.name,
+          equations,
+          exclusions,
+          codimension,
+          dimension,
+          rank,
+          derived,
+          centre,
+          radical,
+          nilradical,
+          kind,
+          Optional.of(name),
+          realPoints,
+          witness,
+          basis,
+          kernel,
+          remarks,
+          invariantForms);
+    }
+
     /** The dimension of the kernel of the Killing form. */
     public int kernelDimension() {
       return dimension - rank;

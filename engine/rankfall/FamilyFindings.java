@@ -71,11 +71,10 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     published.accept(without);
     try {
       Strata.Result cut = partition.strata().orElseThrow();
-      RegionFindings.Result regions =
-          new RegionFindings(family, cut, RegionFindings.NONE, meter).all();
+      RegionFindings.Result regions = new RegionFindings(family, cut, meter).all();
       List<Component> signed =
           components.isEmpty() ? components : regions.withSignatures(components, cut);
-      return analysis(signed, strata, Optional.of(regions));
+      return analysis(signed, regions.withTypes(strata), Optional.of(regions));
     } catch (Meter.Exhausted e) {
       return without;
     }

@@ -7,12 +7,16 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
+import java.util.function.Function;
 import java.util.stream.Collectors;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Chain;
 import rankfall.exact.ChainFractions;
 import rankfall.exact.Polynomial;
 import rankfall.exact.Rationals;
+import rankfall.identify.AlgebraNames;
+import rankfall.identify.ExactAlgebra;
+import rankfall.identify.TypeName;
 import rankfall.lie.Family;
 import rankfall.lie.FamilySite;
 import rankfall.lie.PointAnalysis;
@@ -101,11 +105,15 @@ public final class Points {
       return failure(point, OptionalInt.empty(), outside.reason());
     }
     if (site instanceof FamilySite.Rational rational) {
-      return answer(point, Span.of(rational.input()), this::rational);
+      return answer(point, Span.of(rational.input()), this::rational, this::exact);
     }
     FamilySite.Algebraic algebraic = (FamilySite.Algebraic) site;
+    Chain chain = algebraic.chain();
     return answer(
-        point, Span.of(algebraic.input()), closed -> algebraic(algebraic.chain(), closed));
+        point,
+        Span.of(algebraic.input()),
+        closed -> algebraic(chain, closed),
+        closed -> exact(chain, closed));
   }
 
   /**
@@ -125,9 +133,13 @@ public final class Points {
     PointFacts facts(Span.Closed<E> closed);
   }
 
-  private <E> PointResult answer(Map<String, BigFraction> point, Span<E> span, Analyst<E> analyst) {
+  private <E> PointResult answer(
+      Map<String, BigFraction> point,
+      Span<E> span,
+      Analyst<E> analyst,
+      Function<Span.Closed<E>, ExactAlgebra> exact) {
     if (span instanceof Span.Closed<E> closed) {
-      return facts(point, analyst.facts(closed));
+      return facts(point, analyst.facts(closed), AlgebraNames.of(exact.apply(closed)));
     }
     Span.Open<E> open = (Span.Open<E>) span;
     return failure(point, OptionalInt.of(open.names().size()), missing(open));
@@ -152,11 +164,23 @@ public final class Points {
             (a, b) -> text(chain, a, b));
   }
 
+  private ExactAlgebra exact(Span.Closed<BigInteger> closed) {
+    return family.ring().complex()
+        ? ExactAlgebra.complex(closed.constants())
+        : ExactAlgebra.real(closed.constants());
+  }
+
+  private ExactAlgebra exact(Chain chain, Span.Closed<Polynomial> closed) {
+    return family.ring().complex()
+        ? ExactAlgebra.complex(chain, closed.constants())
+        : ExactAlgebra.real(chain, closed.constants(), family.ring().tower()::sign);
+  }
+
   private static String text(Chain chain, Polynomial above, Polynomial below) {
     return ChainFractions.canonical(chain, above, below).toString();
   }
 
-  private PointResult facts(Map<String, BigFraction> point, PointFacts f) {
+  private PointResult facts(Map<String, BigFraction> point, PointFacts f, Optional<TypeName> name) {
     return new PointResult.Facts(
         family(),
         texts(point),
@@ -184,7 +208,7 @@ public final class Points {
         f.reductive(),
         f.compact(),
         strata.of(point),
-        Optional.empty());
+        name.map(n -> new Analysis.AlgebraType(n.name(), n.otherNames(), true)));
   }
 
   private PointResult failure(Map<String, BigFraction> point, OptionalInt dimension, String error) {

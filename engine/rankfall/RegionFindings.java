@@ -3,57 +3,29 @@ package rankfall;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import java.util.function.Function;
+import java.util.stream.Collectors;
 import rankfall.Analysis.AlgebraType;
-import rankfall.Analysis.Comparison;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Killing;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.SignCondition;
+import rankfall.Analysis.Stratum;
 import rankfall.exact.AlgebraicNumber;
-import rankfall.exact.Polynomial;
 import rankfall.lie.Family;
 import rankfall.lie.Signature;
 import rankfall.locus.Cell;
-import rankfall.locus.Cells;
 import rankfall.locus.Meter;
 import rankfall.locus.Regions;
 import rankfall.locus.Strata;
 
-/** The real regions of the strata of a family over a real ground. */
-record RegionFindings(Family family, Strata.Result strata, Names names, Meter meter) {
-
-  /** What names the algebras of the cells. */
-  interface Names {
-    /** Where names may change inside a stratum; its other points keep them on connected pieces. */
-    List<Polynomial> walls(Strata.Stratum stratum);
-
-    /** What tells the algebra of a cell; cells of one label may share a row. */
-    Function<Cell, String> labels(Strata.Stratum stratum);
-
-    /** The name of the algebra of a row, whose cells have one label. */
-    Optional<AlgebraType> type(Strata.Stratum stratum, Regions.Row row);
-  }
-
-  /** Without names. */
-  static final Names NONE =
-      new Names() {
-        @Override
-        public List<Polynomial> walls(Strata.Stratum stratum) {
-          return List.of();
-        }
-
-        @Override
-        public Function<Cell, String> labels(Strata.Stratum stratum) {
-          return c -> "";
-        }
-
-        @Override
-        public Optional<AlgebraType> type(Strata.Stratum stratum, Regions.Row row) {
-          return Optional.empty();
-        }
-      };
+/**
+ * The real regions of the strata of a family over a real ground, with the names of the algebras.
+ *
+ * @param strata of the family
+ * @param meter ends the work early
+ */
+record RegionFindings(Family family, Strata.Result strata, Meter meter) {
 
   /**
    * The regions of all strata.
@@ -69,6 +41,21 @@ record RegionFindings(Family family, Strata.Result strata, Names names, Meter me
       List<Component> out = new ArrayList<>();
       for (int k = 0; k < components.size(); k++) {
         out.add(with(components.get(k), perStratum.get(strata.components().get(k))));
+      }
+      return out;
+    }
+
+    /** The strata with the names of their algebras, those of the regions side by side. */
+    List<Stratum> withTypes(List<Stratum> strata) {
+      List<Stratum> out = new ArrayList<>();
+      for (int k = 0; k < strata.size(); k++) {
+        String types =
+            perStratum.get(k).stream()
+                .flatMap(r -> r.type().stream())
+                .map(AlgebraType::text)
+                .distinct()
+                .collect(Collectors.joining(" | "));
+        out.add(types.isEmpty() ? strata.get(k) : strata.get(k).withType(types));
       }
       return out;
     }
@@ -109,14 +96,16 @@ record RegionFindings(Family family, Strata.Result strata, Names names, Meter me
     List<String> undecided = new ArrayList<>();
     for (Strata.Stratum s : strata.strata()) {
       String name = FamilyFindings.name(perStratum.size());
-      Cells cells = Cells.of(family, s, names.walls(s), meter);
-      Regions r = Regions.of(family, s, cells, names.labels(s), meter);
+      NamedParts parts = NamedParts.of(family, s, meter);
       List<Region> own = new ArrayList<>();
-      for (Regions.Row row : r.rows()) {
-        own.add(region(name, "R" + (own.size() + 1), s, row, r.exact()));
-      }
-      if (!r.complete()) {
-        undecided.add("not decided: by which signs some real regions of " + name + " differ");
+      for (NamedPart part : parts.parts()) {
+        Regions r = part.regions();
+        for (Regions.Row row : r.rows()) {
+          own.add(region(name, "R" + (own.size() + 1), parts.conditions(part, row), part, row, r));
+        }
+        if (!r.complete()) {
+          undecided.add("not decided: by which signs some real regions of " + name + " differ");
+        }
       }
       perStratum.add(own);
     }
@@ -125,20 +114,21 @@ record RegionFindings(Family family, Strata.Result strata, Names names, Meter me
   }
 
   private Region region(
-      String stratum, String name, Strata.Stratum s, Regions.Row row, boolean exact) {
+      String stratum,
+      String name,
+      List<SignCondition> conditions,
+      NamedPart part,
+      Regions.Row row,
+      Regions regions) {
     Signature g = row.signature();
     return new Region(
         stratum,
         name,
-        row.conditions().stream().map(RegionFindings::condition).toList(),
+        conditions,
         new Analysis.Signature(g.plus(), g.minus(), g.zero()),
-        names.type(s, row),
-        exact,
+        part.type(row),
+        regions.exact(),
         coordinates(row.witness()));
-  }
-
-  private static SignCondition condition(Regions.Condition c) {
-    return new SignCondition(c.polynomial(), c.sign() > 0 ? Comparison.GREATER : Comparison.LESS);
   }
 
   private List<Coordinate> coordinates(Cell cell) {

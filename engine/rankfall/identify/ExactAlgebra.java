@@ -13,6 +13,7 @@ import rankfall.exact.Polynomial;
 import rankfall.exact.Variables;
 import rankfall.lie.SignRule;
 import rankfall.lie.StructureConstants;
+import rankfall.locus.PointAlgebra;
 
 /**
  * A Lie algebra over the field of a chain: at an exact point the numbers of the family.
@@ -46,6 +47,16 @@ public record ExactAlgebra(
   /** A complex algebra with rational constants. */
   public static ExactAlgebra complex(StructureConstants<BigInteger> constants) {
     return complex(RATIONAL, lifted(constants));
+  }
+
+  /** The real algebra of a family at a point. */
+  @SuppressWarnings("unchecked") // the domain tells which numbers there are
+  public static ExactAlgebra of(PointAlgebra<?> algebra) {
+    if (algebra.constants().domain() instanceof Chain chain) {
+      PointAlgebra<Polynomial> a = (PointAlgebra<Polynomial>) algebra;
+      return real(chain, a.constants(), a.signs());
+    }
+    return real(((PointAlgebra<BigInteger>) algebra).constants());
   }
 
   private static final Chain RATIONAL = Chain.free(new Variables(List.of()));

@@ -1,10 +1,12 @@
 package rankfall.identify;
 
+import java.util.ArrayList;
 import java.util.List;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
+import rankfall.locus.Leaf;
 import rankfall.locus.Meter;
 import rankfall.locus.Profile;
 import rankfall.locus.Strata;
@@ -56,6 +58,8 @@ public record TypeLoci(List<Locus> loci) {
    * A set inside the stratum.
    *
    * @param chain its general point
+   * @param closure the reduced basis of the prime ideal of its closure
+   * @param leaves pieces that cover it, with their algebras; that of the general point first
    * @param equations what its points satisfy beyond the equations of the stratum; empty for the
    *     general one
    * @param exclusions sets that do not belong to it, beside those excluded from the stratum: the
@@ -70,6 +74,8 @@ public record TypeLoci(List<Locus> loci) {
    */
   public record Locus(
       Chain chain,
+      List<Polynomial> closure,
+      List<Leaf.Defined> leaves,
       List<Polynomial> equations,
       List<List<Polynomial>> exclusions,
       List<Polynomial> walls,
@@ -77,10 +83,42 @@ public record TypeLoci(List<Locus> loci) {
       SortedMap<String, String> parameters) {
     /** Copies the lists. */
     public Locus {
+      closure = List.copyOf(closure);
+      leaves = List.copyOf(leaves);
       equations = List.copyOf(equations);
       exclusions = exclusions.stream().map(List::copyOf).toList();
       walls = List.copyOf(walls);
       parameters = java.util.Collections.unmodifiableSortedMap(new TreeMap<>(parameters));
+    }
+
+    /**
+     * The locus as a stratum of its own.
+     *
+     * @param stratum in which it lies
+     */
+    public Strata.Stratum within(Strata.Stratum stratum) {
+      List<List<Polynomial>> all = new ArrayList<>(stratum.exclusions());
+      all.addAll(exclusions);
+      return new Strata.Stratum(chain, closure, all, stratum.profile(), leaves);
+    }
+
+    /**
+     * This together with a set that was left out, because it has the same name there.
+     *
+     * @param other one of the other loci
+     */
+    public Locus including(Locus other) {
+      List<Leaf.Defined> both = new ArrayList<>(leaves);
+      both.addAll(other.leaves);
+      return new Locus(
+          chain,
+          closure,
+          both,
+          equations,
+          exclusions.stream().filter(e -> !e.equals(other.equations)).toList(),
+          walls,
+          argument,
+          parameters);
     }
 
     /** Whether the name at one point, up to parameters, is that on a connected set. */
@@ -129,7 +167,14 @@ public record TypeLoci(List<Locus> loci) {
       return new TypeLoci(
           List.of(
               new Locus(
-                  stratum.closure(), List.of(), List.of(), List.of(), argument, new TreeMap<>())));
+                  stratum.closure(),
+                  stratum.equations(),
+                  stratum.leaves(),
+                  List.of(),
+                  List.of(),
+                  List.of(),
+                  argument,
+                  new TreeMap<>())));
     }
     return new TypeLociSearch(stratum, constants, meter).loci();
   }

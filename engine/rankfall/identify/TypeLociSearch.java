@@ -20,6 +20,7 @@ import rankfall.locus.BranchAlgebra;
 import rankfall.locus.Closures;
 import rankfall.locus.Cutter;
 import rankfall.locus.KnownNonZero;
+import rankfall.locus.Leaf;
 import rankfall.locus.Meter;
 import rankfall.locus.Piece;
 import rankfall.locus.Splitter;
@@ -36,6 +37,7 @@ final class TypeLociSearch {
   /** Closures of pieces with the same facts, by the text of these. */
   private final Map<String, List<Chain>> levels = new LinkedHashMap<>();
 
+  private final Map<String, List<Leaf.Defined>> leaves = new LinkedHashMap<>();
   private final Map<Chain, Found> found = new LinkedHashMap<>();
 
   TypeLociSearch(Strata.Stratum stratum, Chain constants, Meter meter) {
@@ -84,6 +86,9 @@ final class TypeLociSearch {
       BranchAlgebra algebra = task.algebra().on(chain);
       Found f = facts(task.piece(), algebra);
       levels.computeIfAbsent(f.text(), t -> new ArrayList<>()).add(chain);
+      leaves
+          .computeIfAbsent(f.text(), t -> new ArrayList<>())
+          .add(new Leaf.Defined(task.piece(), stratum.profile(), algebra));
       found.putIfAbsent(chain, f);
       cutter.cut(task.piece(), f.assumed()).cut().forEach(q -> open.add(new Task(q, algebra)));
     }
@@ -134,6 +139,8 @@ final class TypeLociSearch {
     Found f = found.get(z);
     return new TypeLoci.Locus(
         z,
+        closures.ideal(z),
+        closures.leavesInside(splitter, z, leaves.get(level)),
         added(z, stratum.closure()),
         closures.maximal(excluded).stream()
             .map(w -> added(w, z))

@@ -86,4 +86,29 @@ public final class Closures {
     equations.addAll(ideal(b));
     return maximal(splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());
   }
+
+  /**
+   * The leaves in a closure; a leaf that does not lie in it, and meets it, gives what it shares
+   * with it.
+   *
+   * @param splitter of the same family
+   * @param z the closure
+   * @param leaves of one profile
+   * @return those of the general point first
+   */
+  public List<Leaf.Defined> leavesInside(Splitter splitter, Chain z, List<Leaf.Defined> leaves) {
+    List<Leaf.Defined> out = new ArrayList<>();
+    boolean space = new Chart(z).isSpace();
+    for (Leaf.Defined l : leaves) {
+      if (isInside(l.piece().chain(), z)) {
+        out.add(l);
+      } else if (!space) {
+        for (Piece p : splitter.within(l.piece(), ideal(z), List.of())) {
+          out.add(new Leaf.Defined(p, l.profile(), l.algebra().on(p.chain())));
+        }
+      }
+    }
+    out.sort(Comparator.comparingInt(l -> -l.piece().chain().dimension()));
+    return List.copyOf(out);
+  }
 }

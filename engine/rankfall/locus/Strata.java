@@ -145,26 +145,9 @@ public final class Strata {
     return closures.ideal(w).stream().filter(p -> !z.vanishes(p)).toList();
   }
 
-  /**
-   * The leaves in a closure; a leaf that lies in the closure of a stratum of the same profile, and
-   * meets this one, gives what it shares with it.
-   */
   private List<Leaf.Defined> inside(Chain z, Profile profile, List<Leaf.Defined> defined) {
-    List<Leaf.Defined> out = new ArrayList<>();
-    boolean space = new Chart(z).isSpace();
-    for (Leaf.Defined l : defined) {
-      if (l.profile().equals(profile)) {
-        if (closures.isInside(l.piece().chain(), z)) {
-          out.add(l);
-        } else if (!space) {
-          for (Piece p : splitter.within(l.piece(), closures.ideal(z), List.of())) {
-            out.add(new Leaf.Defined(p, profile, l.algebra().on(p.chain())));
-          }
-        }
-      }
-    }
-    out.sort(Comparator.comparingInt(l -> -l.piece().chain().dimension()));
-    return List.copyOf(out);
+    return closures.leavesInside(
+        splitter, z, defined.stream().filter(l -> l.profile().equals(profile)).toList());
   }
 
   private List<Integer> components(List<Stratum> strata) {
