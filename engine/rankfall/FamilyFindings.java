@@ -56,7 +56,8 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
 
   private Analysis withRegions(
       List<Component> components, List<Analysis.Stratum> strata, Consumer<Analysis> published) {
-    Analysis without = analysis(components, strata, Optional.empty());
+    List<Analysis.Contraction> contractions = contractions(components, strata);
+    Analysis without = analysis(components, strata, contractions, Optional.empty());
     if (strata.isEmpty() || family.ring().complex()) {
       return without;
     }
@@ -67,9 +68,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
           new RegionFindings(family, cut, RegionFindings.NONE, meter).all();
       List<Component> signed =
           components.isEmpty() ? components : regions.withSignatures(components, cut);
-      return analysis(signed, strata, Optional.of(regions));
+      return analysis(signed, strata, contractions, Optional.of(regions));
     } catch (Meter.Exhausted e) {
-      return without;
+      return analysis(components, strata, contractions, Optional.empty());
     }
   }
 
@@ -116,12 +117,13 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
   }
 
   private Analysis analysis(List<Component> components) {
-    return analysis(components, List.of(), Optional.empty());
+    return analysis(components, List.of(), List.of(), Optional.empty());
   }
 
   private Analysis analysis(
       List<Component> components,
       List<Analysis.Stratum> strata,
+      List<Analysis.Contraction> contractions,
       Optional<RegionFindings.Result> regions) {
     List<String> undecided = new ArrayList<>(openPieces());
     if (partition.strata().isPresent()) {
@@ -139,7 +141,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
             regions.map(RegionFindings.Result::regions).orElse(List.of()),
-            contractions(components, strata));
+            contractions);
     return new Analysis(
         spec,
         Version.text(),
