@@ -2,6 +2,8 @@ package rankfall;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalInt;
+import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Factorization;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
@@ -69,6 +71,9 @@ public record Analysis(
    * @param regions the real regions of all strata; empty where they were not computed
    * @param contractions of a family of matrices: for each stratum where the span is smaller than at
    *     the general point of a component around it, what the brackets of that point become
+   * @param maps pictures of the parameters, or why there is none; empty without parameters or
+   *     strata
+   * @param scan the default grid, where the spec has one that was counted
    */
   public record Findings(
       List<String> listed,
@@ -79,7 +84,9 @@ public record Analysis(
       List<Stratum> strata,
       List<Covering> coverings,
       List<Region> regions,
-      List<Contraction> contractions) {
+      List<Contraction> contractions,
+      List<RegionMap> maps,
+      Optional<ScanCounts> scan) {
     /** Copies the lists. */
     public Findings {
       listed = List.copyOf(listed);
@@ -91,6 +98,49 @@ public record Analysis(
       coverings = List.copyOf(coverings);
       regions = List.copyOf(regions);
       contractions = List.copyOf(contractions);
+      maps = List.copyOf(maps);
+    }
+
+    /** What was found before a grid is counted. */
+    public Findings(
+        List<String> listed,
+        List<String> variables,
+        List<Relation> relations,
+        List<Polynomial> poles,
+        List<Component> components,
+        List<Stratum> strata,
+        List<Covering> coverings,
+        List<Region> regions,
+        List<Contraction> contractions,
+        List<RegionMap> maps) {
+      this(
+          listed,
+          variables,
+          relations,
+          poles,
+          components,
+          strata,
+          coverings,
+          regions,
+          contractions,
+          maps,
+          Optional.empty());
+    }
+
+    /** The same with a grid that was counted. */
+    public Findings with(ScanCounts counts) {
+      return new Findings(
+          listed,
+          variables,
+          relations,
+          poles,
+          components,
+          strata,
+          coverings,
+          regions,
+          contractions,
+          maps,
+          Optional.of(counts));
     }
   }
 
@@ -115,6 +165,8 @@ public record Analysis(
    * @param dual the non-zero entries of the inverse of the Killing matrix, upper triangle, where it
    *     exists
    * @param conditions where the form degenerates (further)
+   * @param torus the form on the torus of the spec, if it names one
+   * @param casimir the quadratic Casimir element, where the dual exists
    */
   public record Component(
       int number,
@@ -124,7 +176,9 @@ public record Analysis(
       List<StructureEntry> structure,
       Killing killing,
       Optional<List<MatrixEntry>> dual,
-      List<Condition> conditions) {}
+      List<Condition> conditions,
+      Optional<Forms.TorusForm> torus,
+      Optional<Forms.Casimir> casimir) {}
 
   /**
    * A structure constant: the coefficient of {@code target} in {@code [left, right]}; indices from
@@ -211,6 +265,7 @@ public record Analysis(
    * @param basis names of a basis of the algebra at the general point
    * @param kernel a basis of the kernel of the Killing form at the general point
    * @param remarks where a stated fact changes inside the stratum, a sentence each
+   * @param invariantForms its invariant forms; empty where they were not decided
    */
   public record Stratum(
       String name,
@@ -229,7 +284,8 @@ public record Analysis(
       List<Coordinate> witness,
       List<String> basis,
       List<Combination> kernel,
-      List<String> remarks) {
+      List<String> remarks,
+      Optional<Forms.InvariantForms> invariantForms) {
     /** The dimension of the kernel of the Killing form. */
     public int kernelDimension() {
       return dimension - rank;
@@ -387,4 +443,51 @@ public record Analysis(
    */
   public record Unfollowed(List<StructureEntry> structure, String reason)
       implements ContractionOutcome {}
+
+  /**
+   * The default grid of a family, counted.
+   *
+   * @param axes the values of each name; the last one changes fastest
+   * @param counts how many points had which answer; in the order of strata and regions
+   * @param points for each point in order its place in the counts; empty for a grid of more than 20
+   *     000 points
+   */
+  public record ScanCounts(List<ScanAxis> axes, List<ScanCount> counts, List<Integer> points) {
+    /** Copies the lists. */
+    public ScanCounts {
+      axes = List.copyOf(axes);
+      counts = List.copyOf(counts);
+      points = List.copyOf(points);
+    }
+  }
+
+  /** The values of one name in a grid, at least one. */
+  public record ScanAxis(String name, List<BigFraction> values) {
+    /** Copies the list. */
+    public ScanAxis {
+      values = List.copyOf(values);
+    }
+  }
+
+  /**
+   * Points of a grid of which the same is said.
+   *
+   * @param status {@code ok}, {@code outside}, {@code pole}, {@code off} or {@code open}
+   * @param stratum its name; empty where there is no algebra, or strata are not known
+   * @param region its name; empty where the points lie in none
+   * @param dimension of the algebra; empty where there is none
+   * @param rank of its Killing form; empty where there is none
+   * @param signature of its Killing form, where there is one
+   * @param type the algebra, where known; else empty
+   * @param points how many
+   */
+  public record ScanCount(
+      String status,
+      String stratum,
+      String region,
+      OptionalInt dimension,
+      OptionalInt rank,
+      Optional<Signature> signature,
+      String type,
+      long points) {}
 }

@@ -10,9 +10,11 @@ import rankfall.Analysis.Killing;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
 import rankfall.Analysis.StructureEntry;
+import rankfall.Forms.Casimir;
 import rankfall.exact.Factorization.Factor;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
+import rankfall.lie.CasimirElement;
 import rankfall.lie.DualForm;
 import rankfall.lie.Family;
 import rankfall.lie.KillingForm;
@@ -74,9 +76,9 @@ record ComponentFindings(
             c.form().blocks(),
             determinant.map(d -> new Quotient(d.numerator(), d.denominator())),
             Optional.empty());
-    Optional<List<MatrixEntry>> dual =
+    Optional<DualForm> dual =
         determinant.isPresent() && c.basis().size() > 0
-            ? DualForm.of(c.chain(), c.form().matrix()).map(d -> entries(d.matrix()))
+            ? DualForm.of(c.chain(), c.form().matrix())
             : Optional.empty();
     return new Component(
         number,
@@ -85,8 +87,14 @@ record ComponentFindings(
         c.basis(),
         structure(c),
         killing,
-        dual,
-        conditions);
+        dual.map(d -> entries(d.matrix())),
+        conditions,
+        new TorusFindings(spec, family, c).find(),
+        dual.map(d -> casimir(c, d)));
+  }
+
+  private static Casimir casimir(ComponentForm c, DualForm dual) {
+    return new Casimir(entries(CasimirElement.of(c.chain(), c.constants(), dual).coefficients()));
   }
 
   private List<Condition> conditions(
@@ -108,7 +116,9 @@ record ComponentFindings(
         c.structure(),
         new Killing(k.entries(), k.rank(), k.kernel(), k.blocks(), k.determinant(), k.signature()),
         c.dual(),
-        conditions);
+        conditions,
+        c.torus(),
+        c.casimir());
   }
 
   /** Depends on the text of the spec alone. */

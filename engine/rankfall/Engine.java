@@ -6,6 +6,7 @@ import java.util.concurrent.FutureTask;
 import java.util.concurrent.TimeUnit;
 import java.util.concurrent.TimeoutException;
 import java.util.concurrent.atomic.AtomicReference;
+import java.util.function.BiFunction;
 import rankfall.lie.AdjointTraces;
 import rankfall.lie.Family;
 import rankfall.locus.Meter;
@@ -29,7 +30,7 @@ public final class Engine {
   }
 
   /**
-   * Analyses a family.
+   * Analyses a family, and counts its default grid, if it has one.
    *
    * @param spec as read
    * @param budget what it may cost
@@ -37,12 +38,34 @@ public final class Engine {
    * @throws SpecException if the spec describes no family: what is wrong, with places
    */
   public static Analysis analyse(Spec spec, Budget budget) throws SpecException {
+    return analyse(spec, budget, ScanFindings::added);
+  }
+
+  /**
+   * Analyses a family for somebody who asks for points: the default grid is left alone.
+   *
+   * @param spec as read
+   * @param budget what it may cost
+   * @return as {@link #analyse}, without the counts of a grid
+   * @throws SpecException if the spec describes no family: what is wrong, with places
+   */
+  public static Analysis withoutGrid(Spec spec, Budget budget) throws SpecException {
+    return analyse(spec, budget, (analysis, meter) -> analysis);
+  }
+
+  private static Analysis analyse(
+      Spec spec, Budget budget, BiFunction<Analysis, Meter, Analysis> last) throws SpecException {
     Family family = Family.of(spec);
     Meter meter = new Meter(budget.time(), budget.branches());
     AtomicReference<Analysis> latest =
         new AtomicReference<>(FamilyFindings.nothingYet(spec, family));
     FutureTask<Analysis> task =
-        new FutureTask<>(() -> FamilyFindings.of(spec, family, meter, latest::set));
+        new FutureTask<>(
+            () -> {
+              Analysis found = FamilyFindings.of(spec, family, meter, latest::set);
+              latest.set(found);
+              return last.apply(found, meter);
+            });
     Thread thread = new Thread(task, "analysis");
     thread.setDaemon(true);
     thread.start();

@@ -41,10 +41,18 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
           .failed(contradiction.get());
     }
     FamilyFindings start = new FamilyFindings(spec, family, Partition.start(family, meter), meter);
-    List<Component> general = start.components(List.of());
-    published.accept(start.analysis(general));
+    try {
+      return start.completed(published);
+    } catch (TorusFindings.Fault e) {
+      return start.failed(e.getMessage());
+    }
+  }
+
+  private Analysis completed(Consumer<Analysis> published) {
+    List<Component> general = components(List.of());
+    published.accept(analysis(general));
     FamilyFindings done =
-        new FamilyFindings(spec, family, start.partition.completed(family, meter), meter);
+        new FamilyFindings(spec, family, partition.completed(family, meter), meter);
     if (done.partition.strata().isEmpty()) {
       return done.analysis(general);
     }
@@ -129,6 +137,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     if (partition.strata().isPresent()) {
       undecided.addAll(undecided(components, strata, regions));
     }
+    List<Analysis.Region> found = regions.map(RegionFindings.Result::regions).orElse(List.of());
     Findings findings =
         new Findings(
             family.names(),
@@ -140,8 +149,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
             strata.isEmpty()
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
-            regions.map(RegionFindings.Result::regions).orElse(List.of()),
-            contractions);
+            found,
+            contractions,
+            maps(components, strata, found, undecided));
     return new Analysis(
         spec,
         Version.text(),
@@ -166,8 +176,40 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
     } else if (regions.isEmpty() && !family.ring().complex()) {
       out.add(why + "the real regions");
     }
+    withoutForms(strata).ifPresent(out::add);
     regions.ifPresent(r -> out.addAll(r.undecided()));
     return out;
+  }
+
+  private Optional<String> withoutForms(List<Analysis.Stratum> strata) {
+    String names =
+        strata.stream()
+            .filter(s -> s.invariantForms().isEmpty())
+            .map(Analysis.Stratum::name)
+            .collect(Collectors.joining(", "));
+    return names.isEmpty()
+        ? Optional.empty()
+        : Optional.of(
+            "not decided ("
+                + meter.spent().orElse("out of budget")
+                + "): the invariant forms of "
+                + names);
+  }
+
+  private List<RegionMap> maps(
+      List<Component> components,
+      List<Analysis.Stratum> strata,
+      List<Analysis.Region> regions,
+      List<String> undecided) {
+    if (regions.isEmpty() && !family.ring().complex()) {
+      return List.of();
+    }
+    try {
+      return new MapFindings(family, components, strata, regions, meter).all();
+    } catch (Meter.Exhausted e) {
+      undecided.add("not decided (" + e.getMessage() + "): the map of regions");
+      return List.of();
+    }
   }
 
   private List<Analysis.Contraction> contractions(

@@ -41,7 +41,8 @@ public sealed interface PointResult {
    * @param semisimple whether the dimension is positive and the Killing form non-degenerate
    * @param reductive whether the radical is the centre
    * @param compact whether the Killing form is negative definite; false over complex ground
-   * @param name stratum and type, where known
+   * @param stratum the name of its stratum, where the strata are known
+   * @param type what it is called
    */
   record Facts(
       String family,
@@ -62,7 +63,8 @@ public sealed interface PointResult {
       boolean semisimple,
       boolean reductive,
       boolean compact,
-      Optional<StratumNames.Name> name)
+      Optional<String> stratum,
+      Optional<Analysis.AlgebraType> type)
       implements PointResult {
     /** Copies the lists and the map. */
     public Facts {

@@ -183,7 +183,8 @@ public final class Points {
         f.semisimple(),
         f.reductive(),
         f.compact(),
-        strata.of(point));
+        strata.of(point),
+        Optional.empty());
   }
 
   private PointResult failure(Map<String, BigFraction> point, OptionalInt dimension, String error) {

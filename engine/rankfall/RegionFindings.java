@@ -93,7 +93,9 @@ record RegionFindings(Family family, Strata.Result strata, Names names, Meter me
           c.structure(),
           killing,
           c.dual(),
-          c.conditions());
+          c.conditions(),
+          c.torus(),
+          c.casimir());
     }
   }
 

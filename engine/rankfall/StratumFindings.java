@@ -53,7 +53,16 @@ record StratumFindings(Family family, Strata.Result strata, Meter meter) {
         witness.coordinates(),
         s.leaves().get(0).algebra().basis(),
         s.leaves().get(0).algebra().kernel().stream().map(Combination::new).toList(),
-        remarks(p, ideals));
+        remarks(p, ideals),
+        invariantForms(s, real));
+  }
+
+  private Optional<Forms.InvariantForms> invariantForms(Strata.Stratum s, RealZeros.Answer real) {
+    try {
+      return Optional.of(new InvariantFormFindings(family, meter).of(s, real.point()));
+    } catch (Meter.Exhausted e) {
+      return Optional.empty();
+    }
   }
 
   static Analysis.RealPoints verdict(RealZeros.Answer answer) {

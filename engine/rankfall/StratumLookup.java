@@ -39,12 +39,12 @@ public final class StratumLookup implements StratumNames {
   }
 
   @Override
-  public Optional<Name> of(Map<String, BigFraction> point) {
+  public Optional<String> of(Map<String, BigFraction> point) {
     List<Optional<BigFraction>> values = values(point);
     for (Stratum s : strata) {
       if (vanish(s.equations(), values)
           && s.exclusions().stream().noneMatch(e -> vanish(e, values))) {
-        return Optional.of(new Name(s.name(), s.type()));
+        return Optional.of(s.name());
       }
     }
     return Optional.empty();

@@ -14,15 +14,7 @@ public interface StratumNames {
    * The stratum of a point.
    *
    * @param point a point of the family at which its span is an algebra, values by coordinate
-   * @return empty where no strata are known
+   * @return the name of the stratum, such as {@code S1}; empty where no strata are known
    */
-  Optional<Name> of(Map<String, BigFraction> point);
-
-  /**
-   * What a point is called.
-   *
-   * @param stratum the name of its stratum, such as {@code S1}
-   * @param type the name of the algebra, where known
-   */
-  record Name(String stratum, Optional<String> type) {}
+  Optional<String> of(Map<String, BigFraction> point);
 }

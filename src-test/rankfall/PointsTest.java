@@ -104,10 +104,9 @@ final class PointsTest {
   @Test
   void strataAreAskedAtAlgebrasOnly() throws SpecException {
     SpecResult read = SpecReader.read("s.yaml", PointSpecs.OPEN.getBytes(UTF_8)).get(0);
-    StratumNames.Name name = new StratumNames.Name("S2", Optional.of("aff(1)"));
-    Points points = Points.of(((SpecResult.Read) read).spec(), p -> Optional.of(name));
+    Points points = Points.of(((SpecResult.Read) read).spec(), p -> Optional.of("S2"));
     Map<String, BigFraction> at = PointSpecs.point("c=0 d=1");
-    assertEquals(Optional.of(name), ((PointResult.Facts) points.at(at)).name());
+    assertEquals(Optional.of("S2"), ((PointResult.Facts) points.at(at)).stratum());
     assertTrue(points.at(PointSpecs.point("c=1 d=1")) instanceof PointResult.Failure);
   }
 

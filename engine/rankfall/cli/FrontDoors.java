@@ -38,6 +38,32 @@ interface FrontDoors {
   /** Prepares a family to be asked at points. */
   PointAnswers points(Spec spec, PointForm form) throws SpecException;
 
+  /**
+   * Scans a family.
+   *
+   * @param spec of the family
+   * @param order what is asked for
+   * @param progress hears of points
+   * @param messages hears of what is not complete
+   * @return what is said of the scan
+   * @throws SpecException if the spec describes no family
+   * @throws IllegalArgumentException if the points do not fit the family; the message is for the
+   *     user
+   * @throws IOException if a file cannot be read or written; rows written so far are whole
+   * @throws InterruptedException if this thread is interrupted
+   */
+  Scanned scan(Spec spec, ScanOrder order, ScanProgress progress, Messages messages)
+      throws SpecException, IOException, InterruptedException;
+
+  /**
+   * What is said of a scan.
+   *
+   * @param table for standard output; empty where a file was written
+   * @param message a line for the user
+   * @param good false where some point could not be read
+   */
+  record Scanned(String table, String message, boolean good) {}
+
   /** How the answer to a point is written. */
   enum PointForm {
     TEXT,

@@ -9,6 +9,7 @@ import rankfall.Analysis;
 import rankfall.Budget;
 import rankfall.Engine;
 import rankfall.Points;
+import rankfall.ScanFamily;
 import rankfall.StratumLookup;
 import rankfall.report.PointCsv;
 import rankfall.report.PointJson;
@@ -63,8 +64,28 @@ final class Program implements FrontDoors {
 
   @Override
   public PointAnswers points(Spec spec, PointForm form) throws SpecException {
-    Points points = Points.of(spec, StratumLookup.of(spec, Engine.analyse(spec, FOR_NAMES)));
+    Points points = Points.of(spec, StratumLookup.of(spec, Engine.withoutGrid(spec, FOR_NAMES)));
     return new ProgramPoints(points, writer(points, form));
+  }
+
+  @Override
+  public Scanned scan(Spec spec, ScanOrder order, ScanProgress progress, Messages messages)
+      throws SpecException, IOException, InterruptedException {
+    Budget budget = new Budget(order.budget(), Budget.DEFAULT.branches());
+    return new ProgramScan(
+            ScanFamily.of(spec), order, progress, () -> known(spec, budget, messages))
+        .run();
+  }
+
+  /** An analysis of a spec that is known to describe a family. */
+  private static Analysis known(Spec spec, Budget budget, Messages messages) {
+    try {
+      Analysis analysis = Engine.withoutGrid(spec, budget);
+      messages.shortcoming(analysis);
+      return analysis;
+    } catch (SpecException e) {
+      throw new IllegalStateException(e);
+    }
   }
 
   private static PointWriter writer(Points points, PointForm form) {

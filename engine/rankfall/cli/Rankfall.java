@@ -53,6 +53,7 @@ public final class Rankfall implements Runnable {
         .addSubcommand(new Analyse(doors))
         .addSubcommand(new Check(doors))
         .addSubcommand(new Point(doors))
+        .addSubcommand(new Scan(doors))
         .setOut(out)
         .setErr(err)
         .setParameterExceptionHandler((wrong, arguments) -> wrongCall(wrong))

@@ -67,9 +67,21 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
    * @return empty if it is 0
    */
   public Optional<FactoredQuotient> determinant() {
+    return determinant(chain, matrix);
+  }
+
+  /**
+   * The determinant of a symmetric matrix, block by block, as quotient of factored polynomials.
+   *
+   * @param chain the set over which the entries are given
+   * @param matrix exact values whose denominators hold no algebraic function
+   * @return empty if it is 0
+   */
+  static Optional<FactoredQuotient> determinant(Chain chain, List<List<RationalFunction>> matrix) {
     FactoredQuotient product = FactoredQuotient.one();
-    for (List<Integer> block : blocks()) {
-      Optional<FactoredQuotient> d = determinant(block);
+    for (List<Integer> block :
+        ZeroPattern.blocks(matrix.size(), (i, j) -> !matrix.get(i).get(j).isZero())) {
+      Optional<FactoredQuotient> d = ofBlock(chain, ZeroPattern.part(matrix, block));
       if (d.isEmpty()) {
         return d;
       }
@@ -78,19 +90,19 @@ public record KillingForm(Chain chain, List<List<RationalFunction>> matrix) {
     return Optional.of(product);
   }
 
-  private Optional<FactoredQuotient> determinant(List<Integer> block) {
+  private static Optional<FactoredQuotient> ofBlock(
+      Chain chain, List<List<RationalFunction>> block) {
     Polynomial common = chain.one();
-    for (int i : block) {
-      for (int j : block) {
-        Polynomial d = matrix.get(i).get(j).denominator();
+    for (List<RationalFunction> row : block) {
+      for (RationalFunction f : row) {
+        Polynomial d = f.denominator();
         common = common.times(d.over(common.gcd(d)));
       }
     }
     List<List<Polynomial>> cleared = new ArrayList<>();
-    for (int i : block) {
+    for (List<RationalFunction> entries : block) {
       List<Polynomial> row = new ArrayList<>();
-      for (int j : block) {
-        RationalFunction f = matrix.get(i).get(j);
+      for (RationalFunction f : entries) {
         row.add(f.numerator().times(common.over(f.denominator())));
       }
       cleared.add(row);

@@ -38,6 +38,17 @@ public final class RealPoints {
     return ask(polynomials, List.of());
   }
 
+  /**
+   * Whether polynomials have a common real zero within the domain that satisfies conditions.
+   *
+   * @param polynomials all vanish there
+   * @param conditions all hold there
+   */
+  public RealZeros.Answer under(
+      List<Polynomial> polynomials, List<RealZeros.Condition> conditions) {
+    return ask(polynomials, List.of(), conditions);
+  }
+
   /** Whether a stratum has a real point within the domain: one of its leaves has. */
   public RealZeros.Answer on(Strata.Stratum stratum) {
     boolean unknown = false;
@@ -63,9 +74,14 @@ public final class RealPoints {
   }
 
   private RealZeros.Answer ask(List<Polynomial> equations, List<Polynomial> nonZero) {
+    return ask(equations, nonZero, List.of());
+  }
+
+  private RealZeros.Answer ask(
+      List<Polynomial> equations, List<Polynomial> nonZero, List<RealZeros.Condition> further) {
     List<Polynomial> all = new ArrayList<>(equations);
     family.ring().constants().rules().forEach(r -> all.add(r.equation()));
-    List<RealZeros.Condition> conditions = new ArrayList<>();
+    List<RealZeros.Condition> conditions = new ArrayList<>(further);
     nonZero.forEach(p -> conditions.add(new RealZeros.Condition(p, RealZeros.Relation.NON_ZERO)));
     family.poles().stream()
         .filter(p -> !equations.contains(p))

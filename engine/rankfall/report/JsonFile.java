@@ -159,6 +159,11 @@ final class JsonFile {
       out.putNull("dual");
     }
     out.set("conditions", array(c.conditions(), JsonFile::condition));
+    c.torus()
+        .ifPresentOrElse(t -> out.set("torus", JsonForms.torus(t)), () -> out.putNull("torus"));
+    c.casimir()
+        .ifPresentOrElse(
+            x -> out.set("casimir", JsonForms.casimir(x, basis)), () -> out.putNull("casimir"));
   }
 
   private static ObjectNode killing(Killing k, List<String> basis) {
@@ -214,6 +219,10 @@ final class JsonFile {
     out.set("basis", texts(s.basis()));
     out.set("kernel", combinations(s.kernel(), s.basis()));
     out.set("remarks", texts(s.remarks()));
+    s.invariantForms()
+        .ifPresentOrElse(
+            f -> out.set("invariant_forms", JsonForms.invariantForms(f, s.basis())),
+            () -> out.putNull("invariant_forms"));
   }
 
   private static void region(ObjectNode out, Region r) {

@@ -5,9 +5,9 @@ import java.util.Collections;
 import java.util.List;
 import java.util.stream.Collectors;
 import org.apache.commons.csv.CSVFormat;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Signature;
 import rankfall.PointResult;
-import rankfall.StratumNames;
 
 /** One CSV row a point (RFC 4180), a column a parameter, then the facts without the matrix. */
 public final class PointCsv implements PointWriter {
@@ -89,8 +89,8 @@ public final class PointCsv implements PointWriter {
     add(cells, f.invariantForms().maximal() ? f.invariantForms().rank() : "");
     add(cells, f.abelian(), f.nilpotent(), f.solvable());
     add(cells, f.semisimple(), f.reductive(), f.compact());
-    add(cells, f.name().map(StratumNames.Name::stratum).orElse(""));
-    add(cells, f.name().flatMap(StratumNames.Name::type).orElse(""), "");
+    add(cells, f.stratum().orElse(""));
+    add(cells, f.type().map(AlgebraType::name).orElse(""), "");
   }
 
   private static void add(List<String> cells, Object... values) {

@@ -11,9 +11,9 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.UncheckedIOException;
 import java.util.List;
 import java.util.Optional;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Signature;
 import rankfall.PointResult;
-import rankfall.StratumNames;
 
 /** One JSON object a point, on one line. */
 public final class PointJson implements PointWriter {
@@ -90,8 +90,8 @@ public final class PointJson implements PointWriter {
     out.put("semisimple", f.semisimple());
     out.put("reductive", f.reductive());
     out.put("compact", f.compact());
-    text(out, "stratum", f.name().map(StratumNames.Name::stratum));
-    text(out, "type", f.name().flatMap(StratumNames.Name::type));
+    text(out, "stratum", f.stratum());
+    text(out, "type", f.type().map(AlgebraType::name));
   }
 
   private static ObjectNode killing(PointResult.Killing k) {

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.stream.Collectors;
 import rankfall.Analysis.Signature;
 import rankfall.PointResult;
-import rankfall.StratumNames;
 
 /** A short text a point, for a person. */
 public final class PointText implements PointWriter {
@@ -56,8 +55,11 @@ public final class PointText implements PointWriter {
     out.add(line("nilradical", Integer.toString(f.nilradical())));
     out.add(line("invariant forms", forms(f.invariantForms())));
     out.add(line("properties", properties(f)));
-    f.name().ifPresent(n -> out.add(line("stratum", n.stratum())));
-    f.name().flatMap(StratumNames.Name::type).ifPresent(t -> out.add(line("type", t)));
+    f.stratum().ifPresent(s -> out.add(line("stratum", s)));
+    f.type().ifPresent(t -> out.add(line("type", t.name())));
+    f.type()
+        .filter(t -> !t.otherNames().isEmpty())
+        .ifPresent(t -> out.add(line("also called", String.join(", ", t.otherNames()))));
     return out;
   }
 

@@ -24,6 +24,7 @@ public final class ReportWriter {
           "conditions.csv",
           "strata.csv",
           "regions.csv",
+          "scan.csv",
           "appendix.tex",
           "report.html");
 
@@ -86,6 +87,9 @@ public final class ReportWriter {
     if (contents.hasRegions()) {
       out.put("regions.csv", CsvFiles.regions(f));
     }
+    f.scan()
+        .filter(s -> !s.points().isEmpty())
+        .ifPresent(s -> out.put("scan.csv", ScanTables.points(s)));
     return out;
   }
 }

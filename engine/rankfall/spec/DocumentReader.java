@@ -98,7 +98,8 @@ final class DocumentReader {
             commuting,
             covectors,
             scan,
-            new Spec.Source(file.name(), file.lines(), file.sha256(), family.get().place())));
+            new Spec.Source(
+                file.name(), file.lines(), file.sha256(), family.get().place(), torus.places())));
   }
 
   private Optional<ScalarText> family() {

@@ -190,8 +190,15 @@ public record Spec(
    * @param lines all lines of the file, for messages
    * @param sha256 hexadecimal SHA-256 of the bytes of the whole file
    * @param familyPlace where the value of {@code family} stands
+   * @param torusPlaces where the elements of {@code torus} stand, in order
    */
-  public record Source(String file, List<String> lines, String sha256, Place familyPlace) {
+  public record Source(
+      String file, List<String> lines, String sha256, Place familyPlace, List<Place> torusPlaces) {
+    /** Copies the list. */
+    public Source {
+      torusPlaces = List.copyOf(torusPlaces);
+    }
+
     /**
      * A fault at a place of this file.
      *

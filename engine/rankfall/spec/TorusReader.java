@@ -14,6 +14,7 @@ final class TorusReader {
   private final boolean open;
   private final Faults faults;
   private final List<String> generators;
+  private final List<Place> places = new ArrayList<>();
 
   /** Prepares the reading; the generators are declared already. */
   TorusReader(Fields fields, Names names, boolean open, Faults faults) {
@@ -38,6 +39,11 @@ final class TorusReader {
     return List.copyOf(torus);
   }
 
+  /** Where the elements stand that {@link #torus} read. */
+  List<Place> places() {
+    return List.copyOf(places);
+  }
+
   private String member(YamlNode item, List<String> before) {
     ScalarText text = Scalars.text(item, "the name of a generator");
     String name = text.value();
@@ -47,6 +53,7 @@ final class TorusReader {
     if (before.contains(name)) {
       throw SpecFault.of(text.place(), "'" + name + "' stands twice in 'torus'", "remove one");
     }
+    places.add(text.place());
     return name;
   }
 

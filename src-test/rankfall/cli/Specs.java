@@ -31,7 +31,8 @@ final class Specs {
             List.of(),
             Map.of(),
             Map.of(),
-            new Spec.Source(file, lines, "", new Place(file, line, 9, family.length()))));
+            new Spec.Source(
+                file, lines, "", new Place(file, line, 9, family.length()), List.of())));
   }
 
   /** A document with one fault. */

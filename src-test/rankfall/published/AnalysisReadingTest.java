@@ -65,7 +65,9 @@ class AnalysisReadingTest {
                   Optional.of(2),
                   List.of("e", "f", "h"),
                   List.of(),
-                  RealPoints.YES)));
+                  RealPoints.YES)),
+          Optional.empty(),
+          Optional.empty());
 
   @Test
   void aComponentIsReadAsTheTablesWriteIt() {

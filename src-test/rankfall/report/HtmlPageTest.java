@@ -63,8 +63,9 @@ class HtmlPageTest {
   @MethodSource("samples")
   void pageNeedsNothingFromElsewhere(Analysis a) {
     String page = HtmlPage.of(a);
+    String elsewhere = page.replace("url(#", "");
     for (String reference : List.of("<script", "<link", "src=", "url(", "@import", "<img")) {
-      assertFalse(page.contains(reference), reference);
+      assertFalse(elsewhere.contains(reference), reference);
     }
     assertFalse(page.contains("\r"));
   }

@@ -111,7 +111,9 @@ final class LargeAnalyses {
                     Optional.of(3),
                     basis,
                     List.of(unit(v, n, 0), unit(v, n, 4), unit(v, n, 5)),
-                    RealPoints.NO)));
+                    RealPoints.NO)),
+            Optional.empty(),
+            Optional.empty());
     return new Analysis(
         spec(
             "large",
@@ -165,7 +167,8 @@ final class LargeAnalyses {
               s.witness(),
               s.basis(),
               s.kernel(),
-              List.of()));
+              List.of(),
+              Optional.empty()));
       if (k > 0) {
         int up = layer == 1 ? 0 : k - perLayer;
         coverings.add(new Covering("S" + (k + 1), "S" + (up + 1)));

@@ -79,7 +79,8 @@ final class PointFormsTest {
             f.semisimple(),
             f.reductive(),
             f.compact(),
-            f.name());
+            f.stratum(),
+            f.type());
     assertContains("{\"dimension\": 5, \"maximalRank\": null}", new PointJson().text(open));
     assertContains(",5,,false,", new PointCsv(List.of("a", "b")).text(open));
     assertContains("5, the greatest rank at least 2\n", new PointText().text(open));

@@ -62,7 +62,7 @@ final class SampleAnalyses {
         List.of(),
         Map.of(),
         Map.of(),
-        new Spec.Source("sample.yaml", List.of("family: " + family), SHA, place));
+        new Spec.Source("sample.yaml", List.of("family: " + family), SHA, place, List.of()));
   }
 
   static RationalFunction whole(Polynomial p) {
@@ -127,7 +127,9 @@ final class SampleAnalyses {
                     Optional.of(2),
                     basis,
                     List.of(unit(v, 3, 1), unit(v, 3, 2)),
-                    RealPoints.YES)));
+                    RealPoints.YES)),
+            Optional.empty(),
+            Optional.empty());
     return new Analysis(
         spec("scaled-sl2", title, notes, List.of("alpha", "b_1"), basis),
         "0.1.0",
@@ -228,7 +230,9 @@ final class SampleAnalyses {
                     Optional.of(2),
                     basis,
                     List.of(unit(v, 3, 0), unit(v, 3, 1)),
-                    RealPoints.UNKNOWN)));
+                    RealPoints.UNKNOWN)),
+            Optional.empty(),
+            Optional.empty());
     List<Coordinate> origin = point("0", "0", "0");
     List<Stratum> strata =
         List.of(
@@ -391,6 +395,7 @@ final class SampleAnalyses {
         witness,
         List.of("X", "Y", "Z"),
         kernel,
-        List.of());
+        List.of(),
+        Optional.empty());
   }
 }

@@ -132,7 +132,7 @@ final class Specs {
         List.of(),
         Map.of(),
         Map.of(),
-        new Spec.Source("demo.yaml", lines, "", new Place("demo.yaml", 1, 1, 1)));
+        new Spec.Source("demo.yaml", lines, "", new Place("demo.yaml", 1, 1, 1), List.of()));
   }
 
   private Place place() {
