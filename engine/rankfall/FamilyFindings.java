@@ -64,7 +64,8 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
 
   private Analysis withRegions(
       List<Component> components, List<Analysis.Stratum> strata, Consumer<Analysis> published) {
-    Analysis without = analysis(components, strata, Optional.empty());
+    List<Analysis.Contraction> contractions = contractions(components, strata);
+    Analysis without = analysis(components, strata, contractions, Optional.empty());
     if (strata.isEmpty() || family.ring().complex()) {
       return without;
     }
@@ -74,9 +75,9 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
       RegionFindings.Result regions = new RegionFindings(family, cut, meter).all();
       List<Component> signed =
           components.isEmpty() ? components : regions.withSignatures(components, cut);
-      return analysis(signed, regions.withTypes(strata), Optional.of(regions));
+      return analysis(signed, regions.withTypes(strata), contractions, Optional.of(regions));
     } catch (Meter.Exhausted e) {
-      return without;
+      return analysis(components, strata, contractions, Optional.empty());
     }
   }
 
@@ -123,12 +124,13 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
   }
 
   private Analysis analysis(List<Component> components) {
-    return analysis(components, List.of(), Optional.empty());
+    return analysis(components, List.of(), List.of(), Optional.empty());
   }
 
   private Analysis analysis(
       List<Component> components,
       List<Analysis.Stratum> strata,
+      List<Analysis.Contraction> contractions,
       Optional<RegionFindings.Result> regions) {
     List<String> undecided = new ArrayList<>(openPieces());
     if (partition.strata().isPresent()) {
@@ -147,7 +149,7 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
                 ? List.of()
                 : partition.strata().map(FamilyFindings::coverings).orElse(List.of()),
             found,
-            contractions(components, strata),
+            contractions,
             maps(components, strata, found, undecided));
     return new Analysis(
         spec,

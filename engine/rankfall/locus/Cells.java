@@ -102,7 +102,9 @@ public record Cells(
       List<Cell> cells = new ArrayList<>();
       found.points().forEach(p -> cells.add(cell(p)));
       invariant.addAll(others);
-      for (Piece p : new HiddenPieces(family, stratum, meter).all()) {
+      HiddenPieces hidden = new HiddenPieces(family, stratum, meter);
+      exact &= hidden.isFeasible();
+      for (Piece p : hidden.isFeasible() ? hidden.all() : List.<Piece>of()) {
         CellSearch.Found f = search.in(p.chain(), invariant);
         exact &= f.exact();
         f.points().forEach(x -> cells.add(cell(x)));

@@ -28,12 +28,29 @@ import rankfall.lie.Family;
  */
 record HiddenPieces(Family family, Strata.Stratum stratum, Meter meter) {
 
+  private static final int MOST_DIMENSIONS = 3;
+
   /**
    * A piece to look at.
    *
    * @param borders whether it lies where conditions of the domain are equalities
    */
   private record Task(Piece piece, boolean borders) {}
+
+  /**
+   * Whether the search is not too long: curved surfaces of many dimensions and high degree are not
+   * searched.
+   */
+  boolean isFeasible() {
+    Chain chain = stratum.closure();
+    List<Chain.Rule> numbers = ChainFactoring.numbers(chain);
+    int degree =
+        chain.tower().stream()
+            .filter(r -> !numbers.contains(r))
+            .mapToInt(Chain.Rule::degree)
+            .reduce(1, (a, b) -> a * b);
+    return chain.dimension() <= MOST_DIMENSIONS || degree <= 2;
+  }
 
   /** Pieces that cover those points; together with others, perhaps. */
   List<Piece> all() {

@@ -20,6 +20,12 @@ final class ShortCover {
   private static final int MOST_SETS = 6000;
   private static final int MOST_NODES = 20_000;
   private static final int MOST_ROWS = 6;
+
+  /** Two conditions on one polynomial each are shorter than one on a product. */
+  private static final int SINGLE = 40;
+
+  private static final int PRODUCT = 100;
+
   private final List<List<Integer>> vectors;
   private final List<Integer> costs;
   private final List<Atom> atoms = new ArrayList<>();
@@ -74,7 +80,8 @@ final class ShortCover {
   }
 
   private int cost(Atom a) {
-    return 40 * a.places.size() + a.places.stream().mapToInt(costs::get).sum();
+    int base = a.places.size() == 1 ? SINGLE : PRODUCT;
+    return base + a.places.stream().mapToInt(costs::get).sum();
   }
 
   private BitSet extent(Atom a) {
