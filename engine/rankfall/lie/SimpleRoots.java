@@ -142,6 +142,19 @@ public record SimpleRoots(
                   numbered(byType)));
     }
 
+    /** Lower ones first, then those that hold more of the first simple roots. */
+    private static int byHeight(List<Integer> a, List<Integer> b) {
+      int c = Integer.compare(height(a), height(b));
+      for (int k = 0; c == 0 && k < a.size(); k++) {
+        c = Integer.compare(b.get(k), a.get(k));
+      }
+      return c;
+    }
+
+    private static int height(List<Integer> sum) {
+      return sum.stream().mapToInt(Integer::intValue).sum();
+    }
+
     private static List<CartanMatrix.Part> numbered(List<CartanMatrix.Part> parts) {
       List<CartanMatrix.Part> out = new ArrayList<>();
       int at = 0;
@@ -209,10 +222,7 @@ public record SimpleRoots(
         }
         level = next;
       }
-      out.sort(
-          Comparator.comparing((List<Integer> c) -> c.stream().mapToInt(Integer::intValue).sum())
-              .thenComparing(
-                  c -> c.stream().map(x -> 1000 - x).map(Object::toString).toList().toString()));
+      out.sort(Search::byHeight);
       return out.size() == positive.size() ? Optional.of(out) : Optional.empty();
     }
   }

@@ -13,6 +13,7 @@ import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Relation;
 import rankfall.exact.Polynomial;
+import rankfall.spec.Spec;
 
 /**
  * A fragment for {@code \input} inside an article with {@code amsmath}, {@code booktabs} and {@code
@@ -105,6 +106,11 @@ final class LatexAppendix {
       LatexStrata strata = new LatexStrata(formulas);
       section("Strata");
       out.append(strata.profiles(f.strata())).append(strata.points(f.strata()));
+      if (f.strata().stream().anyMatch(s -> s.invariantForms().isPresent())) {
+        section("Invariant forms");
+        paragraph("\\noindent " + text(FormWords.INVARIANT));
+        out.append(forms().invariants(f.strata()));
+      }
       if (!f.contractions().isEmpty()) {
         section("Contracted algebras");
         paragraph("\\noindent " + text(Words.CONTRACTIONS));
@@ -172,6 +178,25 @@ final class LatexAppendix {
     brackets(c);
     killing(c);
     conditions(c);
+    LatexForms forms = forms();
+    c.torus()
+        .ifPresent(
+            t -> {
+              section("Torus and dual form");
+              out.append(forms.torus(t));
+            });
+    c.casimir()
+        .ifPresent(
+            x -> {
+              section("Casimir element");
+              paragraph("\\noindent " + text(FormWords.CASIMIR));
+              out.append(forms.casimir(x, c.basis()));
+            });
+  }
+
+  private LatexForms forms() {
+    return new LatexForms(
+        new FormFormulas(formulas), analysis.spec().convention() == Spec.Convention.HERMITIAN);
   }
 
   private void brackets(Component c) {
@@ -257,10 +282,17 @@ final class LatexAppendix {
     out.append(table.text());
   }
 
+  private static String type(AlgebraType t) {
+    return TypeText.latex(t.text())
+        + (t.otherNames().isEmpty()
+            ? ""
+            : " (" + TypeText.latex(String.join(", ", t.otherNames())) + ")");
+  }
+
   private void regions(List<Region> regions) {
     section("Real regions");
     LatexTable table =
-        new LatexTable("Real regions of the strata", List.of(0.17, 0.34, 0.17, 0.18, 0.14));
+        new LatexTable("Real regions of the strata", List.of(0.13, 0.37, 0.14, 0.24, 0.12));
     table.head("Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
     for (Region r : regions) {
       table.row(
@@ -275,7 +307,7 @@ final class LatexAppendix {
                   .map(n -> Integer.toString(n))
                   .collect(Collectors.joining(","))
               + ")$",
-          text(r.type().map(AlgebraType::text).orElse("")),
+          r.type().map(LatexAppendix::type).orElse(""),
           CsvFiles.proof(r.exact()));
     }
     out.append(table.text());
