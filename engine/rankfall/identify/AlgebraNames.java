@@ -30,7 +30,7 @@ public final class AlgebraNames {
     if (small.isPresent()) {
       return small;
     }
-    TypeName structure = LeviNames.of(g, AlgebraNames::small);
+    TypeName structure = LeviNames.of(g, AlgebraNames::summand);
     Optional<TypeName> motion = Kinematical.of(g);
     if (motion.isPresent()) {
       List<String> structures = new ArrayList<>(List.of(structure.name()));
@@ -52,6 +52,23 @@ public final class AlgebraNames {
       return complex(g);
     }
     return Optional.of(g.dimension() == 4 ? FourDimensional.of(g) : Bianchi.of(g));
+  }
+
+  /** The name of a summand: without class numbers, and a name with parameters in parentheses. */
+  private static Optional<TypeName> summand(ExactAlgebra g) {
+    return small(g)
+        .map(
+            t ->
+                new TypeName(
+                    closed(t.name()),
+                    t.otherNames().stream()
+                        .filter(n -> !n.matches("A_.*|.*\\(1\\+1\\)"))
+                        .map(AlgebraNames::closed)
+                        .toList()));
+  }
+
+  private static String closed(String name) {
+    return name.contains(", ") || name.contains(" + ") ? "(" + name + ")" : name;
   }
 
   /** The classes that need neither order nor parameters. */

@@ -89,7 +89,7 @@ record LargeFacts<E>(String text, TypeLoci.Argument argument, List<E> walls, Lis
       if (nilpotent && square.dimension() < 2) {
         return f.solvable() ? TypeLoci.Argument.CLASSIFICATION : TypeLoci.Argument.MODULE;
       }
-      boolean small = rest < 5 && !nilpotent;
+      boolean small = rest > 2 && rest < 5 && !nilpotent;
       return small ? TypeLoci.Argument.NONE : TypeLoci.Argument.DIMENSIONS;
     }
 

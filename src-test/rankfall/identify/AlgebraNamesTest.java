@@ -82,6 +82,28 @@ class AlgebraNamesTest {
     assertTrue(all.contains(due), () -> all.toString());
   }
 
+  /** Sums with solvable algebras of small dimension; common practice, no source. */
+  @ParameterizedTest
+  @CsvSource(
+      delimiter = '|',
+      value = {
+        "so(3) + Bianchi V | [e4,e5] = e4; [e6,e5] = e6",
+        "so(3) + (Bianchi VI_h, h = -9) | [e4,e5] = e4; [e6,e5] = 2*e6",
+        "so(3) + aff(1,R) + R | [e4,e5] = e4",
+        "so(3) + h3 | [e4,e5] = e6",
+      })
+  void sumsWithSmallOnes(String due, String brackets) {
+    String yaml =
+        "family: test\ngenerators: [e1, e2, e3, e4, e5, e6]\nbrackets: |\n"
+            + "  [e1,e2] = e3\n  [e2,e3] = e1\n  [e3,e1] = e2\n  "
+            + brackets.replace("; ", "\n  ")
+            + "\n";
+    ExactAlgebra g = PointAlgebra.of(yaml, Map.of());
+    TypeName name = AlgebraNames.of(g).orElseThrow();
+    assertEquals(due, name.name());
+    assertEquals(name, AlgebraNames.of(Turned.of(g, new Random(4), 8)).orElseThrow());
+  }
+
   /** Over complex ground only what needs no order; common practice, no source. */
   @ParameterizedTest
   @CsvSource(
