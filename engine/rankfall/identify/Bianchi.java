@@ -48,7 +48,7 @@ public final class Bianchi {
     }
     return switch (g.shape()) {
       case ABELIAN -> new TypeName("R^3", List.of("Bianchi I", "3A_1"));
-      case HEISENBERG -> new TypeName("h3", List.of("Bianchi II", "A_{3,1}"));
+      case HEISENBERG -> new TypeName("h3", List.of("Bianchi II", "Galilei (1+1)", "A_{3,1}"));
       case AFFINE ->
           new TypeName("Bianchi III", List.of("aff(1,R) + R", "Bianchi VI_h, h = -1", "A_2 + A_1"));
       default -> core(g, field);
@@ -67,7 +67,9 @@ public final class Bianchi {
       case PLANE_SCALAR -> new TypeName("Bianchi V", List.of("A_{3,3}"));
       case PLANE_TRACELESS ->
           field.signs().signum(g.data().get(1)) < 0
-              ? new TypeName("Bianchi VI_0", List.of("iso(1,1)", "so(1,1) |x R^2", "A_{3,4}"))
+              ? new TypeName(
+                  "Bianchi VI_0",
+                  List.of("iso(1,1)", "so(1,1) |x R^2", "Poincare (1+1)", "A_{3,4}"))
               : new TypeName("Bianchi VII_0", List.of("iso(2)", "so(2) |x R^2", "A_{3,6}"));
       case PLANE -> plane(new PlaneMatrix(field, g.data().get(0), g.data().get(1)));
       default -> throw new IllegalArgumentException("not of dimension 3: " + g.shape());

@@ -242,7 +242,7 @@ record CubicRoots(RealField field, List<Polynomial> coefficients) {
 
   /** The ring with two more variables, which come last. */
   private Variables twoMore() {
-    return field.extended(2);
+    return RealField.extended(field.chain(), 2);
   }
 
   private Polynomial[] inTwoMore(List<Polynomial> p) {

@@ -80,7 +80,7 @@ record RealField(Chain chain, SignRule<Polynomial> signs) {
    *     number is rational
    */
   AlgebraicNumber root(List<Polynomial> coefficients, Cut cut) {
-    Variables ring = extended(1);
+    Variables ring = extended(chain, 1);
     int y = ring.count() - 1;
     List<Polynomial> reduced = chain.reduced(coefficients);
     Polynomial p = Polynomial.zero(ring);
@@ -92,7 +92,7 @@ record RealField(Chain chain, SignRule<Polynomial> signs) {
   }
 
   /** The variables of the chain and a few more, which come last. */
-  Variables extended(int more) {
+  static Variables extended(Chain chain, int more) {
     List<String> names = new ArrayList<>(chain.variables().names());
     for (int k = 0; k < more; k++) {
       String name = "y";

@@ -9,6 +9,7 @@ import rankfall.lie.AlgebraFacts;
 import rankfall.lie.CharacteristicPolynomial;
 import rankfall.lie.Ideals;
 import rankfall.lie.LieBracket;
+import rankfall.lie.Nilradical;
 import rankfall.lie.Subspace;
 
 /**
@@ -100,12 +101,42 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
     return new Finder<>(bracket).find();
   }
 
+  /** The numbers whose signs decide the class, beside the signature of the Killing form. */
+  List<E> walls(Arithmetic<E> ring) {
+    return switch (shape) {
+      case PLANE, SYMPLECTIC -> List.of(discriminant(ring, data.get(0), data.get(1)));
+      case PLANE_TRACELESS, SYMPLECTIC_TRACELESS -> List.of(data.get(1));
+      case PAIR -> data;
+      case SPACE -> List.of(discriminant(ring, data));
+      default -> List.of();
+    };
+  }
+
+  /** The discriminant of x^2 - t x + d. */
+  private static <E> E discriminant(Arithmetic<E> ring, E t, E d) {
+    return ring.minus(ring.square(t), ring.times(4, d));
+  }
+
+  /** The discriminant of x^3 - c1 x^2 + c2 x - c3. */
+  private static <E> E discriminant(Arithmetic<E> ring, List<E> c) {
+    E c1 = c.get(0);
+    E c2 = c.get(1);
+    E c3 = c.get(2);
+    E c12 = ring.product(List.of(c1, c2));
+    return ring.sum(
+        List.of(
+            ring.square(c12),
+            ring.times(-4, ring.product(List.of(c2, c2, c2))),
+            ring.times(-4, ring.product(List.of(c1, c1, c1, c3))),
+            ring.times(18, ring.product(List.of(c12, c3))),
+            ring.times(-27, ring.square(c3))));
+  }
+
   private static final class Finder<E> {
     private final LieBracket<E> bracket;
     private final Domain<E> domain;
     private final Arithmetic<E> ring;
     private final int n;
-    private final AlgebraFacts<E> facts;
     private final List<E> assumed = new ArrayList<>();
 
     Finder(LieBracket<E> bracket) {
@@ -113,15 +144,11 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
       this.domain = bracket.domain();
       this.ring = new Arithmetic<>(domain);
       this.n = bracket.dimension();
-      this.facts = AlgebraFacts.of(bracket);
-      assume(facts.derived());
-      assume(facts.centre());
-      assume(facts.radical());
-      assume(facts.nilradical());
     }
 
-    private void assume(Subspace<E> s) {
+    private Subspace<E> assume(Subspace<E> s) {
       assumed.addAll(s.nonVanishing());
+      return s;
     }
 
     private void assumeNonZero(E e) {
@@ -136,25 +163,33 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
     }
 
     SmallAlgebra<E> find() {
-      if (facts.radical().dimension() < n) {
-        return is(Shape.SIMPLE, CharacteristicPolynomial.of(domain, facts.killing()));
-      }
-      int derived = facts.derived().dimension();
-      if (derived == 0) {
+      Subspace<E> d = assume(Ideals.derived(bracket));
+      if (d.dimension() == 0) {
         return is(Shape.ABELIAN, List.of());
       }
-      if (derived == 1) {
-        boolean nilpotent = facts.nilradical().dimension() == n;
-        return is(nilpotent ? Shape.HEISENBERG : Shape.AFFINE, List.of());
+      if (d.dimension() == 1) {
+        Subspace<E> whole = Subspace.whole(domain, n);
+        boolean central = assume(Ideals.bracket(bracket, whole, d)).dimension() == 0;
+        return is(central ? Shape.HEISENBERG : Shape.AFFINE, List.of());
       }
       if (n == 3) {
-        return onPlane(action(facts.derived()), false);
+        return d.dimension() == 3 ? simple() : onPlane(action(d), false);
       }
-      return switch (facts.nilradical().dimension()) {
+      Subspace<E> square = assume(Ideals.bracket(bracket, d, d));
+      if (d.dimension() == 3) {
+        return square.dimension() == 3 ? simple() : onNilradical(d, d);
+      }
+      Subspace<E> nilradical = assume(Nilradical.of(bracket, Subspace.whole(domain, n)));
+      return switch (nilradical.dimension()) {
         case 4 -> is(Shape.FILIFORM, List.of());
-        case 2 -> is(Shape.PAIR, List.of(pairing()));
-        default -> onNilradical();
+        case 2 -> is(Shape.PAIR, List.of(pairing(nilradical)));
+        default -> onNilradical(d, nilradical);
       };
+    }
+
+    private SmallAlgebra<E> simple() {
+      return is(
+          Shape.SIMPLE, CharacteristicPolynomial.of(domain, AlgebraFacts.of(bracket).killing()));
     }
 
     private IdealAction<E> action(Subspace<E> ideal) {
@@ -181,34 +216,31 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
     private SmallAlgebra<E> onPlane(IdealAction<E> a, boolean withKernel) {
       E t = a.symmetric().get(0);
       E d = a.symmetric().get(1);
-      if (isZero(discriminant(t, d))) {
+      if (isZero(discriminant(ring, t, d))) {
         boolean block = minimalDegree(a) == (withKernel ? 3 : 2);
         return is(block ? Shape.PLANE_BLOCK : Shape.PLANE_SCALAR, List.of());
       }
       return is(isZero(t) ? Shape.PLANE_TRACELESS : Shape.PLANE, List.of(t, d));
     }
 
-    private E discriminant(E t, E d) {
-      return ring.minus(ring.square(t), ring.times(4, d));
-    }
-
-    private SmallAlgebra<E> onNilradical() {
-      Subspace<E> nilradical = facts.nilradical();
-      Subspace<E> square = Ideals.bracket(bracket, nilradical, nilradical);
-      assume(square);
+    /**
+     * Solvable, not nilpotent; a derived algebra of dimension 3 is nilpotent, so the nilradical.
+     */
+    private SmallAlgebra<E> onNilradical(Subspace<E> derived, Subspace<E> nilradical) {
+      Subspace<E> square = assume(Ideals.bracket(bracket, nilradical, nilradical));
       IdealAction<E> a = action(nilradical);
       if (square.dimension() > 0) {
         return onHeisenberg(a);
       }
       List<E> c = a.symmetric();
-      if (facts.derived().dimension() == 2) {
+      if (derived.dimension() == 2) {
         return isZero(c.get(1)) ? is(Shape.SPACE_SINGULAR, List.of()) : onPlane(a, true);
       }
       return onSpace(a, c);
     }
 
     private SmallAlgebra<E> onSpace(IdealAction<E> a, List<E> c) {
-      if (!isZero(discriminant(c))) {
+      if (!isZero(discriminant(ring, c))) {
         return is(Shape.SPACE, c);
       }
       int degree = minimalDegree(a);
@@ -225,26 +257,11 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
       return is(degree == 2 ? Shape.SPACE_DOUBLE : Shape.SPACE_DOUBLE_BLOCK, c);
     }
 
-    /** The discriminant of x^3 - c1 x^2 + c2 x - c3. */
-    private E discriminant(List<E> c) {
-      E c1 = c.get(0);
-      E c2 = c.get(1);
-      E c3 = c.get(2);
-      E c12 = domain.times(c1, c2);
-      return ring.sum(
-          List.of(
-              ring.square(c12),
-              ring.times(-4, domain.times(ring.square(c2), c2)),
-              ring.times(-4, ring.product(List.of(c1, c1, c1, c3))),
-              ring.times(18, domain.times(c12, c3)),
-              ring.times(-27, ring.square(c3))));
-    }
-
     /** Eigenvalues m, n, m + n; the data are those of twice the matrix modulo the centre. */
     private SmallAlgebra<E> onHeisenberg(IdealAction<E> a) {
       E t = a.symmetric().get(0);
       E d = ring.minus(ring.times(4, a.symmetric().get(1)), ring.square(t));
-      if (isZero(discriminant(t, d))) {
+      if (isZero(discriminant(ring, t, d))) {
         boolean block = minimalDegree(a) == 3;
         return is(block ? Shape.SYMPLECTIC_BLOCK : Shape.SYMPLECTIC_SCALAR, List.of());
       }
@@ -254,12 +271,11 @@ record SmallAlgebra<E>(Shape shape, int dimension, List<E> data, List<E> assumed
     /**
      * The determinant of the Killing form on a complement of the nilradical, which is its kernel.
      */
-    private E pairing() {
-      Subspace<E> nilradical = facts.nilradical();
+    private E pairing(Subspace<E> nilradical) {
       List<Integer> pivots = Elimination.of(domain, nilradical.basis(), n).pivots();
       List<Integer> rest = new ArrayList<>(List.of(0, 1, 2, 3));
       rest.removeAll(pivots);
-      List<List<E>> k = facts.killing();
+      List<List<E>> k = AlgebraFacts.of(bracket).killing();
       int p = rest.get(0);
       int q = rest.get(1);
       return ring.minus(

@@ -16,21 +16,26 @@ import rankfall.exact.Polynomial;
  * initial of Z does, W lies in the closure of Z. Only where an initial vanishes the ideal of Z is
  * needed. Ideals are remembered; one object serves one family on one thread.
  */
-final class Closures {
+public final class Closures {
   private final GroebnerBasis bases;
   private final Map<Chain, List<Polynomial>> ideals = new HashMap<>();
 
-  Closures(Chain constants) {
+  /**
+   * For the chains of one ring.
+   *
+   * @param constants the chain of the algebraic numbers
+   */
+  public Closures(Chain constants) {
     this.bases = new GroebnerBasis(constants);
   }
 
   /** The reduced basis of the prime ideal of the closure. */
-  List<Polynomial> ideal(Chain chain) {
+  public List<Polynomial> ideal(Chain chain) {
     return ideals.computeIfAbsent(chain, bases::of);
   }
 
   /** Whether the closure of w lies in the closure of z. */
-  boolean isInside(Chain w, Chain z) {
+  public boolean isInside(Chain w, Chain z) {
     if (w.dimension() > z.dimension()) {
       return false;
     }
@@ -46,7 +51,7 @@ final class Closures {
    * @param chains any
    * @return in no particular order
    */
-  List<Chain> maximal(List<Chain> chains) {
+  public List<Chain> maximal(List<Chain> chains) {
     List<Chain> byDimension = new ArrayList<>(chains);
     byDimension.sort(
         Comparator.comparingInt((Chain c) -> -c.dimension())
@@ -69,14 +74,14 @@ final class Closures {
    * @param b a closure
    * @return true only if it does; false tells nothing
    */
-  boolean hold(Chain third, Chain a, Chain b) {
+  public boolean hold(Chain third, Chain a, Chain b) {
     List<Polynomial> first = ideal(a);
     List<Polynomial> second = ideal(b);
     return ideal(third).stream().allMatch(p -> first.contains(p) || second.contains(p));
   }
 
   /** The components of what two closures share. */
-  List<Chain> intersection(Splitter splitter, Chain a, Chain b) {
+  public List<Chain> intersection(Splitter splitter, Chain a, Chain b) {
     List<Polynomial> equations = new ArrayList<>(ideal(a));
     equations.addAll(ideal(b));
     return maximal(splitter.zeros(equations, List.of()).stream().map(Piece::chain).toList());

@@ -9,10 +9,16 @@ import rankfall.exact.Chain;
 import rankfall.exact.Polynomial;
 
 /** Cuts the zeros of polynomials off a piece. */
-final class Cutter {
+public final class Cutter {
   private final Splitter splitter;
 
-  Cutter(Chain constants, Meter meter) {
+  /**
+   * For the pieces of one family.
+   *
+   * @param constants the chain of the algebraic numbers
+   * @param meter ends the work early
+   */
+  public Cutter(Chain constants, Meter meter) {
     this.splitter = new Splitter(constants, meter);
   }
 
@@ -22,10 +28,16 @@ final class Cutter {
    * @param rest where none of the polynomials vanishes
    * @param cut disjoint pieces that cover the other points
    */
-  record Parts(Piece rest, List<Piece> cut) {}
+  public record Parts(Piece rest, List<Piece> cut) {}
 
-  /** Cuts off the zeros of polynomials, one irreducible factor after the other. */
-  Parts cut(Piece piece, List<Polynomial> watched) {
+  /**
+   * Cuts off the zeros of polynomials, one irreducible factor after the other.
+   *
+   * @param piece irreducible
+   * @param watched in any number; those that vanish all over the piece are left aside
+   * @return the rest and the pieces that were cut off
+   */
+  public Parts cut(Piece piece, List<Polynomial> watched) {
     SortedMap<String, Polynomial> factors = new TreeMap<>();
     for (Polynomial w : watched) {
       Polynomial r = piece.chain().reduced(w);

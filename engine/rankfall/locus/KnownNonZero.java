@@ -13,13 +13,14 @@ import rankfall.exact.Polynomial;
  * @param chain the chain of the piece
  * @param nonZero reduced on the chain, irreducible
  */
-record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Domain<Polynomial> {
-  KnownNonZero {
+public record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Domain<Polynomial> {
+  /** Copies the list. */
+  public KnownNonZero {
     nonZero = List.copyOf(nonZero);
   }
 
   /** The ring on a piece. */
-  static KnownNonZero on(Piece piece) {
+  public static KnownNonZero on(Piece piece) {
     List<Polynomial> known = new ArrayList<>();
     for (Polynomial p : piece.nonZero()) {
       Polynomial r = piece.chain().reduced(p);

@@ -28,7 +28,11 @@ final class PointAlgebra {
 
   /** With fractions as texts by parameter. */
   static ExactAlgebra of(String yaml, Map<String, String> at) {
-    Family family = family(yaml);
+    return of(family(yaml), at);
+  }
+
+  /** With fractions as texts by parameter. */
+  static ExactAlgebra of(Family family, Map<String, String> at) {
     SortedMap<String, BigFraction> values = new TreeMap<>();
     at.forEach((name, value) -> values.put(name, BigFraction.parse(value)));
     FamilySite site = family.at(values);
