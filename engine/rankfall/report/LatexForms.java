@@ -26,7 +26,7 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
   private static final int WIDEST_MATRIX = 44;
 
   /** Widest line of values, in letters. */
-  private static final int WIDEST_LINE = 40;
+  private static final int WIDEST_LINE = 56;
 
   /** Most terms of a Casimir element that are set. */
   private static final int MOST_TERMS = 60;
@@ -51,14 +51,17 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
       dual.add(FormFormulas.dual(k));
     }
     StringBuilder out = new StringBuilder();
-    out.append(paragraph(text(FormWords.span(t)) + " " + list(elements) + "."));
+    out.append(paragraph(text(FormWords.span(t, hermitian)) + " " + list(elements) + ":"));
     out.append(matrix("K", elements, t.form()));
     t.positive().ifPresent(p -> out.append(paragraph(positive(t, p))));
     if (!t.orthonormal().isEmpty()) {
       out.append(
           paragraph(
               "An orthonormal basis, in these elements: "
-                  + list(t.orthonormal().stream().map(v -> formulas.unit(v, t.elements())).toList())
+                  + list(
+                      t.orthonormal().stream()
+                          .map(v -> formulas.unit(v, FormFormulas.names(t, hermitian)))
+                          .toList())
                   + "."));
     }
     out.append(angles("Angles between the elements", elements, t.angles()));
@@ -129,7 +132,7 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
       table.row(
           Latex.inline(formulas.formulas().text(c.name())),
           Latex.inline(formulas.values(c.components())),
-          Latex.inline(formulas.sharp(c, t.elements())),
+          Latex.inline(formulas.sharp(c, FormFormulas.names(t, hermitian))),
           Latex.inline(formulas.formulas().of(c.squaredLength())));
     }
     return table.text();
@@ -169,7 +172,7 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
   /** The invariant forms of all strata. */
   String invariants(List<Stratum> strata) {
     LatexTable table =
-        new LatexTable("Invariant forms of the strata", List.of(0.09, 0.16, 0.17, 0.58));
+        new LatexTable("Invariant forms of the strata", List.of(0.08, 0.17, 0.17, 0.58));
     table.head("", "Dimension", "Non-de\\-gen\\-er\\-ate one", "General member");
     for (Stratum s : strata) {
       Optional<InvariantForms> forms = s.invariantForms();
