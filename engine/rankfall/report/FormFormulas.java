@@ -22,6 +22,13 @@ record FormFormulas(Formulas formulas) {
     return t.elements().stream().map(e -> element(t, e, listedAreHermitian)).toList();
   }
 
+  /** Names for combinations of these elements. */
+  static List<String> names(TorusForm t, boolean listedAreHermitian) {
+    return t.imaginary() && !listedAreHermitian
+        ? t.elements().stream().map(e -> "i*" + e).toList()
+        : t.elements();
+  }
+
   private Formula element(TorusForm t, String name, boolean listedAreHermitian) {
     Formula x = formulas.text(name);
     if (t.imaginary() == listedAreHermitian) {

@@ -25,12 +25,21 @@ final class FormWords {
 
   private FormWords() {}
 
-  /** On which span the form is, a clause before the list of elements. */
-  static String span(TorusForm t) {
-    return t.imaginary()
-        ? "The form is negative definite on these elements of the algebra for some real parameters;"
-            + " it is given on the real span of i times them:"
-        : "The form on the real span of";
+  /**
+   * On which span the form is, a clause before the list of elements.
+   *
+   * @param hermitian whether the listed elements are i times those of the algebra
+   */
+  static String span(TorusForm t, boolean hermitian) {
+    if (!t.imaginary()) {
+      return "The form on the real span of";
+    }
+    return hermitian
+        ? "The elements of the algebra are \u2212i times the listed ones, and for some real parameters"
+            + " the form is negative definite on them; on the real span of the listed ones it has"
+            + " the opposite sign, and is given there:"
+        : "For some real parameters the form is negative definite on the torus; it is given on the"
+            + " real span of i times its elements:";
   }
 
   /** Where the form is positive definite, before the conditions. */

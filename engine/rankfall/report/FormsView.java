@@ -123,18 +123,20 @@ record FormsView(
 
     TorusView torus(String heading, TorusForm t) {
       int n = t.elements().size();
-      List<Formula> elements = formulas.elements(t, spec.convention() == Spec.Convention.HERMITIAN);
+      boolean hermitian = spec.convention() == Spec.Convention.HERMITIAN;
+      List<Formula> elements = formulas.elements(t, hermitian);
+      List<String> names = FormFormulas.names(t, hermitian);
       List<Formula> dual = dual(t);
       return new TorusView(
           heading,
-          FormWords.span(t),
+          FormWords.span(t, hermitian),
           math(Formulas.sequence(elements)),
           matrix(n, t.form()),
           FormWords.positive(t),
           t.positive()
               .map(p -> p.conditions().stream().map(this::condition).toList())
               .orElse(List.of()),
-          t.orthonormal().stream().map(v -> math(formulas.unit(v, t.elements()))).toList(),
+          t.orthonormal().stream().map(v -> math(formulas.unit(v, names))).toList(),
           lengths(elements, t.form()),
           angles(elements, t.angles()),
           t.dual().map(d -> matrix(n, d)).stream().toList(),
@@ -146,7 +148,7 @@ record FormsView(
                       new CovectorView(
                           math(formulas.formulas().text(c.name())),
                           math(formulas.values(c.components())),
-                          List.of(math(formulas.sharp(c, t.elements()))),
+                          List.of(math(formulas.sharp(c, names))),
                           math(formulas.formulas().of(c.squaredLength()))))
               .toList(),
           roots(t));

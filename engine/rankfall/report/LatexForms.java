@@ -25,6 +25,9 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
   /** Widest matrix that is set as one, in letters over all columns. */
   private static final int WIDEST_MATRIX = 44;
 
+  /** Widest line of values, in letters. */
+  private static final int WIDEST_LINE = 56;
+
   /** Most terms of a Casimir element that are set. */
   private static final int MOST_TERMS = 60;
 
@@ -48,14 +51,17 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
       dual.add(FormFormulas.dual(k));
     }
     StringBuilder out = new StringBuilder();
-    out.append(paragraph(text(FormWords.span(t)) + " " + list(elements) + "."));
+    out.append(paragraph(text(FormWords.span(t, hermitian)) + " " + list(elements) + ":"));
     out.append(matrix("K", elements, t.form()));
     t.positive().ifPresent(p -> out.append(paragraph(positive(t, p))));
     if (!t.orthonormal().isEmpty()) {
       out.append(
           paragraph(
               "An orthonormal basis, in these elements: "
-                  + list(t.orthonormal().stream().map(v -> formulas.unit(v, t.elements())).toList())
+                  + list(
+                      t.orthonormal().stream()
+                          .map(v -> formulas.unit(v, FormFormulas.names(t, hermitian)))
+                          .toList())
                   + "."));
     }
     out.append(angles("Angles between the elements", elements, t.angles()));
@@ -126,7 +132,7 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
       table.row(
           Latex.inline(formulas.formulas().text(c.name())),
           Latex.inline(formulas.values(c.components())),
-          Latex.inline(formulas.sharp(c, t.elements())),
+          Latex.inline(formulas.sharp(c, FormFormulas.names(t, hermitian))),
           Latex.inline(formulas.formulas().of(c.squaredLength())));
     }
     return table.text();
@@ -166,8 +172,8 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
   /** The invariant forms of all strata. */
   String invariants(List<Stratum> strata) {
     LatexTable table =
-        new LatexTable("Invariant forms of the strata", List.of(0.1, 0.14, 0.16, 0.6));
-    table.head("Stratum", "Dimension", "Non-de\\-generate one", "General member");
+        new LatexTable("Invariant forms of the strata", List.of(0.08, 0.17, 0.17, 0.58));
+    table.head("", "Dimension", "Non-de\\-gen\\-er\\-ate one", "General member");
     for (Stratum s : strata) {
       Optional<InvariantForms> forms = s.invariantForms();
       if (forms.isPresent()) {
@@ -199,7 +205,7 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
         .ifPresent(
             m -> {
               out.add(text(FormWords.inverse(m, f)));
-              formulas.inverse(m.entries(), s.basis()).forEach(x -> out.add(Latex.inline(x)));
+              out.addAll(grouped(formulas.inverse(m.entries(), s.basis())));
             });
     for (FormDeviation d : f.deviations()) {
       out.add(
@@ -213,6 +219,26 @@ record LatexForms(FormFormulas formulas, boolean hermitian) {
     }
     if (!FormWords.unsettled(f).isEmpty()) {
       out.add(text(FormWords.unsettled(f)));
+    }
+    return out;
+  }
+
+  /** Some values a line, so that the cell can go on over the page between lines. */
+  private static List<String> grouped(List<Formula> values) {
+    List<String> out = new ArrayList<>();
+    List<Formula> line = new ArrayList<>();
+    int width = 0;
+    for (Formula f : values) {
+      if (!line.isEmpty() && width + f.width() > WIDEST_LINE) {
+        out.add(list(line));
+        line.clear();
+        width = 0;
+      }
+      line.add(f);
+      width += f.width() + 2;
+    }
+    if (!line.isEmpty()) {
+      out.add(list(line));
     }
     return out;
   }

@@ -1,13 +1,16 @@
 package rankfall.published;
 
 import java.util.List;
+import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.stream.Collectors;
+import java.util.stream.IntStream;
 import rankfall.Analysis;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
+import rankfall.Forms.TorusForm;
 import rankfall.exact.Polynomial;
 import rankfall.published.PublishedEntry.Cell;
 import rankfall.published.PublishedEntry.Condition;
@@ -31,10 +34,25 @@ final class AnalysisReading {
     Analysis.Findings findings = analysis.findings().orElseThrow();
     Component component = findings.components().get(0);
     List<Integer> torus = analysis.spec().torus().stream().map(component.basis()::indexOf).toList();
-    return of(component, torus)
+    return withTorus(of(component, torus), component)
         .with(
             findings.strata().stream().map(AnalysisReading::stratum).toList(),
             findings.components().stream().map(c -> equations(c.equations())).toList());
+  }
+
+  /** Form and dual form as the analysis states them for the real span of the torus. */
+  private static ObservedFamily withTorus(ObservedFamily plain, Component component) {
+    Optional<TorusForm> torus = component.torus().filter(t -> !t.imaginary());
+    if (torus.isEmpty()) {
+      return plain;
+    }
+    List<Integer> all = IntStream.range(0, torus.get().elements().size()).boxed().toList();
+    return new ObservedFamily(
+        plain.killing(),
+        plain.determinant(),
+        plain.conditions(),
+        cells(torus.get().form(), all),
+        torus.get().dual().map(d -> cells(d, all)));
   }
 
   /**
