@@ -35,7 +35,13 @@ record MapFindings(
     List<Stratum> strata,
     List<Region> regions,
     Meter meter) {
+  /** As many as six parameters have planes. */
   private static final int MOST_MAPS = 15;
+
+  /** Where there are more parameters; their planes take longer, and all are never drawn. */
+  private static final int MOST_OF_MANY = 6;
+
+  private static final int MANY_PARAMETERS = 7;
 
   List<RegionMap> all() {
     Variables ring = family.ring().variables();
@@ -61,12 +67,16 @@ record MapFindings(
       out.add(
           new Missing(
               "Not drawn, being more than "
-                  + MOST_MAPS
+                  + mostMaps()
                   + " or too large: the planes "
                   + String.join("; ", leftOut)
                   + "."));
     }
     return out;
+  }
+
+  private int mostMaps() {
+    return family.ring().variables().indeterminates() < MANY_PARAMETERS ? MOST_MAPS : MOST_OF_MANY;
   }
 
   private Optional<String> obstacle() {
@@ -107,7 +117,7 @@ record MapFindings(
                     family.ring().constants(), c.equations(), point.get(), free, n - dimension);
         if (slice.isPresent()) {
           Optional<RegionMap> map =
-              out.size() < MOST_MAPS ? map(c, point.get(), slice.get()) : Optional.empty();
+              out.size() < mostMaps() ? map(c, point.get(), slice.get()) : Optional.empty();
           if (map.isPresent()) {
             out.add(map.get());
           } else {
