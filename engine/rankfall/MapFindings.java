@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Coordinate;
@@ -34,7 +35,13 @@ record MapFindings(
     List<Stratum> strata,
     List<Region> regions,
     Meter meter) {
+  /** As many as six parameters have planes. */
   private static final int MOST_MAPS = 15;
+
+  /** Where there are more parameters; their planes take longer, and all are never drawn. */
+  private static final int MOST_OF_MANY = 6;
+
+  private static final int MANY_PARAMETERS = 7;
 
   List<RegionMap> all() {
     Variables ring = family.ring().variables();
@@ -57,9 +64,19 @@ record MapFindings(
                   + " are free and the others keep their values or follow from linear equations."));
     }
     if (!leftOut.isEmpty()) {
-      out.add(new Missing("Not drawn: " + String.join("; ", leftOut) + "."));
+      out.add(
+          new Missing(
+              "Not drawn, being more than "
+                  + mostMaps()
+                  + " or too large: the planes "
+                  + String.join("; ", leftOut)
+                  + "."));
     }
     return out;
+  }
+
+  private int mostMaps() {
+    return family.ring().variables().indeterminates() < MANY_PARAMETERS ? MOST_MAPS : MOST_OF_MANY;
   }
 
   private Optional<String> obstacle() {
@@ -100,11 +117,11 @@ record MapFindings(
                     family.ring().constants(), c.equations(), point.get(), free, n - dimension);
         if (slice.isPresent()) {
           Optional<RegionMap> map =
-              out.size() < MOST_MAPS ? map(c, point.get(), slice.get()) : Optional.empty();
+              out.size() < mostMaps() ? map(c, point.get(), slice.get()) : Optional.empty();
           if (map.isPresent()) {
             out.add(map.get());
           } else {
-            leftOut.add(names(free));
+            leftOut.add(names(free, c));
           }
           if (dimension == 1) {
             return;
@@ -114,11 +131,10 @@ record MapFindings(
     }
   }
 
-  private String names(List<Integer> free) {
-    return "the plane of "
-        + family.ring().variables().names().get(free.get(0))
-        + " and "
-        + family.ring().variables().names().get(free.get(1));
+  private String names(List<Integer> free, Component c) {
+    List<String> names = family.ring().variables().names();
+    String axes = free.stream().map(names::get).collect(Collectors.joining(", "));
+    return "(" + axes + ")" + (components.size() > 1 ? " of component " + c.number() : "");
   }
 
   /** The rational point of the general stratum of a component. */
