@@ -199,10 +199,8 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
       List<Analysis.Stratum> strata,
       List<Analysis.Region> regions,
       List<String> undecided) {
-    if (!undecided.isEmpty()) {
-      return strata.isEmpty()
-          ? List.of()
-          : List.of(new RegionMap.Missing("The analysis did not finish, so nothing is drawn."));
+    if (regions.isEmpty() && !family.ring().complex()) {
+      return List.of();
     }
     try {
       return new MapFindings(family, components, strata, regions, meter).all();

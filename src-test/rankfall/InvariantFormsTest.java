@@ -80,8 +80,7 @@ class InvariantFormsTest {
     assertEquals(2, f.dimension());
     assertEquals(Existence.YES, f.nonDegenerate());
     assertEquals(
-        List.of(
-            List.of("0 0 1", "1 1 -1", "2 2 -1"), List.of("0 3 1", "1 4 -1", "2 5 -1")),
+        List.of(List.of("0 0 1", "1 1 -1", "2 2 -1"), List.of("0 3 1", "1 4 -1", "2 5 -1")),
         f.basis().stream().map(InvariantFormsTest::cells).toList());
     assertEquals("-c2^6", f.determinant().orElseThrow().numerator().toString());
   }
@@ -150,27 +149,25 @@ class InvariantFormsTest {
   }
 
   /**
-   * A semisimple algebra has as many forms as complex simple ideals: one for sl(3), two for
-   * so(4) and for the Lorentz algebra (common practice, no source); an abelian one has all.
+   * A semisimple algebra has as many forms as complex simple ideals: one for sl(3), two for so(4)
+   * and for the Lorentz algebra (common practice, no source); an abelian one has all.
    */
   @Test
   void semisimpleAndAbelianAlgebras() throws IOException, SpecException {
-    Findings f =
-        FormSpecs.findings(Files.readString(Path.of("specs", "lorentz-to-euclid.yaml")));
+    Findings f = FormSpecs.findings(Files.readString(Path.of("specs", "lorentz-to-euclid.yaml")));
     assertEquals(2, FormSpecs.forms(f, 0).dimension());
     assertEquals(Extent.SEMISIMPLE, FormSpecs.forms(f, 0).extent());
     assertEquals(1, FormSpecs.forms(FormSpecs.findings(FormSpecs.sl(3)), 0).dimension());
     InvariantForms plane =
-        FormSpecs.forms(
-            FormSpecs.findings("family: r2\nbrackets: |\n  [x, y] = 0*x\n"), 0);
+        FormSpecs.forms(FormSpecs.findings("family: r2\nbrackets: |\n  [x, y] = 0*x\n"), 0);
     assertEquals(3, plane.dimension());
     assertEquals(Extent.ABELIAN, plane.extent());
     assertEquals(Existence.YES, plane.nonDegenerate());
   }
 
   /**
-   * h, e, f of sl(2): the Casimir element of the Killing form is (h^2 + 2 e f + 2 f e)/8 (Humphreys,
-   * sec. 6.2, with the trace form 4 times the one of the plane; from memory).
+   * h, e, f of sl(2): the Casimir element of the Killing form is (h^2 + 2 e f + 2 f e)/8
+   * (Humphreys, sec. 6.2, with the trace form 4 times the one of the plane; from memory).
    */
   @Test
   void casimirElementOfOrderTwo() throws SpecException {

@@ -187,8 +187,7 @@ class TorusFormTest {
   void elementThatIsNotInTheBasisOfTheComponentIsUnderstood() throws SpecException {
     String spec = FormSpecs.sl(3).replace("torus: [H1, H2]", "torus: [H1, H3]");
     TorusForm t =
-        FormSpecs.torus(
-            spec.replace("torus:", "  H3: \"E(1,1) + E(2,2) - 2*E(3,3)\"\ntorus:"));
+        FormSpecs.torus(spec.replace("torus:", "  H3: \"E(1,1) + E(2,2) - 2*E(3,3)\"\ntorus:"));
     // K = 6 tr: tr(H1 H3) = 0, tr(H3^2) = 6
     assertEquals(List.of("0 0 12", "1 1 36"), cells(t.form()));
     assertEquals("A2", ((Roots) t.roots()).type());
@@ -227,8 +226,7 @@ class TorusFormTest {
   /** The complex span has no positive form; roots are told all the same. */
   @Test
   void complexGround() throws SpecException {
-    TorusForm t =
-        FormSpecs.torus(FormSpecs.sl(3).replace("order: 3", "ground: complex\norder: 3"));
+    TorusForm t = FormSpecs.torus(FormSpecs.sl(3).replace("order: 3", "ground: complex\norder: 3"));
     assertTrue(t.positive().isEmpty() && t.orthonormal().isEmpty());
     assertEquals("A2", ((Roots) t.roots()).type());
   }

@@ -150,68 +150,7 @@ public final class TowerPoint {
               + " holds a variable without a real value: "
               + r.equation());
     }
-    Polynomial norm = r.equation().primitive();
-    List<Rule> tower = chain.tower();
-    for (int k = tower.size() - 1; k >= 0; k--) {
-      Rule below = tower.get(k);
-      if (below.variable() != r.variable() && norm.contains(below.variable())) {
-        norm = norm.resultant(below.equation(), below.variable());
-        norm = withoutContent(norm, r.variable());
-      }
-    }
-    List<AlgebraicNumber> candidates = AlgebraicNumber.rootsOf(norm);
-    RealRoots isolated = RealRoots.of(norm);
-    List<AlgebraicNumber> out = new ArrayList<>();
-    for (int k = 0; k < candidates.size(); k++) {
-      AlgebraicNumber a = candidates.get(k);
-      boolean root =
-          a.isRational()
-              ? sign(specialised(r, a.rational().orElseThrow())) == 0
-              : changesSign(r, between(norm, isolated, k));
-      if (root) {
-        out.add(a);
-      }
-    }
-    return out;
-  }
-
-  /** An interval that isolates an irrational root; its ends are no roots. */
-  private static Interval between(Polynomial norm, RealRoots isolated, int k) {
-    Univariate f = Univariate.of(norm);
-    BigFraction width = BigFraction.ONE;
-    while (true) {
-      Interval i = isolated.refined(k, width);
-      if (f.signAt(i.lower()) != 0 && f.signAt(i.upper()) != 0) {
-        return i;
-      }
-      width = width.divide(STEP);
-    }
-  }
-
-  private boolean changesSign(Rule r, Interval i) {
-    return sign(specialised(r, i.lower())) * sign(specialised(r, i.upper())) < 0;
-  }
-
-  /** Free of factors in which the variable does not occur; they vanish at no point of the tower. */
-  private static Polynomial withoutContent(Polynomial p, int variable) {
-    Polynomial g = Polynomial.zero(p.variables());
-    for (Polynomial c : p.coefficientsIn(variable)) {
-      g = g.gcd(c);
-    }
-    return p.over(g);
-  }
-
-  /** The equation times a positive integer, with a number put in place of the variable. */
-  private static Polynomial specialised(Rule r, BigFraction value) {
-    Variables v = r.equation().variables();
-    List<Polynomial> c = r.equation().coefficientsIn(r.variable());
-    Polynomial sum = Polynomial.zero(v);
-    BigInteger n = Rationals.numerator(value);
-    BigInteger d = Rationals.denominator(value);
-    for (int k = 0; k < c.size(); k++) {
-      sum = sum.plus(c.get(k).times(n.pow(k).multiply(d.pow(c.size() - 1 - k))));
-    }
-    return sum;
+    return new TowerRoots(this, r).all();
   }
 
   /** {@return the values of the tower variables, by position} */

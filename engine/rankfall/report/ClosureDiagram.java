@@ -187,7 +187,7 @@ final class ClosureDiagram {
 
   private static String box(Node n, Stratum s, double origin) {
     double x = origin + n.x;
-    String type = s.type().orElse(s.kind());
+    String type = s.type().map(TypeText::signs).orElse(s.kind());
     return String.format(
         Locale.ROOT,
         "<a href=\"#stratum-%s\"><title>%s</title><rect class=\"%s\" x=\"%.1f\" y=\"%.1f\""

@@ -282,10 +282,17 @@ final class LatexAppendix {
     out.append(table.text());
   }
 
+  private static String type(AlgebraType t) {
+    return TypeText.latex(t.text())
+        + (t.otherNames().isEmpty()
+            ? ""
+            : " (" + TypeText.latex(String.join(", ", t.otherNames())) + ")");
+  }
+
   private void regions(List<Region> regions) {
     section("Real regions");
     LatexTable table =
-        new LatexTable("Real regions of the strata", List.of(0.17, 0.34, 0.17, 0.18, 0.14));
+        new LatexTable("Real regions of the strata", List.of(0.13, 0.37, 0.14, 0.24, 0.12));
     table.head("Region", "Conditions", "$(+,-,0)$", "Type", "Proof");
     for (Region r : regions) {
       table.row(
@@ -300,7 +307,7 @@ final class LatexAppendix {
                   .map(n -> Integer.toString(n))
                   .collect(Collectors.joining(","))
               + ")$",
-          text(r.type().map(AlgebraType::text).orElse("")),
+          r.type().map(LatexAppendix::type).orElse(""),
           CsvFiles.proof(r.exact()));
     }
     out.append(table.text());

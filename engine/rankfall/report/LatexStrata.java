@@ -33,7 +33,7 @@ record LatexStrata(Formulas formulas) {
           Integer.toString(s.centre()),
           Integer.toString(s.radical()),
           Integer.toString(s.nilradical()),
-          LatexText.escape(s.type().map(t -> t + ", " + s.kind()).orElse(s.kind())),
+          s.type().map(t -> TypeText.latex(t) + ", ").orElse("") + LatexText.escape(s.kind()),
           Words.realPoints(s.realPoints()));
     }
     return "\\n"

@@ -24,6 +24,7 @@ final class MapKey {
   private final Findings findings;
   private final List<Place> filled;
   private final List<Place> drawn;
+  private final List<Place> onLines;
 
   /** The key to the pictures of these findings. */
   MapKey(Findings findings) {
@@ -36,6 +37,7 @@ final class MapKey {
             findings.maps().stream()
                 .flatMap(m -> Stream.concat(lines(m), marks(m)))
                 .filter(p -> p.kind() == Kind.STRATUM));
+    this.onLines = findings.maps().stream().flatMap(MapKey::lines).distinct().toList();
   }
 
   private List<Place> sorted(Stream<Place> places) {
@@ -108,10 +110,19 @@ final class MapKey {
   /** The short name that stands in a picture. */
   String name(Place p) {
     return switch (p.kind()) {
-      case STRATUM -> p.stratum().orElseThrow() + p.region().map(r -> " " + r).orElse("");
+      case STRATUM ->
+          p.stratum().orElseThrow()
+              + p.region().filter(r -> isOneOfMany(p)).map(r -> " " + r).orElse("");
       case OUTSIDE -> "outside";
       case NOWHERE -> "no stratum";
     };
+  }
+
+  private boolean isOneOfMany(Place p) {
+    return findings.regions().stream()
+            .filter(r -> p.stratum().equals(Optional.of(r.stratum())))
+            .count()
+        > 1;
   }
 
   /** The row of a table that tells of a place; empty where there is none. */
@@ -119,6 +130,23 @@ final class MapKey {
     return p.stratum()
         .map(s -> p.region().map(r -> "region-" + s + "-" + r).orElse("stratum-" + s))
         .orElse("");
+  }
+
+  /**
+   * How the place of a region is drawn: {@code area}, {@code curve} or {@code point}; may be none.
+   */
+  List<String> sorts(Place p) {
+    List<String> out = new ArrayList<>();
+    if (filled.contains(p)) {
+      out.add("area");
+    }
+    if (onLines.contains(p)) {
+      out.add("curve");
+    }
+    if (drawn.contains(p) && !onLines.contains(p)) {
+      out.add("point");
+    }
+    return out;
   }
 
   Optional<Region> region(Place p) {

@@ -69,9 +69,16 @@ final class MapParts {
     return new MapView.PlaneView(
         id,
         math(Formulas.sequence(names)),
+        findings.components().size() > 1 ? "component " + slice.component() : "",
         held.stream().map(MapParts::math).toList(),
         new SafeString(picture),
         legend(map));
+  }
+
+  /** How a region is drawn in the pictures; empty where it is in none. */
+  List<SafeString> chips(Region r) {
+    Place p = Place.in(r.stratum(), Optional.of(r.name()));
+    return key.sorts(p).stream().map(s -> new SafeString(MapPicture.chip(key, p, s))).toList();
   }
 
   private static SafeString math(Formula f) {
@@ -93,7 +100,7 @@ final class MapParts {
     List<SafeString> where = where(map, p, sort).stream().map(MapParts::math).toList();
     boolean border = sort.equals("curve") && key.line(p).equals("line-border");
     return new MapView.EntryView(
-        List.of(new SafeString(MapPicture.chip(key, p, Optional.of(sort)))),
+        List.of(new SafeString(MapPicture.chip(key, p, sort))),
         border ? "boundary in " + key.name(p) : key.name(p),
         key.target(p),
         where,

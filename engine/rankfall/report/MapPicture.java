@@ -6,7 +6,6 @@ import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Locale;
 import java.util.Map;
-import java.util.Optional;
 import java.util.Set;
 import rankfall.RegionMap;
 import rankfall.RegionMap.Arc;
@@ -326,9 +325,9 @@ final class MapPicture {
   }
 
   /** A small picture of an area, a curve or a point, for lists. */
-  static String chip(MapKey key, Place place, Optional<String> sort) {
+  static String chip(MapKey key, Place place, String sort) {
     String shape =
-        switch (sort.orElse("area")) {
+        switch (sort) {
           case "curve" -> "<path class=\"line " + key.line(place) + "\" d=\"M1 8H27\"></path>";
           case "point" ->
               "<circle class=\""

@@ -18,6 +18,7 @@ record MapView(SafeString patterns, SafeString style, List<PlaneView> planes, Li
    *
    * @param id an identifier for links
    * @param label the names of its axes
+   * @param component which component it lies in; empty if there is only one
    * @param held values of the other coordinates; empty where there are none
    * @param picture the picture
    * @param legend what is seen in it
@@ -25,6 +26,7 @@ record MapView(SafeString patterns, SafeString style, List<PlaneView> planes, Li
   record PlaneView(
       String id,
       SafeString label,
+      String component,
       List<SafeString> held,
       SafeString picture,
       List<EntryView> legend) {}

@@ -1,6 +1,7 @@
 package rankfall.report;
 
 import io.pebbletemplates.pebble.extension.escaper.SafeString;
+import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
 import java.util.regex.Matcher;
@@ -139,7 +140,7 @@ final class PageParts {
         s.radical(),
         s.nilradical(),
         s.kind(),
-        s.type().orElse(""),
+        s.type().map(t -> new SafeString(TypeText.html(t))).stream().toList(),
         Words.realPoints(s.realPoints()),
         witness(s.witness()),
         s.kernel().isEmpty() ? List.of() : List.of(math(formulas.span(s.kernel(), s.basis()))),
@@ -191,13 +192,32 @@ final class PageParts {
         FamilyNames.followed(c, formulas).stream().map(PageParts::math).toList());
   }
 
-  PageView.RegionView region(Region r) {
+  /** The rows of all regions, each stratum opened by what it is. */
+  List<PageView.RegionView> regions(Findings f) {
+    MapParts maps = new MapParts(f, formulas);
+    List<PageView.RegionView> out = new ArrayList<>();
+    String open = "";
+    for (Region r : f.regions()) {
+      String words = open.equals(r.stratum()) ? "" : Words.stratum(f, r.stratum());
+      out.add(region(r, !open.equals(r.stratum()), words, maps.chips(r)));
+      open = r.stratum();
+    }
+    return out;
+  }
+
+  private PageView.RegionView region(
+      Region r, boolean opensStratum, String words, List<SafeString> chips) {
     return new PageView.RegionView(
         r.stratum(),
+        opensStratum,
+        words,
         r.name(),
+        chips,
         r.conditions().stream().map(c -> text(c.toString())).toList(),
         Words.signature(r.signature()),
-        r.type().map(AlgebraType::text).orElse(""),
+        r.type().map(t -> new SafeString(TypeText.html(t.name()))).stream().toList(),
+        r.type().map(t -> TypeText.signs(String.join(", ", t.otherNames()))).orElse(""),
+        r.type().map(AlgebraType::everywhere).orElse(true),
         CsvFiles.proof(r.exact()),
         witness(r.witness()));
   }

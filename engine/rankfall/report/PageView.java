@@ -120,19 +120,24 @@ record PageView(
       int radical,
       int nilradical,
       String kind,
-      String type,
+      List<SafeString> type,
       String realPoints,
       List<SafeString> witness,
       List<SafeString> kernel,
       List<String> remarks) {}
 
-  /** A real region. */
+  /** A real region; the first one of a stratum opens a group of rows. */
   record RegionView(
       String stratum,
+      boolean opensStratum,
+      String stratumWords,
       String name,
+      List<SafeString> chips,
       List<SafeString> conditions,
       String signature,
-      String type,
+      List<SafeString> type,
+      String otherNames,
+      boolean everywhere,
       String proof,
       List<SafeString> witness) {}
 
@@ -175,7 +180,7 @@ record PageView(
         components.stream().map(c -> parts.component(c, components.size())).toList(),
         f.map(x -> x.strata().stream().map(parts::stratum).toList()).orElse(List.of()),
         contents.hasStrata() ? f.map(parts::diagram).stream().toList() : List.of(),
-        f.map(x -> x.regions().stream().map(parts::region).toList()).orElse(List.of()),
+        f.map(parts::regions).orElse(List.of()),
         f.map(x -> x.contractions().stream().map(parts::contraction).toList()).orElse(List.of()),
         Words.CONTRACTIONS,
         FormsView.of(a),

@@ -2,7 +2,6 @@ package rankfall.report;
 
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
-import rankfall.Analysis.AlgebraType;
 
 /**
  * The name of an algebra as it is set. Names travel as plain text, such as {@code so(3,1) |x R^4}
@@ -14,12 +13,6 @@ final class TypeText {
       Pattern.compile("([\\^_])(?:\\{([^{}]*)\\}|(-?[\\p{L}\\p{N}]+(?:,\\p{N}+)*))");
 
   private TypeText() {}
-
-  /** The name with its notes: other names in parentheses, and where it is known. */
-  static String plain(AlgebraType type) {
-    return type.text()
-        + (type.otherNames().isEmpty() ? "" : " (" + String.join(", ", type.otherNames()) + ")");
-  }
 
   /** Markup of a page. */
   static String html(String name) {

@@ -6,6 +6,7 @@ import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Contracted;
 import rankfall.Analysis.ContractionOutcome;
+import rankfall.Analysis.Findings;
 import rankfall.Analysis.Origin;
 import rankfall.Analysis.RealPoints;
 import rankfall.Analysis.Signature;
@@ -85,6 +86,15 @@ final class Words {
     boolean hermitian = spec.convention() == Spec.Convention.HERMITIAN;
     return (real ? "Real span" : "Complex span")
         + (hermitian ? "; the algebra is spanned by \u2212i times the listed elements." : ".");
+  }
+
+  /** What all points of a stratum share, a clause. */
+  static String stratum(Findings f, String name) {
+    return f.strata().stream()
+        .filter(s -> s.name().equals(name))
+        .findFirst()
+        .map(s -> "rank " + s.rank() + " in dimension " + s.dimension() + ", " + s.kind())
+        .orElse("");
   }
 
   /** A signature as {@code (2, 1)}, with the zeros where there are some. */

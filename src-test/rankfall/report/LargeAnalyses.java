@@ -136,7 +136,6 @@ final class LargeAnalyses {
                 List.of(),
                 List.of(),
                 List.of(),
-                List.of(),
                 List.of())));
   }
 
@@ -198,7 +197,6 @@ final class LargeAnalyses {
                 strata,
                 coverings,
                 f.regions(),
-                f.contractions(),
-                f.maps())));
+                f.contractions())));
   }
 }
