@@ -143,8 +143,14 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
     return open.get(0);
   }
 
-  /** The irreducible factors of a square-free polynomial in the last variable over the tower. */
-  private static List<Polynomial> factors(Chain below, Polynomial f) {
+  /**
+   * The irreducible factors of a square-free polynomial in the last variable over a tower.
+   *
+   * @param below a rule for each other variable that occurs, from the bottom, none linear
+   * @param f holds the last variable
+   * @return each up to an element of the field
+   */
+  public static List<Polynomial> factors(Chain below, Polynomial f) {
     if (below.rules().isEmpty()) {
       return Factoring.irreducible(f);
     }

@@ -9,7 +9,6 @@ import java.util.Random;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import rankfall.exact.Chain;
-import rankfall.exact.ChainFactoring;
 import rankfall.exact.Elimination;
 import rankfall.exact.NumberFieldTower;
 import rankfall.exact.Polynomial;
@@ -27,7 +26,7 @@ import rankfall.lie.Subspace;
  */
 record Centroid<E>(Ground<E> ground, List<SortedMap<Integer, E>> matrix, List<List<E>> factors) {
   private static final int TRIES = 20;
-  private static final int SPREAD = 40;
+  private static final int SPREAD = 4;
 
   Centroid {
     matrix = List.copyOf(matrix);
@@ -70,7 +69,7 @@ record Centroid<E>(Ground<E> ground, List<SortedMap<Integer, E>> matrix, List<Li
   }
 
   private static <E> E number(Ground<E> ground, Random random) {
-    return ground.integer(BigInteger.valueOf(random.nextInt(2 * SPREAD) - SPREAD));
+    return ground.integer(BigInteger.valueOf(random.nextInt(2 * SPREAD + 1) - SPREAD));
   }
 
   /** The image of a vector. */
@@ -107,9 +106,10 @@ record Centroid<E>(Ground<E> ground, List<SortedMap<Integer, E>> matrix, List<Li
     if (kernel.size() != 1 || !kernel.get(0).containsKey(degree)) {
       return Optional.empty();
     }
+    SortedMap<Integer, E> relation = ground.over(kernel.get(0), kernel.get(0).get(degree));
     List<E> out = new ArrayList<>();
     for (int k = 0; k <= degree; k++) {
-      out.add(kernel.get(0).getOrDefault(k, ground.domain().zero()));
+      out.add(relation.getOrDefault(k, ground.domain().zero()));
     }
     return Optional.of(out);
   }
@@ -120,28 +120,26 @@ record Centroid<E>(Ground<E> ground, List<SortedMap<Integer, E>> matrix, List<Li
     while (chain.variables().names().contains(name)) {
       name += "'";
     }
-    List<String> names = new ArrayList<>(List.of(name));
-    names.addAll(chain.variables().names());
-    Variables ring = new Variables(names, chain.variables().numbers());
-    Chain extended =
+    List<String> names = new ArrayList<>(chain.variables().names());
+    names.add(name);
+    Variables ring = new Variables(names);
+    Chain tower =
         new Chain(
             ring,
-            chain.rules().stream()
-                .map(
-                    r ->
-                        new Chain.Rule(
-                            r.variable() + 1, NumberFieldTower.inRing(r.equation(), ring)))
+            chain.tower().stream()
+                .map(r -> new Chain.Rule(r.variable(), NumberFieldTower.inRing(r.equation(), ring)))
                 .toList());
-    Polynomial x = Polynomial.variable(ring, 0);
+    int v = ring.count() - 1;
+    Polynomial x = Polynomial.variable(ring, v);
     Polynomial sum = Polynomial.zero(ring);
-    for (int k = 0; k < coefficients.size(); k++) {
-      Polynomial c = NumberFieldTower.inRing(ground.lift().apply(coefficients.get(k)), ring);
-      sum = sum.plus(c.times(x.pow(k)));
+    List<Polynomial> reduced = chain.reduced(coefficients.stream().map(ground.lift()).toList());
+    for (int k = 0; k < reduced.size(); k++) {
+      sum = sum.plus(NumberFieldTower.inRing(reduced.get(k), ring).times(x.pow(k)));
     }
-    return ChainFactoring.inVariable(extended, sum, 0).stream()
+    return NumberFieldTower.factors(tower, sum).stream()
         .map(
             f ->
-                f.coefficientsIn(0).stream()
+                f.coefficientsIn(v).stream()
                     .map(c -> ground.lower().apply(NumberFieldTower.inRing(c, chain.variables())))
                     .toList())
         .toList();
@@ -172,7 +170,7 @@ record Centroid<E>(Ground<E> ground, List<SortedMap<Integer, E>> matrix, List<Li
         images = images.stream().map(x -> value(other, x)).toList();
       }
     }
-    return Subspace.span(ground.domain(), n, images).basis();
+    return ground.reduced(images, n, n).rows();
   }
 
   /**

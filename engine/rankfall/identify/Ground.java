@@ -10,10 +10,12 @@ import java.util.TreeMap;
 import java.util.function.Function;
 import java.util.function.UnaryOperator;
 import rankfall.exact.Chain;
+import rankfall.exact.ChainFractions;
 import rankfall.exact.Domain;
 import rankfall.exact.Elimination;
 import rankfall.exact.Integers;
 import rankfall.exact.Polynomial;
+import rankfall.exact.RationalFunction;
 import rankfall.lie.CharacteristicPolynomial;
 import rankfall.lie.SignRule;
 import rankfall.lie.Signature;
@@ -29,6 +31,7 @@ import rankfall.lie.StructureConstants;
  * @param lift the polynomial that an element is
  * @param lower the element that a polynomial over the chain is
  * @param shorter equal elements, shorter where that needs no common factor
+ * @param division quotients with an integer below, which keeps numbers of the field short
  * @param <E> the elements
  */
 record Ground<E>(
@@ -37,7 +40,45 @@ record Ground<E>(
     Optional<SignRule<E>> signs,
     Function<E, Polynomial> lift,
     Function<Polynomial, E> lower,
-    UnaryOperator<List<E>> shorter) {
+    UnaryOperator<List<E>> shorter,
+    Division<E> division) {
+
+  /** Divides many elements by one that is not 0. */
+  interface Division<E> {
+    /**
+     * Quotients over a common denominator.
+     *
+     * @return numerators, then the denominator, which is an integer
+     */
+    List<E> of(List<E> numerators, E denominator);
+  }
+
+  private static List<BigInteger> integers(List<BigInteger> numerators, BigInteger denominator) {
+    List<BigInteger> all = new ArrayList<>(numerators);
+    all.add(denominator);
+    return new Integers().normal(all).entries();
+  }
+
+  private static List<Polynomial> polynomials(
+      Chain chain, List<Polynomial> numerators, Polynomial denominator) {
+    if (denominator.isConstant()) {
+      List<Polynomial> all = new ArrayList<>(numerators);
+      all.add(denominator);
+      return new NumberField(chain).primitive(all);
+    }
+    List<RationalFunction> quotients =
+        numerators.stream().map(p -> ChainFractions.canonical(chain, p, denominator)).toList();
+    Polynomial common = chain.one();
+    for (RationalFunction q : quotients) {
+      common = common.times(q.denominator().over(common.gcd(q.denominator())));
+    }
+    List<Polynomial> out = new ArrayList<>();
+    for (RationalFunction q : quotients) {
+      out.add(q.numerator().times(common.over(q.denominator())));
+    }
+    out.add(common);
+    return out;
+  }
 
   /** What is asked over any ground. */
   interface Question<R> {
@@ -56,19 +97,22 @@ record Ground<E>(
               algebra.signs().map(s -> BigInteger::signum),
               c -> Polynomial.constant(chain.variables(), c),
               Polynomial::constantValue,
-              UnaryOperator.identity());
+              UnaryOperator.identity(),
+              Ground::integers);
       return question.ask(ground, integral.get());
     }
     boolean monic = chain.rules().stream().allMatch(r -> r.initial().isOne());
     Ground<Polynomial> ground =
         new Ground<>(
-            chain,
+            new NumberField(chain),
             chain,
             algebra.signs(),
             Function.identity(),
             Function.identity(),
-            monic ? chain::reduced : UnaryOperator.identity());
-    return question.ask(ground, algebra.constants());
+            monic ? chain::reduced : UnaryOperator.identity(),
+            (above, below) -> polynomials(chain, above, below));
+    StructureConstants<Polynomial> c = algebra.constants();
+    return question.ask(ground, plain(ground.domain, c.dimension(), c.brackets()));
   }
 
   /** The constants C over the chain; denominator and scale become 1. */
@@ -167,11 +211,6 @@ record Ground<E>(
     return domain.isZero(value) || domain.isZero(domain.normal(List.of(value)).entries().get(0));
   }
 
-  /** A common multiple. */
-  E common(E a, E b) {
-    return domain.times(a, domain.cofactors(a, b).get(1));
-  }
-
   /**
    * The solution X of A X = B with a common denominator.
    *
@@ -188,24 +227,77 @@ record Ground<E>(
       b.get(i).forEach((k, v) -> row.put(n + k, v));
       rows.add(row);
     }
-    var echelon = Elimination.of(domain, rows, n + columns, n, false);
-    if (echelon.rank() < n) {
+    Reduced<E> reduced = reduced(rows, n + columns, n);
+    if (reduced.pivots.size() < n) {
       throw new ArithmeticException("the matrix has no inverse");
     }
-    E denominator = domain.one();
-    for (int i = 0; i < n; i++) {
-      denominator = common(denominator, echelon.rows().get(i).get(i));
-    }
+    E denominator = reduced.common(this);
     List<SortedMap<Integer, E>> out = new ArrayList<>();
     for (int i = 0; i < n; i++) {
-      E pivot = echelon.rows().get(i).get(i);
-      List<E> unit = domain.cofactors(denominator, pivot);
-      E factor = domain.times(unit.get(0), unit.get(1));
+      E factor = reduced.cofactor(this, denominator, i);
       SortedMap<Integer, E> row = new TreeMap<>();
-      echelon.rows().get(i).tailMap(n).forEach((k, v) -> row.put(k - n, domain.times(factor, v)));
+      reduced.rows.get(i).tailMap(n).forEach((k, v) -> row.put(k - n, domain.times(factor, v)));
       out.add(row);
     }
     return new Quotient<>(out, denominator);
+  }
+
+  /** Rows in reduced echelon form whose pivots are integers. */
+  Reduced<E> reduced(List<SortedMap<Integer, E>> rows, int columns, int pivotColumns) {
+    var echelon = Elimination.of(domain, rows, columns, pivotColumns, false);
+    List<SortedMap<Integer, E>> out = new ArrayList<>();
+    for (int k = 0; k < echelon.rank(); k++) {
+      SortedMap<Integer, E> row = echelon.rows().get(k);
+      out.add(over(row, row.get(echelon.pivots().get(k))));
+    }
+    return new Reduced<>(echelon.pivots(), out);
+  }
+
+  /** A proportional vector: the quotient by an element that is not 0, times an integer. */
+  SortedMap<Integer, E> over(SortedMap<Integer, E> x, E divisor) {
+    List<E> values = division.of(new ArrayList<>(x.values()), divisor);
+    SortedMap<Integer, E> out = new TreeMap<>();
+    int at = 0;
+    for (Integer k : x.keySet()) {
+      E v = values.get(at++);
+      if (!domain.isZero(v)) {
+        out.put(k, v);
+      }
+    }
+    return out;
+  }
+
+  /**
+   * Rows in reduced echelon form.
+   *
+   * @param pivots the pivot columns
+   * @param rows each with an integer in its pivot column, where the others have 0
+   */
+  record Reduced<E>(List<Integer> pivots, List<SortedMap<Integer, E>> rows) {
+    Reduced {
+      pivots = List.copyOf(pivots);
+      rows = List.copyOf(rows);
+    }
+
+    private E pivot(int k) {
+      return rows.get(k).get(pivots.get(k));
+    }
+
+    /** A common multiple of the pivots. */
+    E common(Ground<E> ground) {
+      E out = ground.domain.one();
+      for (int k = 0; k < rows.size(); k++) {
+        List<E> q = ground.domain.cofactors(out, pivot(k));
+        out = ground.domain.times(out, q.get(1));
+      }
+      return out;
+    }
+
+    /** The quotient of a multiple of a pivot by the pivot. */
+    E cofactor(Ground<E> ground, E multiple, int k) {
+      List<E> q = ground.domain.cofactors(multiple, pivot(k));
+      return ground.domain.times(q.get(0), q.get(1));
+    }
   }
 
   /** A matrix over a common denominator. */

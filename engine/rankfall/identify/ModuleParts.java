@@ -89,7 +89,8 @@ record ModuleParts(List<Isotypic> parts) {
    * Splits a module.
    *
    * @param ground the field
-   * @param algebra the structure of the semisimple algebra, its Killing matrix
+   * @param killing the Killing matrix of the semisimple algebra in a multiple of its basis
+   * @param scale that multiple
    * @param ideals its ideals over the field
    * @param module what its basis elements do
    * @return empty if a type is unknown
@@ -154,7 +155,9 @@ record ModuleParts(List<Isotypic> parts) {
     }
     List<SortedMap<Integer, E>> weights =
         Elimination.of(ground.domain(), Action.transposed(columns, n), space.size()).kernel();
-    return weights.stream().map(w -> ground.normal(ground.combination(w, space))).toList();
+    List<SortedMap<Integer, E>> combined =
+        weights.stream().map(w -> ground.combination(w, space)).toList();
+    return ground.reduced(combined, n, n).rows();
   }
 
   /** The values of the Casimir element of an ideal on modules up to a dimension. */

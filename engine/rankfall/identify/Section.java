@@ -6,8 +6,6 @@ import java.util.SortedMap;
 import java.util.TreeMap;
 import java.util.function.Function;
 import java.util.stream.IntStream;
-import rankfall.exact.Echelon;
-import rankfall.exact.Elimination;
 import rankfall.lie.LieBracket;
 import rankfall.lie.StructureConstants;
 import rankfall.lie.Subspace;
@@ -31,18 +29,18 @@ record Section<E>(
   static <E> Section<E> quotient(
       Ground<E> ground, LieBracket<E> bracket, List<SortedMap<Integer, E>> ideal) {
     int n = bracket.dimension();
-    Echelon<E> echelon = Elimination.of(ground.domain(), ideal, n);
+    Ground.Reduced<E> echelon = ground.reduced(ideal, n, n);
     List<Integer> kept =
         IntStream.range(0, n).filter(i -> !echelon.pivots().contains(i)).boxed().toList();
-    E factor = common(ground, echelon);
+    E factor = echelon.common(ground);
     Function<SortedMap<Integer, E>, SortedMap<Integer, E>> coordinates =
         x -> {
           SortedMap<Integer, E> rest = new TreeMap<>();
           ground.add(rest, factor, x);
-          for (int k = 0; k < echelon.rank(); k++) {
+          for (int k = 0; k < echelon.pivots().size(); k++) {
             E at = x.get(echelon.pivots().get(k));
             if (at != null) {
-              E q = over(ground, factor, echelon, k);
+              E q = echelon.cofactor(ground, factor, k);
               ground.add(
                   rest,
                   ground.domain().negate(ground.domain().times(q, at)),
@@ -65,15 +63,16 @@ record Section<E>(
   /** A subalgebra, given by vectors that span it. */
   static <E> Section<E> subalgebra(
       Ground<E> ground, LieBracket<E> bracket, List<SortedMap<Integer, E>> spanning) {
-    Echelon<E> echelon = Elimination.of(ground.domain(), spanning, bracket.dimension());
-    E factor = common(ground, echelon);
+    int n = bracket.dimension();
+    Ground.Reduced<E> echelon = ground.reduced(spanning, n, n);
+    E factor = echelon.common(ground);
     Function<SortedMap<Integer, E>, SortedMap<Integer, E>> coordinates =
         x -> {
           SortedMap<Integer, E> out = new TreeMap<>();
-          for (int k = 0; k < echelon.rank(); k++) {
+          for (int k = 0; k < echelon.pivots().size(); k++) {
             E at = x.get(echelon.pivots().get(k));
             if (at != null) {
-              out.put(k, ground.domain().times(over(ground, factor, echelon, k), at));
+              out.put(k, ground.domain().times(echelon.cofactor(ground, factor, k), at));
             }
           }
           return shortened(ground, out);
@@ -98,23 +97,6 @@ record Section<E>(
     }
     return new Section<>(
         Ground.plain(ground.domain(), basis.size(), brackets), factor, basis, coordinates);
-  }
-
-  private static <E> E common(Ground<E> ground, Echelon<E> echelon) {
-    E out = ground.domain().one();
-    for (int k = 0; k < echelon.rank(); k++) {
-      out = ground.common(out, pivot(echelon, k));
-    }
-    return out;
-  }
-
-  private static <E> E pivot(Echelon<E> echelon, int k) {
-    return echelon.rows().get(k).get(echelon.pivots().get(k));
-  }
-
-  private static <E> E over(Ground<E> ground, E factor, Echelon<E> echelon, int k) {
-    List<E> q = ground.domain().cofactors(factor, pivot(echelon, k));
-    return ground.domain().times(q.get(0), q.get(1));
   }
 
   private static <E> SortedMap<Integer, E> shortened(Ground<E> ground, SortedMap<Integer, E> x) {

@@ -73,8 +73,8 @@ final class SimpleIdeals {
     if (n == 3 || isSimpleByResidues(ground, constants)) {
       return List.of(whole(ground, constants, kappa));
     }
-    List<List<SortedMap<Integer, E>>> forms =
-        InvariantForms.of(LieBracket.of(constants)).matrices();
+    InvariantForms<E> found = InvariantForms.of(LieBracket.of(constants));
+    List<List<SortedMap<Integer, E>>> forms = shortened(ground, found).matrices();
     if (forms.size() == 1) {
       return List.of(whole(ground, constants, kappa));
     }
@@ -84,6 +84,15 @@ final class SimpleIdeals {
       out.add(part(ground, constants, kappa, phi, factor));
     }
     return out;
+  }
+
+  /** The same forms by a reduced basis, whose numbers are shorter. */
+  private static <E> InvariantForms<E> shortened(Ground<E> ground, InvariantForms<E> forms) {
+    Subspace<E> all = forms.forms();
+    List<SortedMap<Integer, E>> basis =
+        ground.reduced(all.basis(), all.ambient(), all.ambient()).rows();
+    return new InvariantForms<>(
+        forms.dimension(), new Subspace<>(ground.domain(), all.ambient(), basis, List.of()));
   }
 
   private static <E> boolean isSimpleByResidues(Ground<E> ground, StructureConstants<E> constants) {

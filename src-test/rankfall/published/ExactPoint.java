@@ -15,7 +15,7 @@ import rankfall.spec.SpecException;
 import rankfall.spec.SpecReader;
 
 /** The algebra that a spec has at a point. */
-final class ExactPoint {
+public final class ExactPoint {
   private ExactPoint() {}
 
   /**
@@ -25,7 +25,7 @@ final class ExactPoint {
    * @param at exact values by name
    * @return empty where the span is not closed or the family has no point
    */
-  static Optional<ExactAlgebra> of(String spec, SortedMap<String, String> at) {
+  public static Optional<ExactAlgebra> of(String spec, SortedMap<String, String> at) {
     Family family = family(spec);
     SortedMap<String, BigFraction> values = new TreeMap<>();
     at.forEach((name, value) -> values.put(name, BigFraction.parse(value)));

@@ -136,6 +136,7 @@ final class LargeAnalyses {
                 List.of(),
                 List.of(),
                 List.of(),
+                List.of(),
                 List.of())));
   }
 
@@ -197,6 +198,7 @@ final class LargeAnalyses {
                 strata,
                 coverings,
                 f.regions(),
-                f.contractions())));
+                f.contractions(),
+                f.maps())));
   }
 }

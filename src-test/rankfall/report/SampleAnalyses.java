@@ -149,6 +149,7 @@ final class SampleAnalyses {
                 List.of(),
                 List.of(),
                 List.of(),
+                List.of(),
                 List.of())));
   }
 
@@ -314,7 +315,8 @@ final class SampleAnalyses {
                 List.of(
                     new Covering("S2", "S1"), new Covering("S3", "S2"), new Covering("S4", "S3")),
                 regions,
-                contractions(a, v, basis))));
+                contractions(a, v, basis),
+                List.of())));
   }
 
   /** One of each outcome. */
@@ -355,6 +357,7 @@ final class SampleAnalyses {
                 f.listed(),
                 f.variables(),
                 List.of(new Relation(p.times(p.minus(q)), List.of(p, p.minus(q)), Origin.CLOSURE)),
+                List.of(),
                 List.of(),
                 List.of(),
                 List.of(),

@@ -65,7 +65,8 @@ final class HandMade {
         List.of(),
         List.of(),
         List.of(),
-        List.of());
+        List.of(),
+        Optional.empty());
   }
 
   /** A region of algebras of dimension 3. */
