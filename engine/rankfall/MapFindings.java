@@ -5,6 +5,7 @@ import java.util.HashMap;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.stream.Collectors;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Coordinate;
@@ -57,7 +58,13 @@ record MapFindings(
                   + " are free and the others keep their values or follow from linear equations."));
     }
     if (!leftOut.isEmpty()) {
-      out.add(new Missing("Not drawn: " + String.join("; ", leftOut) + "."));
+      out.add(
+          new Missing(
+              "Not drawn, being more than "
+                  + MOST_MAPS
+                  + " or too large: the planes "
+                  + String.join("; ", leftOut)
+                  + "."));
     }
     return out;
   }
@@ -104,7 +111,7 @@ record MapFindings(
           if (map.isPresent()) {
             out.add(map.get());
           } else {
-            leftOut.add(names(free));
+            leftOut.add(names(free, c));
           }
           if (dimension == 1) {
             return;
@@ -114,11 +121,10 @@ record MapFindings(
     }
   }
 
-  private String names(List<Integer> free) {
-    return "the plane of "
-        + family.ring().variables().names().get(free.get(0))
-        + " and "
-        + family.ring().variables().names().get(free.get(1));
+  private String names(List<Integer> free, Component c) {
+    List<String> names = family.ring().variables().names();
+    String axes = free.stream().map(names::get).collect(Collectors.joining(", "));
+    return "(" + axes + ")" + (components.size() > 1 ? " of component " + c.number() : "");
   }
 
   /** The rational point of the general stratum of a component. */
