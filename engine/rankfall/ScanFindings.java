@@ -134,10 +134,10 @@ record ScanFindings(ScanFamily family, Analysis analysis, Meter meter) {
   private Comparator<Finding> order() {
     List<String> regions = new ArrayList<>();
     for (Analysis.Stratum s : analysis.findings().orElseThrow().strata()) {
-      regions.add(s.name() + " ");
       analysis.findings().orElseThrow().regions().stream()
           .filter(r -> r.stratum().equals(s.name()))
           .forEach(r -> regions.add(s.name() + " " + r.name()));
+      regions.add(s.name() + " ");
     }
     return Comparator.comparing(Finding::status)
         .thenComparing(f -> regions.indexOf(f.stratum() + " " + f.region()))

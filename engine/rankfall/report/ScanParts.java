@@ -34,9 +34,7 @@ record ScanParts(Findings findings, ScanCounts scan, Formulas formulas) {
         new SafeString(scan.axes().stream().map(this::axis).collect(Collectors.joining("; "))),
         alone ? List.of(new SafeString(Palette.patterns())) : List.of(),
         alone ? List.of(new SafeString(Palette.style())) : List.of(),
-        drawn
-            ? List.of(new SafeString(ScanPicture.of(scan, fills, names, formulas)))
-            : List.of(),
+        drawn ? List.of(new SafeString(ScanPicture.of(scan, fills, names, formulas))) : List.of(),
         rows,
         number(scan.counts().stream().mapToLong(ScanCount::points).sum()));
   }

@@ -3,6 +3,7 @@ package rankfall.report;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Locale;
+import java.util.Map;
 import java.util.TreeMap;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis.ScanAxis;
@@ -111,13 +112,19 @@ final class ScanPicture {
                     + " and "
                     + second.name()
                     + ", each a cell")));
-    TreeMap<Integer, StringBuilder> paths = new TreeMap<>();
-    for (int n = 0; n < scan.points().size(); n++) {
-      int i = n / second.values().size();
-      int j = n % second.values().size();
-      paths
-          .computeIfAbsent(scan.points().get(n), k -> new StringBuilder())
-          .append(cell(axes, across.ranks.get(i), up.ranks.get(j)));
+    Map<Integer, StringBuilder> paths = new TreeMap<>();
+    for (int i = 0; i < first.values().size(); i++) {
+      int[] column = column(i);
+      int place = across.ranks.get(i);
+      int from = 0;
+      for (int j = 1; j <= column.length; j++) {
+        if (j == column.length || column[j] != column[from]) {
+          paths
+              .computeIfAbsent(column[from], k -> new StringBuilder())
+              .append(cells(axes, place, from, j));
+          from = j;
+        }
+      }
     }
     paths.forEach(
         (k, d) ->
@@ -131,14 +138,25 @@ final class ScanPicture {
     return out.append(axes.markup()).append("</svg>\n").toString();
   }
 
-  private String cell(Axes axes, int i, int j) {
+  /** What was found on a column, from the bottom up. */
+  private int[] column(int i) {
+    int[] out = new int[second.values().size()];
+    for (int j = 0; j < out.length; j++) {
+      out[up.ranks.get(j)] = scan.points().get(i * out.length + j);
+    }
+    return out;
+  }
+
+  /** Cells on one another, from one to before another one. */
+  private String cells(Axes axes, int column, int from, int to) {
+    double left = axes.x(across.borders.get(column).doubleValue());
     return String.format(
         Locale.ROOT,
         "M%.1f %.1fH%.1fV%.1fH%.1fZ",
-        axes.x(across.borders.get(i).doubleValue()),
-        axes.y(up.borders.get(j).doubleValue()),
-        axes.x(across.borders.get(i + 1).doubleValue()),
-        axes.y(up.borders.get(j + 1).doubleValue()),
-        axes.x(across.borders.get(i).doubleValue()));
+        left,
+        axes.y(up.borders.get(from).doubleValue()),
+        axes.x(across.borders.get(column + 1).doubleValue()),
+        axes.y(up.borders.get(to).doubleValue()),
+        left);
   }
 }

@@ -167,7 +167,6 @@ public final class ScanTables {
       Map<String, Integer> order) {
     for (Stratum s : f.strata()) {
       equations.put(s.name(), CsvFiles.equations(s.equations()));
-      order.put(key(s.name(), ""), order.size());
       for (Region r : f.regions()) {
         if (r.stratum().equals(s.name())) {
           order.put(key(s.name(), r.name()), order.size());
@@ -178,6 +177,7 @@ public final class ScanTables {
                   .collect(Collectors.joining("; ")));
         }
       }
+      order.put(key(s.name(), ""), order.size());
     }
   }
 
