@@ -1,11 +1,13 @@
 package rankfall;
 
+import java.math.BigInteger;
 import java.util.Collection;
 import java.util.HashMap;
 import java.util.HashSet;
 import java.util.List;
 import java.util.Map;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
 import org.apache.commons.numbers.fraction.BigFraction;
@@ -13,6 +15,7 @@ import rankfall.Analysis.Comparison;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.SignCondition;
 import rankfall.exact.Polynomial;
+import rankfall.exact.Rationals;
 import rankfall.lie.Family;
 import rankfall.lie.FamilyCondition;
 import rankfall.lie.FamilyRelation;
@@ -25,6 +28,7 @@ import rankfall.scan.Atlas;
 import rankfall.scan.Axis;
 import rankfall.scan.Finding;
 import rankfall.scan.Frame;
+import rankfall.scan.NumberSigns;
 import rankfall.spec.Spec;
 import rankfall.spec.SpecException;
 
@@ -132,7 +136,36 @@ public final class ScanFamily {
                 }
               }
             });
-    return new Frame(given, zeros, ones, this::sign);
+    return new Frame(given, zeros, ones, new Numbers(this));
+  }
+
+  /** The numbers of the family. */
+  private record Numbers(ScanFamily family) implements NumberSigns {
+    private static final int BITS = 60;
+    private static final int LARGEST = 500;
+
+    @Override
+    public int sign(Polynomial number) {
+      return family.sign(number);
+    }
+
+    @Override
+    public OptionalDouble near(Polynomial number) {
+      if (family.family.ring().complex()) {
+        return OptionalDouble.empty();
+      }
+      BigFraction q = family.family.ring().tower().near(number, BITS).middle();
+      BigInteger n = Rationals.numerator(q);
+      BigInteger d = Rationals.denominator(q);
+      int size = n.bitLength() - d.bitLength();
+      if (Math.abs(size) > LARGEST - 1) {
+        return OptionalDouble.empty();
+      }
+      // A whole number of more than BITS bits, rounded to a double and scaled back exactly.
+      int shift = BITS + 2 - size;
+      BigInteger whole = shift > 0 ? n.shiftLeft(shift).divide(d) : n.divide(d.shiftLeft(-shift));
+      return OptionalDouble.of(Math.scalb(whole.doubleValue(), -shift));
+    }
   }
 
   private int sign(Polynomial number) {

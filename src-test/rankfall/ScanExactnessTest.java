@@ -13,12 +13,15 @@ import java.util.Map;
 import java.util.Optional;
 import java.util.Random;
 import org.apache.commons.numbers.fraction.BigFraction;
+import org.junit.jupiter.api.BeforeAll;
 import org.junit.jupiter.api.Test;
+import org.junit.jupiter.api.TestInstance;
 import rankfall.exact.Rationals;
 import rankfall.scan.Axis;
 import rankfall.scan.Columns;
 import rankfall.scan.Finding;
 import rankfall.scan.PointList;
+import rankfall.scan.PointSet;
 import rankfall.scan.Sample;
 import rankfall.scan.ScanPlan;
 import rankfall.scan.ScanRun;
@@ -26,6 +29,7 @@ import rankfall.spec.SpecException;
 import rankfall.spec.SpecReader;
 
 /** A million points, on loci and a billionth of a thousandth away from them, none wrong. */
+@TestInstance(TestInstance.Lifecycle.PER_CLASS)
 final class ScanExactnessTest {
   /**
    * [X, Y] = p*Z, [Y, Z] = q*X, [Z, X] = r*Y has the Killing form diag(-2 p r, -2 p q, -2 q r)
@@ -43,15 +47,17 @@ final class ScanExactnessTest {
 
   private static final int POINTS = 1_000_000;
 
-  private static Analysis analysis() throws SpecException {
-    return Engine.withoutGrid(
-        SpecReader.read("s.yaml", SPEC.getBytes(UTF_8)).get(0).orThrow(), Budget.DEFAULT);
+  private Analysis analysis;
+
+  @BeforeAll
+  void analyse() throws SpecException {
+    analysis =
+        Engine.withoutGrid(
+            SpecReader.read("s.yaml", SPEC.getBytes(UTF_8)).get(0).orThrow(), Budget.DEFAULT);
+    assertEquals(Analysis.Status.COMPLETE, analysis.status());
   }
 
-  private static ScanPlan plan(rankfall.scan.PointSet points, List<String> facts)
-      throws SpecException {
-    Analysis analysis = analysis();
-    assertEquals(Analysis.Status.COMPLETE, analysis.status());
+  private ScanPlan plan(PointSet points, List<String> facts) throws SpecException {
     ScanFamily family = ScanFamily.of(analysis.spec());
     List<String> names = List.of("a", "b");
     return new ScanPlan(
@@ -146,7 +152,6 @@ final class ScanExactnessTest {
   /** Against the answers at single points, with their strata; on a sample. */
   @Test
   void aSampleAgreesWithSinglePoints() throws SpecException {
-    Analysis analysis = analysis();
     Points single = Points.of(analysis.spec(), StratumLookup.of(analysis.spec(), analysis));
     Sample sample =
         new Sample(

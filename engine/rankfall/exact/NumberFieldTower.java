@@ -205,6 +205,12 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
 
   /** The sign of a polynomial all over the intervals; 0 if its bounds do not tell. */
   private static int sign(Polynomial p, List<ConstantRoot> at) {
+    Interval b = bounds(p, at);
+    return b.lower().signum() > 0 ? 1 : b.upper().signum() < 0 ? -1 : 0;
+  }
+
+  /** Bounds of a polynomial all over the intervals. */
+  private static Interval bounds(Polynomial p, List<ConstantRoot> at) {
     BigFraction low = BigFraction.ZERO;
     BigFraction high = BigFraction.ZERO;
     for (Term t : p.terms()) {
@@ -225,7 +231,34 @@ public record NumberFieldTower(Chain chain, List<ConstantRoot> roots) {
       low = low.add(l);
       high = high.add(h);
     }
-    return low.signum() > 0 ? 1 : high.signum() < 0 ? -1 : 0;
+    return new Interval(low, high);
+  }
+
+  /**
+   * A number of the tower, enclosed.
+   *
+   * @param p in any ring that names the tower's variables; no other variable may occur; not 0 as a
+   *     number
+   * @param bits how close
+   * @return ends of one sign whose distance is at most 2^-bits times the end nearer to 0
+   * @throws ArithmeticException if the number is 0
+   */
+  public Interval near(Polynomial p, int bits) {
+    List<Polynomial> reduced = chain.reduced(List.of(inRing(p, chain.variables()), chain.one()));
+    if (reduced.get(0).isZero()) {
+      throw new ArithmeticException("0 has no relative bounds");
+    }
+    BigFraction scale = BigFraction.of(BigInteger.ONE, BigInteger.ONE.shiftLeft(bits));
+    List<ConstantRoot> at = roots;
+    while (true) {
+      Interval b = bounds(reduced.get(0), at);
+      BigFraction least = Rationals.min(b.lower().abs(), b.upper().abs());
+      if (b.lower().signum() * b.upper().signum() > 0
+          && Rationals.compare(b.width(), least.multiply(scale)) <= 0) {
+        return b.over(Interval.of(BigFraction.of(reduced.get(1).constantValue())));
+      }
+      at = at.stream().map(r -> r.refined(STEPS)).toList();
+    }
   }
 
   /**

@@ -1,60 +1,61 @@
 package rankfall.scan;
 
-import java.math.BigInteger;
 import java.util.List;
 
 /**
- * A polynomial in doubles with a proved bound of the error, and in big integers where the bound
- * does not decide.
+ * A polynomial in doubles with a proved bound of the error; where the bound does not decide,
+ * another form of it answers.
  *
  * <p>The bound (Higham, Accuracy and Stability of Numerical Algorithms, 2nd ed. 2002, ch. 3 and 5).
- * Let u = 2^-53. Coefficients and coordinates are integers and become doubles by rounding to
- * nearest, a relative error of at most u each. A term of total degree d takes part in 1 + d such
- * roundings, in at most d multiplications (tables of powers, their products, Horner's steps) and in
- * at most T + k additions, T the number of terms and k the degree along the line. So with K = 1 + 3
- * d + T each term enters the computed value with a factor 1 + θ, |θ| <= γ = K u / (1 - K u) (lemma
- * 3.1), and the error is at most γ M, M the sum of the absolute values of the terms. The same
+ * Let u = 2^-53. Coordinates are integers and become doubles by rounding to nearest, a relative
+ * error of at most u each; coefficients are doubles with a relative error of at most 2 u. A term of
+ * total degree d takes part in d such roundings of coordinates, in at most d multiplications
+ * (tables of powers, their products, Horner's steps) and in at most T + k additions, T the number
+ * of terms and k the degree along the line. So with K = 3 + 3 d + T each term enters the computed
+ * value with a factor 1 + θ, |θ| <= γ = K u / (1 - K u) (lemma 3.1; an error of 2 u counts as three
+ * roundings), and the error is at most γ M, M the sum of the absolute values of the terms. The same
  * operations on absolute values compute M' >= (1 - γ) M. The error is thus at most γ / (1 - γ) M' =
  * K u / (1 - 2 K u) M', which is less than 8/7 K u M' for K u <= 1/16; the bound used is 2 K u M',
  * rounded once. On a line M' is computed once at the greatest absolute value along the line, which
  * only makes it larger, since rounded operations on non-negative numbers are monotone.
  *
- * <p>Underflow cannot happen: every number that is met is a rounded sum or product of integers, so
- * 0 or of absolute value 1 or more. After an overflow M' is infinite or no number, and then no
- * comparison with the bound holds, so that the exact path answers. A value of exact integers below
- * 2^53 whose terms are all 0 has M' = 0 and is told to be 0 at once.
+ * <p>Underflow cannot happen: coefficients are 2^-500 or more in absolute value (integers, or
+ * numbers of a field in that range), coordinates are integers, so that every product is 0 or at
+ * least 2^-500, and sums do not underflow. After an overflow M' is infinite or no number, and then
+ * no comparison with the bound holds, so that the other form answers. M' = 0 only if all terms are
+ * exactly 0.
  */
 final class DoubleForm extends SignForm {
   private static final double UNIT = 0x1p-53;
 
   private final Monomials[] parts;
+  private final SignForm exact;
   private final double reach;
   private final double factor;
   private final double[] coefficients;
-  private final BigInteger[] exact;
   private double bound;
-  private boolean exactKnown;
 
   /**
    * A form.
    *
-   * @param p with integer coefficients
-   * @param inner the coordinate along the line, or -1 if there is none
+   * @param along the polynomial by powers of the coordinate along the line, constant one first; one
+   *     only if that coordinate does not occur
+   * @param degree at least the total degree
    * @param reach the greatest absolute value of that coordinate
+   * @param exact answers where the bound does not decide
    */
-  DoubleForm(IntegerPolynomial p, int inner, long reach) {
-    super(inner >= 0 && p.degree(inner) > 0);
-    List<IntegerPolynomial> along = p.along(inner);
-    parts = along.stream().map(Monomials::new).toArray(Monomials[]::new);
-    coefficients = new double[parts.length];
-    exact = new BigInteger[parts.length];
+  DoubleForm(List<Monomials> along, int degree, long reach, SignForm exact) {
+    super(along.size() > 1);
+    this.parts = along.toArray(new Monomials[0]);
+    this.coefficients = new double[parts.length];
     this.reach = reach;
-    this.factor = 2 * UNIT * (1 + 3.0 * p.degree() + p.terms().size());
+    this.exact = exact;
+    int terms = along.stream().mapToInt(Monomials::size).sum();
+    this.factor = 2 * UNIT * (3 + 3.0 * degree + terms);
   }
 
   @Override
   void enter(Coordinates at) {
-    exactKnown = false;
     double size = 0;
     for (int k = parts.length - 1; k >= 0; k--) {
       double value = 0;
@@ -83,23 +84,6 @@ final class DoubleForm extends SignForm {
     if (value < -bound) {
       return -1;
     }
-    return bound == 0 ? 0 : exact(at);
-  }
-
-  private int exact(Coordinates at) {
-    if (!exactKnown) {
-      for (int k = 0; k < parts.length; k++) {
-        exact[k] = parts[k].value(at);
-      }
-      exactKnown = true;
-    }
-    BigInteger value = exact[exact.length - 1];
-    if (exact.length > 1) {
-      BigInteger x = BigInteger.valueOf(at.inner());
-      for (int k = exact.length - 2; k >= 0; k--) {
-        value = value.multiply(x).add(exact[k]);
-      }
-    }
-    return value.signum();
+    return bound == 0 ? 0 : exact.sign(at);
   }
 }

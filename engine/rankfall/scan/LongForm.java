@@ -11,10 +11,15 @@ final class LongForm extends SignForm {
   private final Monomials[] parts;
   private final long[] coefficients;
 
-  LongForm(IntegerPolynomial p, int inner) {
-    super(inner >= 0 && p.degree(inner) > 0);
-    List<IntegerPolynomial> along = p.along(inner);
-    parts = along.stream().map(Monomials::new).toArray(Monomials[]::new);
+  /**
+   * A form.
+   *
+   * @param along the polynomial by powers of the coordinate along the line, constant one first; one
+   *     only if that coordinate does not occur
+   */
+  LongForm(List<Monomials> along) {
+    super(along.size() > 1);
+    parts = along.toArray(new Monomials[0]);
     coefficients = new long[parts.length];
   }
 

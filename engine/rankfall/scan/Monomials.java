@@ -12,15 +12,25 @@ final class Monomials {
   private final int[][] exponents;
 
   /**
-   * Lays out a polynomial.
+   * Lays out a polynomial; its coefficients as longs are right where they fit.
    *
-   * @param p its coefficients as longs are right where they fit
+   * @param p with integer coefficients
    */
   Monomials(IntegerPolynomial p) {
+    this(p, p.terms().stream().mapToDouble(t -> t.coefficient().doubleValue()).toArray());
+  }
+
+  /**
+   * Lays out a polynomial for its rounded values alone.
+   *
+   * @param p what its terms are
+   * @param rounded their coefficients
+   */
+  Monomials(IntegerPolynomial p, double[] rounded) {
     List<IntegerPolynomial.Term> terms = p.terms();
     int n = terms.size();
     coefficients = new BigInteger[n];
-    doubles = new double[n];
+    doubles = rounded.clone();
     longs = new long[n];
     variables = new int[n][];
     exponents = new int[n][];
@@ -28,7 +38,6 @@ final class Monomials {
       IntegerPolynomial.Term term = terms.get(t);
       int[] e = term.exponents();
       coefficients[t] = term.coefficient();
-      doubles[t] = term.coefficient().doubleValue();
       longs[t] = term.coefficient().longValue();
       variables[t] = java.util.stream.IntStream.range(0, e.length).filter(v -> e[v] > 0).toArray();
       exponents[t] = java.util.Arrays.stream(variables[t]).map(v -> e[v]).toArray();

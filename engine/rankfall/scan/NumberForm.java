@@ -3,7 +3,6 @@ package rankfall.scan;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
-import java.util.Map;
 import rankfall.exact.Polynomial;
 import rankfall.exact.Term;
 import rankfall.exact.Variables;
@@ -22,22 +21,15 @@ final class NumberForm extends SignForm {
   /**
    * A form.
    *
-   * @param ring of the values
-   * @param parts what stands before each monomial of the numbers, by its exponents in the ring
-   * @param varies whether the coordinate along the line occurs
-   * @param inner the coordinate along the line
+   * @param p the polynomial
+   * @param inner the coordinate along the line, or -1 if there is none
    * @param signs of the values
    */
-  NumberForm(
-      Variables ring,
-      Map<List<Integer>, IntegerPolynomial> parts,
-      boolean varies,
-      int inner,
-      NumberSigns signs) {
-    super(varies);
-    this.ring = ring;
-    this.numbers = List.copyOf(parts.keySet());
-    this.parts = parts.values().stream().map(Monomials::new).toList();
+  NumberForm(NumberPolynomial p, int inner, NumberSigns signs) {
+    super(inner >= 0 && p.degree(inner) > 0);
+    this.ring = p.ring();
+    this.numbers = List.copyOf(p.parts().keySet());
+    this.parts = p.parts().values().stream().map(Monomials::new).toList();
     this.inner = inner;
     this.signs = signs;
   }

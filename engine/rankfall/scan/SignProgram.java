@@ -6,6 +6,7 @@ import java.util.Arrays;
 import java.util.LinkedHashMap;
 import java.util.List;
 import java.util.Map;
+import java.util.Optional;
 import java.util.stream.IntStream;
 import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Polynomial;
@@ -51,10 +52,13 @@ final class SignProgram implements Signs {
     List<SignForm> forms = new ArrayList<>();
     int[] degrees = new int[n];
     for (Polynomial p : polynomials) {
-      Map<List<Integer>, IntegerPolynomial> parts =
-          parts(frame, p, n, t -> onLattice(t, lattice.denominators()));
-      forms.add(form(frame, p, parts, lattice, inner));
-      raise(degrees, parts);
+      NumberPolynomial q = integral(frame, p, t -> onLattice(t, lattice.denominators()));
+      boolean fits = q.isRational() && q.rational().bound(lattice.reaches()).compareTo(LONGS) < 0;
+      forms.add(
+          fits
+              ? new LongForm(laidOut(q.rational(), inner))
+              : form(frame, q, inner, inner < 0 ? 0 : lattice.reaches().get(inner)));
+      raise(degrees, q);
     }
     return new SignProgram(forms, new Coordinates(degrees), n, inner);
   }
@@ -70,47 +74,31 @@ final class SignProgram implements Signs {
     List<SignForm> forms = new ArrayList<>();
     int[] degrees = new int[2 * n];
     for (Polynomial p : polynomials) {
-      Map<List<Integer>, IntegerPolynomial> parts =
-          parts(frame, p, 2 * n, SignProgram::homogeneous);
-      forms.add(
-          isRational(parts)
-              ? new DoubleForm(sum(parts), -1, 0)
-              : new NumberForm(p.variables(), parts, false, -1, frame.numbers()));
-      raise(degrees, parts);
+      NumberPolynomial q = integral(frame, p, SignProgram::homogeneous);
+      forms.add(form(frame, q, -1, 0));
+      raise(degrees, q);
     }
     return new SignProgram(forms, new Coordinates(degrees), n, -1);
   }
 
-  private static SignForm form(
-      Frame frame,
-      Polynomial p,
-      Map<List<Integer>, IntegerPolynomial> parts,
-      Lattice lattice,
-      int inner) {
-    if (!isRational(parts)) {
-      boolean varies = inner >= 0 && parts.values().stream().anyMatch(q -> q.degree(inner) > 0);
-      return new NumberForm(p.variables(), parts, varies, inner, frame.numbers());
+  private static SignForm form(Frame frame, NumberPolynomial q, int inner, long reach) {
+    if (q.isRational()) {
+      List<Monomials> along = laidOut(q.rational(), inner);
+      return new DoubleForm(along, q.degree(), reach, new BigForm(along));
     }
-    IntegerPolynomial q = sum(parts);
-    return q.bound(lattice.reaches()).compareTo(LONGS) < 0
-        ? new LongForm(q, inner)
-        : new DoubleForm(q, inner, inner < 0 ? 0 : lattice.reaches().get(inner));
+    SignForm exact = new NumberForm(q, inner, frame.numbers());
+    Optional<List<Monomials>> along = q.rounded(inner, frame.numbers());
+    return along.isEmpty() ? exact : new DoubleForm(along.get(), q.degree(), reach, exact);
   }
 
-  private static void raise(int[] degrees, Map<List<Integer>, IntegerPolynomial> parts) {
-    for (IntegerPolynomial q : parts.values()) {
-      for (int v = 0; v < degrees.length; v++) {
-        degrees[v] = Math.max(Math.max(1, degrees[v]), q.degree(v));
-      }
+  private static List<Monomials> laidOut(IntegerPolynomial p, int inner) {
+    return p.along(inner).stream().map(Monomials::new).toList();
+  }
+
+  private static void raise(int[] degrees, NumberPolynomial q) {
+    for (int v = 0; v < degrees.length; v++) {
+      degrees[v] = Math.max(Math.max(1, degrees[v]), q.degree(v));
     }
-  }
-
-  private static boolean isRational(Map<List<Integer>, IntegerPolynomial> parts) {
-    return parts.keySet().stream().allMatch(e -> e.stream().allMatch(k -> k == 0));
-  }
-
-  private static IntegerPolynomial sum(Map<List<Integer>, IntegerPolynomial> parts) {
-    return parts.values().stream().findFirst().orElse(new IntegerPolynomial(List.of()));
   }
 
   /** A term in the values of a point, over the greatest degree of each value. */
@@ -138,9 +126,8 @@ final class SignProgram implements Signs {
     return new IntegerPolynomial.Term(t.coefficient, e);
   }
 
-  /** What stands before each monomial of the algebraic numbers, free of denominators. */
-  private static Map<List<Integer>, IntegerPolynomial> parts(
-      Frame frame, Polynomial p, int coordinates, Clearing clearing) {
+  /** A polynomial free of denominators. */
+  private static NumberPolynomial integral(Frame frame, Polynomial p, Clearing clearing) {
     Variables ring = p.variables();
     int n = frame.names().size();
     int[] place = frame.places(ring);
@@ -183,7 +170,7 @@ final class SignProgram implements Signs {
             out.put(numbers, new IntegerPolynomial(part));
           }
         });
-    return out;
+    return new NumberPolynomial(ring, out);
   }
 
   private static int[] ints(List<Integer> list) {

@@ -68,7 +68,7 @@ class ReportWriterTest {
     Analysis before = SampleAnalyses.stratified();
     ReportWriter.write(before, out);
     Path folder = out.resolve("stretched-rotor");
-    Files.writeString(folder.resolve("scan.csv"), "a\r\n");
+    Files.writeString(folder.resolve("notes.csv"), "a\r\n");
     Analysis failed =
         new Analysis(
             before.spec(),
@@ -79,7 +79,7 @@ class ReportWriterTest {
             List.of(),
             Optional.empty());
     ReportWriter.write(failed, out);
-    assertEquals(List.of("report.html", "result.json", "scan.csv"), names(folder));
+    assertEquals(List.of("notes.csv", "report.html", "result.json"), names(folder));
   }
 
   @Test

@@ -48,7 +48,7 @@ final class AtlasTest {
   private static Atlas atlas(
       List<SignCondition> domain, List<Stratum> strata, List<Region> regions) {
     return new Atlas(
-        new Frame(List.of("a", "b"), Set.of(), Set.of(), p -> 0),
+        new Frame(List.of("a", "b"), Set.of(), Set.of(), HandMade.RATIONAL),
         List.of(A.minus(Polynomial.constant(HandMade.RING, 7))),
         List.of(),
         domain,

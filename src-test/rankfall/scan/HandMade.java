@@ -2,6 +2,7 @@ package rankfall.scan;
 
 import java.util.List;
 import java.util.Optional;
+import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
 import rankfall.Analysis.Comparison;
@@ -23,11 +24,25 @@ final class HandMade {
   static final Variables RING = new Variables(List.of("a", "b"));
   static final Polynomial A = Polynomial.variable(RING, 0);
 
+  /** Numbers of a family without algebraic numbers: never asked. */
+  static final NumberSigns RATIONAL =
+      new NumberSigns() {
+        @Override
+        public int sign(Polynomial number) {
+          throw new IllegalStateException("asked for the sign of " + number);
+        }
+
+        @Override
+        public OptionalDouble near(Polynomial number) {
+          throw new IllegalStateException("asked for " + number);
+        }
+      };
+
   private HandMade() {}
 
   /** The atlas over a and b. */
   static Atlas atlas() {
-    Frame frame = new Frame(List.of("a", "b"), Set.of(), Set.of(), p -> 0);
+    Frame frame = new Frame(List.of("a", "b"), Set.of(), Set.of(), RATIONAL);
     return new Atlas(
         frame,
         List.of(),

@@ -6,19 +6,22 @@ import static org.junit.jupiter.api.Assertions.assertTrue;
 import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.List;
+import java.util.OptionalDouble;
 import java.util.Random;
 import java.util.Set;
 import org.apache.commons.numbers.fraction.BigFraction;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
+import rankfall.exact.NumberFieldTower;
 import rankfall.exact.Polynomial;
 import rankfall.exact.Variables;
 
 /** Signs against identities: the sign of a product is the product of the signs. */
 final class SignProgramTest {
   private static final Variables RING = new Variables(List.of("x", "y"));
-  private static final Frame FRAME = new Frame(List.of("x", "y"), Set.of(), Set.of(), p -> 0);
+  private static final Frame FRAME =
+      new Frame(List.of("x", "y"), Set.of(), Set.of(), HandMade.RATIONAL);
 
   /** A product of linear forms, expanded, with its factors. */
   private record Product(List<long[]> factors, Polynomial expanded) {
@@ -141,38 +144,59 @@ final class SignProgramTest {
     assertEquals(0, SignProgram.along(FRAME, List.of(p), fine).inLongs());
   }
 
-  /** x^2 - 2 has the sign of the distance to the root of 2; the number itself is a variable. */
+  /**
+   * Numbers of Q(sqrt(2)): x - r*y has the sign of x^2 - 2*y^2 for positive x and y, so that
+   * convergents of the continued fraction 1, 3/2, 7/5, 17/12 ... lie on either side in turn (Hardy
+   * and Wright, An Introduction to the Theory of Numbers, ch. X; place from memory).
+   */
   @Test
-  void numbersOfAFieldAreLeftToTheField() {
+  void algebraicNumbersAreDecidedExactly() {
     Variables ring = new Variables(List.of("x", "y", "r"), 1);
-    Polynomial p = Polynomial.variable(ring, 0).minus(Polynomial.variable(ring, 2));
-    NumberSigns root =
-        n -> {
-          double value = 0;
-          for (var t : n.terms()) {
-            double r = t.exponents().get(2) == 1 ? Math.sqrt(2) : 1;
-            value += t.coefficient().doubleValue() * r;
-          }
-          return (int) Math.signum(value);
-        };
-    Frame frame = new Frame(List.of("x", "y"), Set.of(), Set.of(), root);
+    NumberFieldTower field =
+        NumberFieldTower.rational()
+            .with("r", List.of(fraction(-2, 1), fraction(0, 1), fraction(1, 1)), fraction(7, 5))
+            .tower();
+    Frame frame = new Frame(List.of("x", "y"), Set.of(), Set.of(), new Field(field));
+    Polynomial p =
+        Polynomial.variable(ring, 0)
+            .minus(Polynomial.variable(ring, 1).times(Polynomial.variable(ring, 2)));
     SignProgram single = SignProgram.anywhere(frame, List.of(p));
-    single.enter(List.of(fraction(7, 5), fraction(0, 1)));
-    assertEquals(-1, single.sign(0));
-    single.enter(List.of(fraction(17, 12), fraction(0, 1)));
-    assertEquals(1, single.sign(0));
-    Grid grid = new Grid(List.of(Axis.values("y", List.of(fraction(0, 1))), near("x", 1, 2, 5)));
-    Frame turned = new Frame(List.of("y", "x"), Set.of(), Set.of(), root);
-    SignProgram line = SignProgram.along(turned, List.of(p), grid);
+    BigInteger x = BigInteger.ONE;
+    BigInteger y = BigInteger.ONE;
+    for (int k = 0; k < 200; k++) {
+      single.enter(List.of(BigFraction.of(x), BigFraction.of(y)));
+      assertEquals(k % 2 == 0 ? -1 : 1, single.sign(0));
+      BigInteger next = x.add(y.shiftLeft(1));
+      y = x.add(y);
+      x = next;
+    }
+    single.enter(List.of(BigFraction.ZERO, BigFraction.ZERO));
+    assertEquals(0, single.sign(0));
+    Grid grid = new Grid(List.copyOf(GridText.grid("x=-20:20:41,y=-15:15:31").values()));
+    SignProgram line = SignProgram.along(frame, List.of(p), grid);
     long[] at = new long[2];
-    List<Integer> signs = new ArrayList<>();
     for (long n = 0; n < grid.size(); n++) {
       grid.put(n, at);
       line.enter(at);
       line.move(at[1]);
-      signs.add(line.sign(0));
+      long squares = at[0] * at[0] - 2 * at[1] * at[1];
+      boolean opposite = Long.signum(at[0]) != Long.signum(at[1]);
+      int sign = opposite ? Long.signum(at[0] - at[1]) : Long.signum(squares) * Long.signum(at[0]);
+      assertEquals(sign, line.sign(0), at[0] + " - r*" + at[1]);
     }
-    assertEquals(List.of(-1, -1, -1, 1, 1), signs);
+  }
+
+  /** The numbers of a field. */
+  private record Field(NumberFieldTower tower) implements NumberSigns {
+    @Override
+    public int sign(Polynomial number) {
+      return tower.sign(number);
+    }
+
+    @Override
+    public OptionalDouble near(Polynomial number) {
+      return OptionalDouble.of(tower.near(number, 60).middle().doubleValue());
+    }
   }
 
   private static BigFraction fraction(long n, long d) {
