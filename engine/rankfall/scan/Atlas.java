@@ -101,8 +101,13 @@ public final class Atlas {
     }
   }
 
-  /** A region as it is looked up. */
-  private record Part(String name, List<Test> tests, Signature signature, String type) {}
+  /**
+   * A region as it is looked up.
+   *
+   * @param proved whether its type is that of all its points
+   */
+  private record Part(
+      String name, List<Test> tests, Signature signature, String type, boolean proved) {}
 
   /**
    * A stratum as it is looked up.
@@ -152,7 +157,8 @@ public final class Atlas {
         r.name(),
         r.conditions().stream().map(c -> test(c.polynomial(), c.comparison())).toList(),
         r.signature(),
-        r.type().map(AlgebraType::text).orElse(""));
+        r.type().map(AlgebraType::text).orElse(""),
+        r.type().map(AlgebraType::everywhere).orElse(false));
   }
 
   /** What the variables are. */
@@ -198,10 +204,10 @@ public final class Atlas {
         s.parts.stream().filter(p -> p.tests.stream().allMatch(t -> t.holdsWeakly(at))).toList();
     List<Part> inside = weak.stream().filter(p -> all(p.tests, at)).toList();
     String region = inside.size() == 1 ? inside.get(0).name : "";
-    String type = inside.size() == 1 ? inside.get(0).type : s.stratum.type().orElse("");
     boolean open = inside.size() == 1 && inside.get(0).tests.stream().allMatch(Test::isStrict);
     Optional<Signature> signature =
         complex ? Optional.empty() : signature(s, open ? inside : weak, at);
+    String type = inside.size() == 1 ? inside.get(0).type : between(s, weak, signature.isPresent());
     if (!complex && signature.isEmpty()) {
       return new Decision.Ask(
           s.stratum.name(),
@@ -221,6 +227,24 @@ public final class Atlas {
             region,
             type,
             false));
+  }
+
+  /**
+   * The algebra at a point in no region. Semisimple algebras are rigid (Nijenhuis and Richardson,
+   * Bull. Amer. Math. Soc. 73 (1967) 175): those near a point are isomorphic to the one there. So
+   * if regions are near and all that may be have one proved name, it is the name at the point.
+   * Other algebras are left without one. Over complex ground a stratum has its own.
+   *
+   * @param conclusive whether some region is near
+   */
+  private String between(Sheet s, List<Part> weak, boolean conclusive) {
+    if (complex) {
+      return s.stratum.type().orElse("");
+    }
+    boolean semisimple = s.stratum.dimension() > 0 && s.stratum.rank() == s.stratum.dimension();
+    boolean one = weak.stream().map(Part::type).distinct().count() == 1;
+    boolean proved = weak.stream().allMatch(Part::proved);
+    return conclusive && semisimple && one && proved ? weak.get(0).type : "";
   }
 
   /** The signature, where it follows from the regions near; see the description of the class. */

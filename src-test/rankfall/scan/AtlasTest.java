@@ -11,6 +11,7 @@ import java.util.Optional;
 import java.util.Set;
 import org.apache.commons.numbers.fraction.BigFraction;
 import org.junit.jupiter.api.Test;
+import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Comparison;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.SignCondition;
@@ -97,6 +98,37 @@ final class AtlasTest {
     assertEquals(HandMade.finding(2, 1).signature(), border.signature());
     assertTrue(border.direct());
     assertEquals(1, asked.size());
+  }
+
+  /**
+   * Between two regions of one semisimple algebra lies the same algebra (rigidity: Nijenhuis and
+   * Richardson 1967); between regions of the Euclidean plane, rank 1, nothing is concluded.
+   */
+  @Test
+  void aNameIsGivenBetweenRegionsOfOneSemisimpleAlgebraOnly() {
+    Region up = named("R1", Comparison.GREATER, 0, 3, "so(3)");
+    Region down = named("R2", Comparison.LESS, 0, 3, "so(3)");
+    Atlas semisimple = atlas(List.of(), List.of(whole()), List.of(up, down));
+    assertEquals("so(3)", at(semisimple, HandMade.finding(0, 3), 0, 1).type());
+    Region one = named("R1", Comparison.GREATER, 0, 1, "iso(2)");
+    Region other = named("R2", Comparison.LESS, 0, 1, "iso(2)");
+    Stratum planes = HandMade.stratum("S1", List.of(), List.of(), 1);
+    Atlas solvable = atlas(List.of(), List.of(planes), List.of(one, other));
+    assertEquals("", at(solvable, HandMade.finding(0, 1), 0, 1).type());
+    assertEquals("iso(2)", at(solvable, HandMade.finding(0, 1), 1, 1).type());
+    assertEquals(List.of(), asked);
+  }
+
+  private static Region named(String name, Comparison c, int plus, int minus, String type) {
+    Region r = HandMade.region("S1", name, List.of(is(A, c)), plus, minus);
+    return new Region(
+        r.stratum(),
+        r.name(),
+        r.conditions(),
+        r.signature(),
+        Optional.of(new AlgebraType(type, List.of(), true)),
+        true,
+        List.of());
   }
 
   /** a^2 + b^2 = 0 has one real point, at which it is no curve: regions near it say nothing. */
