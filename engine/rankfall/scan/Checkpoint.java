@@ -46,8 +46,8 @@ public final class Checkpoint implements Closeable {
     }
   }
 
-  /** A log belongs to another scan. */
-  public static final class Foreign extends IOException {
+  /** A log belongs to another scan; the message is for the user. */
+  public static final class Foreign extends IllegalArgumentException {
     private static final long serialVersionUID = 1L;
 
     Foreign(String message) {
@@ -108,7 +108,7 @@ public final class Checkpoint implements Closeable {
     return new Checkpoint(log, head(claim).length, ends, complete);
   }
 
-  private static void check(Path path, List<String> lines, Claim claim) throws Foreign {
+  private static void check(Path path, List<String> lines, Claim claim) {
     List<String> wanted = new ArrayList<>(List.of(TITLE));
     wanted.addAll(claim.lines);
     for (int k = 0; k < wanted.size(); k++) {

@@ -33,7 +33,7 @@ public record PointList(List<String> names, long size, String text, Rows rows) i
   /**
    * A point.
    *
-   * @param texts the values as given
+   * @param texts the values as given, one a name; empty where there is none
    * @param values exact, one a name; empty where the texts are no point
    */
   public record Row(List<String> texts, Optional<List<BigFraction>> values) {

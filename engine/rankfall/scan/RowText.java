@@ -18,6 +18,7 @@ final class RowText {
   private final List<List<Column>> pieces = new ArrayList<>();
   private final List<ValueText> texts = new ArrayList<>();
   private final CellText cells;
+  private final byte[] head;
   private final Bytes out = new Bytes();
   private byte[][][] known = new byte[16][][];
 
@@ -30,6 +31,7 @@ final class RowText {
    */
   RowText(Columns columns, List<Long> denominators, CellText cells) {
     this.cells = cells;
+    this.head = Bytes.of(cells.joined(columns.header()));
     for (Column c : columns.columns()) {
       List<Column> last = pieces.isEmpty() ? List.of() : pieces.get(pieces.size() - 1);
       if (c instanceof Fact && !last.isEmpty() && last.get(0) instanceof Fact) {
@@ -59,10 +61,20 @@ final class RowText {
       List<Column> piece = pieces.get(k);
       facts[k] =
           piece.get(0) instanceof Fact
-              ? Bytes.of(cells.joined(piece.stream().map(c -> ((Fact) c).cell(f)).toList()))
+              ? Bytes.of(joined(k, piece.stream().map(c -> ((Fact) c).cell(f)).toList()))
               : null;
     }
     return facts;
+  }
+
+  /** Cells of a piece; an empty cell is quoted only where a row begins with it. */
+  private String joined(int piece, List<String> texts) {
+    if (piece == 0) {
+      return cells.joined(texts);
+    }
+    List<String> behindAnother = new ArrayList<>(List.of("0"));
+    behindAnother.addAll(texts);
+    return cells.joined(behindAnother).substring(2);
   }
 
   /** The facts of a leaf, remembered. */
@@ -98,18 +110,19 @@ final class RowText {
       if (k > 0) {
         out.append(COMMA);
       }
-      out.append(facts[k] != null ? facts[k] : Bytes.of(value(row, pieces.get(k).get(0))));
+      out.append(facts[k] != null ? facts[k] : Bytes.of(value(row, k)));
     }
     out.append(END);
   }
 
-  private String value(PointList.Row row, Column c) {
+  private String value(PointList.Row row, int piece) {
+    Column c = pieces.get(piece).get(0);
     if (row.values().isPresent()) {
       BigFraction value = row.values().get().get(name(c));
       return c instanceof Value ? Rationals.text(value) : DecimalText.of(value);
     }
-    boolean given = c instanceof Value && name(c) < row.texts().size();
-    return given ? cells.joined(List.of(row.texts().get(name(c)))) : "";
+    String given = c instanceof Value ? row.texts().get(name(c)) : "";
+    return joined(piece, List.of(given));
   }
 
   /** What was written; it is forgotten. */
@@ -117,8 +130,9 @@ final class RowText {
     return out.take();
   }
 
-  /** The header row. */
-  static byte[] header(Columns columns, CellText cells) {
-    return Bytes.of(cells.joined(columns.header()) + "\r\n");
+  /** Writes the header row. */
+  void header() {
+    out.append(head);
+    out.append(END);
   }
 }

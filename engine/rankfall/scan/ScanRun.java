@@ -23,7 +23,7 @@ import java.util.zip.GZIPOutputStream;
  */
 public record ScanRun(ScanPlan plan, long from, long to, int threads) {
   /** How many points a block has; the last one may have fewer. */
-  public static final int BLOCK = 1 << 16;
+  public static final int BLOCK = 1 << 15;
 
   /** Takes what came out of the blocks, in their order, on the thread that runs the scan. */
   @FunctionalInterface
@@ -48,7 +48,9 @@ public record ScanRun(ScanPlan plan, long from, long to, int threads) {
    */
   public static Tally tally(ScanPlan plan) {
     Lattice lattice = (Lattice) plan.points();
-    return new ScanWorker(plan).work(new ScanBlock.Range(lattice, 0, lattice.size())).tally();
+    return new ScanWorker(plan)
+        .work(new ScanBlock.Range(lattice, 0, lattice.size()), false)
+        .tally();
   }
 
   /** How many blocks there are; the first points of all have one, were there none. */
@@ -110,24 +112,18 @@ public record ScanRun(ScanPlan plan, long from, long to, int threads) {
       throws IOException {
     ScanWorker known = idle.poll();
     ScanWorker worker = known == null ? new ScanWorker(plan) : known;
-    ScanPart part = worker.work(points);
+    ScanPart part = worker.work(points, withHeader);
     idle.add(worker);
-    if (plan.table().isEmpty()) {
-      return part;
+    boolean zipped = plan.table().map(ScanPlan.Table::zipped).orElse(false);
+    return zipped ? new ScanPart(zipped(part.rows()), part.tally()) : part;
+  }
+
+  private static byte[] zipped(byte[] rows) throws IOException {
+    ByteArrayOutputStream out = new ByteArrayOutputStream(rows.length / 4);
+    try (GZIPOutputStream zip = new GZIPOutputStream(out)) {
+      zip.write(rows);
     }
-    ScanPlan.Table table = plan.table().get();
-    byte[] head = withHeader ? RowText.header(table.columns(), table.cells()) : new byte[0];
-    ByteArrayOutputStream out = new ByteArrayOutputStream(head.length + part.rows().length);
-    if (table.zipped()) {
-      try (GZIPOutputStream zip = new GZIPOutputStream(out)) {
-        zip.write(head);
-        zip.write(part.rows());
-      }
-    } else {
-      out.write(head);
-      out.write(part.rows());
-    }
-    return new ScanPart(out.toByteArray(), part.tally());
+    return out.toByteArray();
   }
 
   private static ScanPart await(Future<ScanPart> part) throws IOException, InterruptedException {

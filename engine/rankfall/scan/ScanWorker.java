@@ -55,8 +55,15 @@ final class ScanWorker {
     text.row(at, known ? text.facts(leaf, f) : text.facts(f));
   }
 
-  /** Works through a block. */
-  ScanPart work(ScanBlock block) {
+  /**
+   * Works through a block.
+   *
+   * @param withHeader whether a table begins with it
+   */
+  ScanPart work(ScanBlock block, boolean withHeader) {
+    if (withHeader && rows.isPresent()) {
+      rows.get().header();
+    }
     if (block instanceof ScanBlock.Range range) {
       walk(range, rows.isPresent() ? this::write : (at, leaf, f) -> {});
     } else {
