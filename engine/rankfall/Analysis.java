@@ -447,8 +447,11 @@ public record Analysis(
    * @param rank of its Killing form
    * @param derived dimension of its derived algebra
    * @param centre dimension of its centre
+   * @param type its name, where it was looked for; at the witness of the stratum unless the
+   *     structure constants are numbers
    */
-  public record Contracted(List<StructureEntry> structure, int rank, int derived, int centre)
+  public record Contracted(
+      List<StructureEntry> structure, int rank, int derived, int centre, Optional<AlgebraType> type)
       implements ContractionOutcome {}
 
   /**

@@ -4,6 +4,7 @@ import java.util.ArrayList;
 import java.util.List;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.ContractionOutcome;
+import rankfall.Analysis.Stratum;
 import rankfall.Analysis.StructureEntry;
 import rankfall.exact.GroebnerBasis;
 import rankfall.lie.Family;
@@ -12,8 +13,14 @@ import rankfall.locus.Contraction.Entry;
 import rankfall.locus.Profile;
 import rankfall.locus.Strata;
 
-/** What the brackets of each component become where the generators lose their independence. */
-record ContractionFindings(Family family, Strata.Result strata, List<Component> components) {
+/**
+ * What the brackets of each component become where the generators lose their independence.
+ *
+ * @param strata as cut
+ * @param known what is known of them, in the same order
+ */
+record ContractionFindings(
+    Family family, Strata.Result strata, List<Stratum> known, List<Component> components) {
 
   List<Analysis.Contraction> all() {
     GroebnerBasis bases = new GroebnerBasis(family.ring().constants());
@@ -29,7 +36,7 @@ record ContractionFindings(Family family, Strata.Result strata, List<Component> 
                   FamilyFindings.name(k),
                   component.number(),
                   component.basis(),
-                  outcome(bases, component, upper, lower)));
+                  outcome(bases, component, upper, lower, known.get(k))));
         }
       }
     }
@@ -41,8 +48,12 @@ record ContractionFindings(Family family, Strata.Result strata, List<Component> 
         && upper.equations().stream().allMatch(lower.closure()::vanishes);
   }
 
-  private static ContractionOutcome outcome(
-      GroebnerBasis bases, Component component, Strata.Stratum upper, Strata.Stratum lower) {
+  private ContractionOutcome outcome(
+      GroebnerBasis bases,
+      Component component,
+      Strata.Stratum upper,
+      Strata.Stratum lower,
+      Stratum lowerKnown) {
     List<Entry> brackets =
         component.structure().stream()
             .map(s -> new Entry(s.left(), s.right(), s.target(), s.coefficient()))
@@ -57,7 +68,13 @@ record ContractionFindings(Family family, Strata.Result strata, List<Component> 
             lower.closure());
     if (o instanceof Contraction.Limit limit) {
       Profile p = limit.profile();
-      return new Analysis.Contracted(entries(limit.brackets()), p.rank(), p.derived(), p.centre());
+      return new Analysis.Contracted(
+          entries(limit.brackets()),
+          p.rank(),
+          p.derived(),
+          p.centre(),
+          new ContractedName(family.ring().complex(), component.basis().size(), limit.brackets())
+              .at(lowerKnown));
     }
     if (o instanceof Contraction.NoLimit none) {
       return new Analysis.WithoutLimit(entries(none.poles()));

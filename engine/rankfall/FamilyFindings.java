@@ -214,7 +214,8 @@ record FamilyFindings(Spec spec, Family family, Partition partition, Meter meter
   private List<Analysis.Contraction> contractions(
       List<Component> components, List<Analysis.Stratum> strata) {
     return spec.presentation() instanceof Spec.Matrices && !strata.isEmpty()
-        ? new ContractionFindings(family, partition.strata().orElseThrow(), components).all()
+        ? new ContractionFindings(family, partition.strata().orElseThrow(), strata, components)
+            .all()
         : List.of();
   }
 

@@ -52,6 +52,10 @@ class ContractionsTest {
     return c.basis().size() + " " + limit.rank() + " " + limit.derived() + " " + limit.centre();
   }
 
+  private static String type(Contraction c) {
+    return assertInstanceOf(Contracted.class, c.outcome()).type().orElseThrow().name();
+  }
+
   private static List<String> terms(Contraction c) {
     return c.outcome().structure().stream().map(s -> term(c, s)).toList();
   }
@@ -78,6 +82,8 @@ class ContractionsTest {
     assertEquals(0, stratum(f, into(f, 2)).derived());
     assertEquals("3 0 1 1", profile(into(f, 2)));
     assertEquals("3 0 0 3", profile(into(f, 0)));
+    assertEquals("h3", type(into(f, 2)));
+    assertEquals("R^3", type(into(f, 0)));
     assertEquals(2, f.contractions().size());
   }
 

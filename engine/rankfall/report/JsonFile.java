@@ -164,6 +164,10 @@ final class JsonFile {
     } else {
       out.putNull("rank").putNull("derived").putNull("centre");
     }
+    optional(
+        out,
+        "type",
+        c.outcome() instanceof Contracted x ? x.type().map(AlgebraType::text) : Optional.empty());
     out.set("basis", texts(c.basis()));
     out.set("structure", structure(c.outcome().structure(), c.basis()));
   }

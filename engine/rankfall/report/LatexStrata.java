@@ -130,6 +130,9 @@ record LatexStrata(Formulas formulas) {
   /** At least one. */
   private List<String> lines(Contraction c) {
     List<String> out = new ArrayList<>();
+    if (c.outcome() instanceof Contracted x && x.type().isPresent()) {
+      out.add(TypeText.latex(x.type().get().text()));
+    }
     String lead = Words.outcomeLead(c.outcome());
     if (!lead.isEmpty()) {
       out.add(LatexText.escape(lead));

@@ -161,7 +161,10 @@ final class MapKey {
         .findFirst();
   }
 
-  /** What a place is, in words: signature and type of a region, else rank and class. */
+  /**
+   * What a place is, in words: signature and type of a region, else rank and class; names of
+   * algebras as they travel.
+   */
   String words(Place p) {
     if (p.kind() == Kind.OUTSIDE) {
       return "outside the conditions of the spec";
@@ -172,13 +175,13 @@ final class MapKey {
     List<String> out = new ArrayList<>();
     Optional<Region> region = region(p);
     region.ifPresent(r -> out.add("signature " + Words.signature(r.signature())));
-    region.flatMap(Region::type).map(AlgebraType::text).map(TypeText::signs).ifPresent(out::add);
+    region.flatMap(Region::type).map(AlgebraType::text).ifPresent(out::add);
     if (region.isEmpty()) {
       stratum(p)
           .ifPresent(
               s -> {
                 out.add("rank " + s.rank() + " of " + s.dimension());
-                out.add(s.type().map(TypeText::signs).orElse(s.kind()));
+                out.add(s.type().orElse(s.kind()));
               });
     }
     return String.join(", ", out);

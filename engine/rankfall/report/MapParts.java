@@ -104,7 +104,7 @@ final class MapParts {
         border ? "boundary in " + key.name(p) : key.name(p),
         key.target(p),
         where,
-        new SafeString(border ? "" : Markup.escape(key.words(p))));
+        new SafeString(border ? "" : TypeText.html(key.words(p))));
   }
 
   private List<Formula> where(RegionMap map, Place p, String sort) {

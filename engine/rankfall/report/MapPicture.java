@@ -114,7 +114,7 @@ final class MapPicture {
   }
 
   private String titled(Place p) {
-    return key.name(p) + ": " + key.words(p);
+    return key.name(p) + ": " + TypeText.signs(key.words(p));
   }
 
   private String title(Place p) {

@@ -188,6 +188,8 @@ final class PageParts {
         limit.map(x -> Integer.toString(x.rank())).orElse("\u2013"),
         limit.map(x -> Integer.toString(x.derived())).orElse("\u2013"),
         limit.map(x -> Integer.toString(x.centre())).orElse("\u2013"),
+        limit.flatMap(Contracted::type).map(t -> new SafeString(TypeText.html(t.text()))).stream()
+            .toList(),
         Words.outcomeLead(c.outcome()),
         FamilyNames.followed(c, formulas).stream().map(PageParts::math).toList());
   }

@@ -150,6 +150,7 @@ record PageView(
       String rank,
       String derived,
       String centre,
+      List<SafeString> type,
       String lead,
       List<SafeString> brackets) {}
 

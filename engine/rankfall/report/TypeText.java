@@ -2,6 +2,7 @@ package rankfall.report;
 
 import java.util.regex.Matcher;
 import java.util.regex.Pattern;
+import java.util.stream.Collectors;
 
 /**
  * The name of an algebra as it is set. Names travel as plain text, such as {@code so(3,1) |x R^4}
@@ -12,6 +13,12 @@ final class TypeText {
   private static final Pattern RAISED =
       Pattern.compile("([\\^_])(?:\\{([^{}]*)\\}|(-?[\\p{L}\\p{N}]+(?:,\\p{N}+)*))");
 
+  private static final String PLAIN = "0123456789-,h";
+  private static final String SUPERSCRIPTS =
+      "\u2070\u00b9\u00b2\u00b3\u2074\u2075\u2076\u2077\u2078\u2079\u207b,\u02b0";
+  private static final String SUBSCRIPTS =
+      "\u2080\u2081\u2082\u2083\u2084\u2085\u2086\u2087\u2088\u2089\u208b,\u2095";
+
   private TypeText() {}
 
   /** Markup of a page. */
@@ -21,9 +28,28 @@ final class TypeText {
         .replace(" (+) ", " \u2295 ");
   }
 
-  /** Plain text with the signs of the trade, for titles and pictures. */
+  /**
+   * Plain text with the signs of the trade, for titles and pictures: what Unicode can raise or
+   * lower is, the rest stays as it is.
+   */
   static String signs(String name) {
-    return name.replace(" |x ", " \u22c9 ").replace(" (+) ", " \u2295 ");
+    Matcher m = RAISED.matcher(name.replace(" |x ", " \u22c9 ").replace(" (+) ", " \u2295 "));
+    StringBuilder out = new StringBuilder();
+    while (m.find()) {
+      String inner = m.group(2) != null ? m.group(2) : m.group(3);
+      String signs = m.group(1).equals("^") ? SUPERSCRIPTS : SUBSCRIPTS;
+      boolean known = inner.chars().allMatch(c -> PLAIN.indexOf(c) >= 0);
+      m.appendReplacement(
+          out,
+          Matcher.quoteReplacement(
+              known
+                  ? inner
+                      .chars()
+                      .mapToObj(c -> signs.substring(PLAIN.indexOf(c), PLAIN.indexOf(c) + 1))
+                      .collect(Collectors.joining())
+                  : m.group()));
+    }
+    return m.appendTail(out).toString();
   }
 
   /** LaTeX for running text; it needs no further package. */

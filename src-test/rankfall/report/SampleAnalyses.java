@@ -327,7 +327,12 @@ final class SampleAnalyses {
             "S2",
             1,
             basis,
-            new Contracted(List.of(new StructureEntry(0, 1, 2, RationalFunction.of(a))), 0, 1, 1)),
+            new Contracted(
+                List.of(new StructureEntry(0, 1, 2, RationalFunction.of(a))),
+                0,
+                1,
+                1,
+                Optional.of(new AlgebraType("h3", List.of("Bianchi II"), true)))),
         new Contraction(
             "S3", 1, basis, new WithoutLimit(List.of(new StructureEntry(0, 1, 2, inverse)))),
         new Contraction(
