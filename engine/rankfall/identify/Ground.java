@@ -93,7 +93,7 @@ record Ground<E>(
       Ground<BigInteger> ground =
           new Ground<>(
               new Integers(),
-              chain,
+              Chain.free(chain.variables()),
               algebra.signs().map(s -> BigInteger::signum),
               c -> Polynomial.constant(chain.variables(), c),
               Polynomial::constantValue,
@@ -101,18 +101,22 @@ record Ground<E>(
               Ground::integers);
       return question.ask(ground, integral.get());
     }
-    boolean monic = chain.rules().stream().allMatch(r -> r.initial().isOne());
-    Ground<Polynomial> ground =
-        new Ground<>(
-            new NumberField(chain),
-            chain,
-            algebra.signs(),
-            Function.identity(),
-            Function.identity(),
-            monic ? chain::reduced : UnaryOperator.identity(),
-            (above, below) -> polynomials(chain, above, below));
+    Ground<Polynomial> ground = of(chain, algebra.signs());
     StructureConstants<Polynomial> c = algebra.constants();
     return question.ask(ground, plain(ground.domain, c.dimension(), c.brackets()));
+  }
+
+  /** The numbers of a chain. */
+  static Ground<Polynomial> of(Chain chain, Optional<SignRule<Polynomial>> signs) {
+    boolean monic = chain.rules().stream().allMatch(r -> r.initial().isOne());
+    return new Ground<>(
+        new NumberField(chain),
+        chain,
+        signs,
+        Function.identity(),
+        Function.identity(),
+        monic ? chain::reduced : UnaryOperator.identity(),
+        (above, below) -> polynomials(chain, above, below));
   }
 
   /** The constants C over the chain; denominator and scale become 1. */

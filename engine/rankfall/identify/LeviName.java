@@ -8,7 +8,6 @@ import java.util.function.Function;
 import rankfall.lie.AlgebraFacts;
 import rankfall.lie.Ideals;
 import rankfall.lie.LieBracket;
-import rankfall.lie.PlainKilling;
 import rankfall.lie.StructureConstants;
 import rankfall.lie.Subspace;
 
@@ -206,18 +205,8 @@ record LeviName<E>(Ground<E> ground, Function<ExactAlgebra, Optional<TypeName>> 
   /** Algebra and module by summands, where all of them have names. */
   private Optional<List<ModuleName>> modules(
       Levi<E> levi, LieBracket<E> bracket, Subspace<E> ideal) {
-    List<SimpleIdeals.Part<E>> parts = SimpleIdeals.parts(ground, levi.constants());
     Action<E> action = Action.of(ground, bracket, levi.representatives(), ideal.basis());
-    Optional<ModuleParts> module =
-        ModuleParts.of(ground, PlainKilling.of(levi.constants()), levi.scale(), parts, action);
-    if (module.isEmpty()) {
-      return Optional.empty();
-    }
-    List<ModuleName> out = new ArrayList<>();
-    for (ModuleParts.Summand s : module.get().summands()) {
-      ModuleName.of(s.ideals().stream().map(parts::get).toList(), s.module()).ifPresent(out::add);
-    }
-    return out.size() == module.get().summands().size() ? Optional.of(out) : Optional.empty();
+    return new LeviModule<>(ground, levi.constants(), levi.scale(), action).names();
   }
 
   private Optional<ModuleName> module(Levi<E> levi, LieBracket<E> bracket, Subspace<E> ideal) {

@@ -38,11 +38,17 @@ final class SimpleIdeals {
    *
    * @param basis sparse vectors
    * @param ideals what it is over the real or complex numbers; all of one complex type
+   * @param splitting an irreducible polynomial of degree 2 or more, the constant coefficient first,
+   *     such that over the field with one of its roots, a real one over an ordered field, it is no
+   *     longer simple; empty where there is one ideal, and where all of several are complex ones
+   *     taken over the real numbers
    */
-  record Part<E>(List<SortedMap<Integer, E>> basis, List<SimpleIdeal> ideals) {
+  record Part<E>(
+      List<SortedMap<Integer, E>> basis, List<SimpleIdeal> ideals, Optional<List<E>> splitting) {
     Part {
       basis = List.copyOf(basis);
       ideals = List.copyOf(ideals);
+      splitting = splitting.map(List::copyOf);
     }
   }
 
@@ -118,7 +124,8 @@ final class SimpleIdeals {
                 .map(m -> new TypeByTraces.Sample(m, random -> Optional.of(m.element(random)))));
     return new Part<>(
         Subspace.whole(ground.domain(), n).basis(),
-        List.of(new SimpleIdeal(kind, n, type, character)));
+        List.of(new SimpleIdeal(kind, n, type, character)),
+        Optional.empty());
   }
 
   private static <E> OptionalInt character(Ground<E> ground, List<List<E>> form) {
@@ -149,7 +156,7 @@ final class SimpleIdeals {
       for (int k = 0; k < degree; k++) {
         out.add(new SimpleIdeal(SimpleIdeal.Kind.COMPLEX, dimension, type, OptionalInt.empty()));
       }
-      return new Part<>(basis, out);
+      return new Part<>(basis, out, Optional.of(factor).filter(f -> degree > 1));
     }
     List<Integer> characters = characters(ground, kappa, phi, factor, basis);
     for (int c : characters) {
@@ -160,7 +167,8 @@ final class SimpleIdeals {
           new SimpleIdeal(
               SimpleIdeal.Kind.COMPLEX_AS_REAL, 2 * dimension, type, OptionalInt.of(0)));
     }
-    return new Part<>(basis, out);
+    boolean split = degree > 1 && !characters.isEmpty();
+    return new Part<>(basis, out, Optional.of(factor).filter(f -> split));
   }
 
   /** The characters of the real ideals, in the order of the real roots of the factor. */

@@ -33,21 +33,55 @@ final class SturmSequence<E> {
    *     that no rational number is a root
    */
   static <E> SturmSequence<E> of(Ground<E> ground, List<E> coefficients) {
+    return of(ground, coefficients, derivative(ground, coefficients));
+  }
+
+  /**
+   * The number of real roots in an interval at which another polynomial is positive, minus that of
+   * those at which it is negative.
+   *
+   * @param coefficients the constant one first; irreducible over the field, of degree 2 or more
+   * @param other coefficients of the other, the constant one first, not all 0
+   * @param low below
+   * @param high above
+   */
+  static <E> int weighted(
+      Ground<E> ground, List<E> coefficients, List<E> other, BigFraction low, BigFraction high) {
+    List<E> derivative = derivative(ground, coefficients);
+    List<E> product = new ArrayList<>();
+    for (int k = 0; k < derivative.size() + other.size() - 1; k++) {
+      E sum = ground.domain().zero();
+      for (int i = Math.max(0, k - other.size() + 1);
+          i <= Math.min(k, derivative.size() - 1);
+          i++) {
+        sum = ground.domain().plus(sum, ground.domain().times(derivative.get(i), other.get(k - i)));
+      }
+      product.add(sum);
+    }
+    SturmSequence<E> queries = of(ground, coefficients, product);
+    return queries.below(high) - queries.below(low);
+  }
+
+  private static <E> SturmSequence<E> of(Ground<E> ground, List<E> coefficients, List<E> second) {
     SturmSequence<E> out =
         new SturmSequence<>(ground, ground.signs().orElseThrow(), new ArrayList<>());
-    List<E> derivative = new ArrayList<>();
-    for (int k = 1; k < coefficients.size(); k++) {
-      E factor = ground.integer(BigInteger.valueOf(k));
-      derivative.add(ground.domain().times(factor, coefficients.get(k)));
-    }
     out.sequence.add(out.normal(coefficients));
-    List<E> next = out.normal(derivative);
+    List<E> next = out.normal(second);
     while (!next.isEmpty()) {
       out.sequence.add(next);
       int last = out.sequence.size() - 1;
       next = out.negativeRemainder(out.sequence.get(last - 1), out.sequence.get(last));
     }
     return out;
+  }
+
+  private static <E> List<E> derivative(Ground<E> ground, List<E> coefficients) {
+    List<E> derivative = new ArrayList<>();
+    for (int k = 1; k < coefficients.size(); k++) {
+      E factor = ground.integer(BigInteger.valueOf(k));
+      derivative.add(ground.domain().times(factor, coefficients.get(k)));
+    }
+    return derivative;
   }
 
   /** A positive multiple in normal form, without zeros at the end. */
@@ -129,15 +163,22 @@ final class SturmSequence<E> {
    */
   List<BigFraction> separators() {
     int roots = count();
-    BigFraction bound = BigFraction.ONE;
-    while (below(bound) - below(bound.negate()) < roots) {
-      bound = bound.multiply(2);
-    }
+    BigFraction bound = bound();
     List<BigFraction> out = new ArrayList<>();
     for (int k = 1; k < roots; k++) {
       out.add(after(k, bound.negate(), bound));
     }
     return out;
+  }
+
+  /** A number such that all real roots lie between it and its negative. */
+  BigFraction bound() {
+    int roots = count();
+    BigFraction bound = BigFraction.ONE;
+    while (below(bound) - below(bound.negate()) < roots) {
+      bound = bound.multiply(2);
+    }
+    return bound;
   }
 
   /** A number with exactly k roots below it, by bisection. */
