@@ -175,17 +175,27 @@ public record Chain(Variables variables, List<Rule> rules) implements Domain<Pol
 
   @Override
   public Normal<Polynomial> normal(List<Polynomial> row) {
+    return normal(row, List.of());
+  }
+
+  /**
+   * A row in normal form, found faster where the common factor is a product of known ones.
+   *
+   * @param row any entries
+   * @param expected primitive factors that are likely; the answer is the same without them
+   */
+  public Normal<Polynomial> normal(List<Polynomial> row, List<Polynomial> expected) {
     List<Polynomial> entries = reduced(row);
-    Polynomial content = commonFactor(entries);
+    Polynomial content = commonFactor(entries, expected);
     if (content.isZero() || content.isOne()) {
       return new Normal<>(entries, one());
     }
     return new Normal<>(entries.stream().map(p -> p.over(content)).toList(), content);
   }
 
-  private Polynomial commonFactor(List<Polynomial> entries) {
+  private Polynomial commonFactor(List<Polynomial> entries, List<Polynomial> expected) {
     List<Polynomial> some = entries.stream().filter(p -> !p.isZero()).toList();
-    return some.isEmpty() ? zero() : CommonFactor.of(some);
+    return some.isEmpty() ? zero() : CommonFactor.of(some, expected);
   }
 
   @Override

@@ -6,6 +6,7 @@ import java.math.BigInteger;
 import java.util.ArrayList;
 import java.util.Comparator;
 import java.util.List;
+import java.util.Optional;
 
 /**
  * A common factor of several polynomials: mostly the greatest one, found or ruled out cheaply.
@@ -26,6 +27,17 @@ final class CommonFactor {
    * @return divides all of them; leading coefficient positive
    */
   static Polynomial of(List<Polynomial> polynomials) {
+    return of(polynomials, List.of());
+  }
+
+  /**
+   * A common factor, some being expected: a division is cheaper than a search.
+   *
+   * @param polynomials none 0, at least one
+   * @param expected factors that are likely, primitive; the answer is the same without them
+   * @return divides all of the polynomials; leading coefficient positive
+   */
+  static Polynomial of(List<Polynomial> polynomials, List<Polynomial> expected) {
     Polynomial monomial = monomial(polynomials);
     List<Polynomial> rest = new ArrayList<>();
     for (Polynomial p : polynomials) {
@@ -39,16 +51,47 @@ final class CommonFactor {
     if (rest.get(0).termCount() == 1 || !mayShareFactor(rest)) {
       return monomial;
     }
+    Polynomial taken = monomial;
+    for (Polynomial e : expected) {
+      for (var q = quotients(rest, e); q.isPresent(); q = quotients(rest, e)) {
+        rest = q.get();
+        taken = taken.times(e);
+        if (rest.stream().anyMatch(p -> p.termCount() == 1) || !mayShareFactor(rest)) {
+          return taken;
+        }
+      }
+    }
+    return taken.times(searched(rest));
+  }
+
+  /** All polynomials over one; empty if it does not divide them all. */
+  private static Optional<List<Polynomial>> quotients(List<Polynomial> all, Polynomial by) {
+    List<Integer> support = by.support();
+    if (by.termCount() == 1 || all.stream().anyMatch(p -> !p.support().containsAll(support))) {
+      return Optional.empty();
+    }
+    List<Polynomial> out = new ArrayList<>();
+    for (Polynomial p : all) {
+      Optional<Polynomial> q = p.dividedBy(by);
+      if (q.isEmpty()) {
+        return Optional.empty();
+      }
+      out.add(q.get());
+    }
+    return Optional.of(out);
+  }
+
+  private static Polynomial searched(List<Polynomial> rest) {
     Polynomial g = rest.get(0);
     for (Polynomial p : rest) {
       if (p.dividedBy(g).isEmpty()) {
         g = g.gcd(p);
       }
       if (g.isConstant()) {
-        return monomial;
+        return Polynomial.one(g.variables());
       }
     }
-    return monomial.times(g);
+    return g;
   }
 
   private static Polynomial monomial(List<Polynomial> polynomials) {

@@ -9,7 +9,6 @@ import rankfall.exact.Domain;
  *
  * @param dimension n, 0 or more
  * @param killing the Killing matrix of the constants C, exact values, not in normal form
- * @param killingKernel the kernel of the Killing form, an ideal
  * @param derivedSeries the derived series
  * @param lowerCentralSeries the lower central series
  * @param derived [g, g]
@@ -22,7 +21,6 @@ import rankfall.exact.Domain;
 public record AlgebraFacts<E>(
     int dimension,
     List<List<E>> killing,
-    Subspace<E> killingKernel,
     Series<E> derivedSeries,
     Series<E> lowerCentralSeries,
     Subspace<E> derived,
@@ -38,17 +36,14 @@ public record AlgebraFacts<E>(
 
   /** The facts of an algebra over a ring of characteristic 0. */
   public static <E> AlgebraFacts<E> of(LieBracket<E> bracket) {
-    Domain<E> domain = bracket.domain();
-    int n = bracket.dimension();
     List<List<E>> kappa = PlainKilling.of(bracket);
     Series<E> derivedSeries = Series.derived(bracket);
     Subspace<E> derived =
         derivedSeries.terms().size() > 1 ? derivedSeries.terms().get(1) : derivedSeries.next();
     Subspace<E> radical = Ideals.radical(bracket, kappa, derived);
     return new AlgebraFacts<>(
-        n,
+        bracket.dimension(),
         kappa,
-        Subspace.kernel(domain, n, new Vectors<>(domain).rows(kappa)),
         derivedSeries,
         Series.lowerCentral(bracket),
         derived,
@@ -72,9 +67,15 @@ public record AlgebraFacts<E>(
     return true;
   }
 
-  /** The rank of the Killing form. */
+  /** The kernel of the Killing form, an ideal; worked out at each call. */
+  public Subspace<E> killingKernel() {
+    Domain<E> domain = radical.domain();
+    return Subspace.kernel(domain, dimension, new Vectors<>(domain).rows(killing));
+  }
+
+  /** The rank of the Killing form; worked out at each call. */
   public int killingRank() {
-    return dimension - killingKernel.dimension();
+    return dimension - killingKernel().dimension();
   }
 
   /** Whether all brackets are 0. */
@@ -92,9 +93,9 @@ public record AlgebraFacts<E>(
     return radical.dimension() == dimension;
   }
 
-  /** Whether the Killing form is non-degenerate and n positive (Cartan's criterion). */
+  /** Whether the radical is 0 and n positive. */
   public boolean semisimple() {
-    return dimension > 0 && killingKernel.dimension() == 0;
+    return dimension > 0 && radical.dimension() == 0;
   }
 
   /** Whether the radical is the centre. */

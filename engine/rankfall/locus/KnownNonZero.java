@@ -63,7 +63,7 @@ public record KnownNonZero(Chain chain, List<Polynomial> nonZero) implements Dom
 
   @Override
   public Normal<Polynomial> normal(List<Polynomial> row) {
-    return chain.normal(row);
+    return chain.normal(row, nonZero);
   }
 
   @Override
