@@ -12,7 +12,6 @@ import rankfall.identify.ExactAlgebra;
 import rankfall.identify.TypeLoci;
 import rankfall.identify.TypeName;
 import rankfall.lie.Family;
-import rankfall.lie.StructureConstants;
 import rankfall.locus.Cell;
 import rankfall.locus.Cells;
 import rankfall.locus.Meter;
@@ -31,7 +30,7 @@ final class NamedPart {
   private final TypeLoci.Locus locus;
   private final Cells cells;
   private final Meter meter;
-  private final Map<StructureConstants<?>, Optional<TypeName>> known = new HashMap<>();
+  private final Map<List<Object>, Optional<TypeName>> known = new HashMap<>();
 
   private NamedPart(
       Family family, Strata.Stratum points, TypeLoci.Locus locus, Cells cells, Meter meter) {
@@ -99,7 +98,12 @@ final class NamedPart {
   private Optional<TypeName> name(Cell cell) {
     meter.check();
     return known.computeIfAbsent(
-        cell.algebra().constants(),
-        c -> AlgebraNames.of(ExactAlgebra.of(cell.algebra())).map(locus::onCell));
+        key(cell), c -> AlgebraNames.of(ExactAlgebra.of(cell.algebra())).map(locus::onCell));
+  }
+
+  /** The same constants at conjugate points are different real algebras. */
+  private static List<Object> key(Cell cell) {
+    boolean rational = cell.point().rationalCoordinates().isPresent();
+    return List.of(cell.algebra().constants(), rational ? "" : cell.point().toString());
   }
 }

@@ -7,12 +7,14 @@ import java.io.IOException;
 import java.nio.file.Files;
 import java.nio.file.Path;
 import java.time.Duration;
+import java.util.List;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.ValueSource;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.Status;
+import rankfall.Analysis.Stratum;
 import rankfall.spec.Spec;
 import rankfall.spec.SpecException;
 import rankfall.spec.SpecReader;
@@ -37,7 +39,7 @@ class EngineBudgetTest {
       assertTrue(part.message().contains("more than " + branches + " branches"), part.message());
       some.components()
           .forEach(c -> assertTrue(all.components().stream().anyMatch(d -> isPart(c, d))));
-      assertTrue(some.strata().isEmpty() || some.strata().equals(all.strata()));
+      assertTrue(some.strata().isEmpty() || areParts(some.strata(), all.strata()));
       assertTrue(all.coverings().containsAll(some.coverings()));
       assertEquals(all.poles(), some.poles());
       branches += 1 + branches / 3;
@@ -68,5 +70,39 @@ class EngineBudgetTest {
         && c.rank().equals(d.rank())
         && c.kernel().size() == d.kernel().size()
         && c.realPoints() == d.realPoints();
+  }
+
+  /** The same strata, of which names and invariant forms may be missing. */
+  private static boolean areParts(List<Stratum> some, List<Stratum> all) {
+    if (some.size() != all.size()) {
+      return false;
+    }
+    for (int k = 0; k < some.size(); k++) {
+      if (!bare(some.get(k)).equals(bare(all.get(k)))
+          || some.get(k).type().isPresent() && !some.get(k).type().equals(all.get(k).type())) {
+        return false;
+      }
+    }
+    return true;
+  }
+
+  private static List<Object> bare(Stratum s) {
+    return List.of(
+        s.name(),
+        s.equations(),
+        s.exclusions(),
+        s.codimension(),
+        s.dimension(),
+        s.rank(),
+        s.derived(),
+        s.centre(),
+        s.radical(),
+        s.nilradical(),
+        s.kind(),
+        s.realPoints(),
+        s.witness(),
+        s.basis(),
+        s.kernel(),
+        s.remarks());
   }
 }

@@ -54,9 +54,28 @@ public record ExactAlgebra(
   public static ExactAlgebra of(PointAlgebra<?> algebra) {
     if (algebra.constants().domain() instanceof Chain chain) {
       PointAlgebra<Polynomial> a = (PointAlgebra<Polynomial>) algebra;
-      return real(chain, a.constants(), a.signs());
+      Chain positive = positive(chain, a.signs());
+      StructureConstants<Polynomial> c = a.constants();
+      return real(
+          positive,
+          new StructureConstants<>(
+              positive, c.dimension(), c.brackets(), positive.one(), c.scale()),
+          a.signs());
     }
     return real(((PointAlgebra<BigInteger>) algebra).constants());
+  }
+
+  /** The same field, with rules whose initials are positive: reduction keeps signs then. */
+  private static Chain positive(Chain chain, SignRule<Polynomial> signs) {
+    return new Chain(
+        chain.variables(),
+        chain.rules().stream()
+            .map(
+                r ->
+                    signs.signum(r.initial()) < 0
+                        ? new Chain.Rule(r.variable(), r.equation().negate())
+                        : r)
+            .toList());
   }
 
   private static final Chain RATIONAL = Chain.free(new Variables(List.of()));

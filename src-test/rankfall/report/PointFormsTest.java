@@ -30,7 +30,7 @@ final class PointFormsTest {
             + " 0, \"nilradical\": 0, \"unimodular\": true, \"invariantForms\": {\"dimension\": 1,"
             + " \"maximalRank\": 3}, \"abelian\": false, \"nilpotent\": false, \"solvable\":"
             + " false, \"semisimple\": true, \"reductive\": true, \"compact\": false,"
-            + " \"stratum\": null, \"type\": null}\n",
+            + " \"stratum\": null, \"type\": \"sl(2,R)\"}\n",
         text(new PointJson(), PointSpecs.ROTOR, "b=-3/2 a=1"));
   }
 
@@ -97,7 +97,7 @@ final class PointFormsTest {
         csv.head());
     assertEquals(
         "0,1,3,3,true,1,0,1,2,0,3; 2; 0,3; 2,0,3,2,true,1,1,"
-            + "false,false,true,false,false,false,,,\r\n",
+            + "false,false,true,false,false,false,,Bianchi VII_0,\r\n",
         text(csv, PointSpecs.ROTOR, "a=0 b=1"));
     String bad = text(new PointCsv(List.of("c", "d")), PointSpecs.OPEN, "c=1 d=1");
     assertEquals(
@@ -123,6 +123,8 @@ final class PointFormsTest {
           nilradical            0
           invariant forms       1, the greatest rank 3
           properties            semisimple, reductive, unimodular
+          type                  sl(2,R)
+          also called           so(2,1), su(1,1), sp(2,R), Bianchi VIII, A_{3,8}
 
         """,
         text(new PointText(), PointSpecs.ROTOR, "a=1 b=-3/2"));

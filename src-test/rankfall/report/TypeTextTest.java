@@ -26,6 +26,6 @@ class TypeTextTest {
 
   @Test
   void picturesGetSigns() {
-    assertEquals("so(3) \u22c9 R^3", TypeText.signs("so(3) |x R^3"));
+    assertEquals("so(3) \u22c9 R\u00b3", TypeText.signs("so(3) |x R^3"));
   }
 }
