@@ -137,15 +137,35 @@ final class NumberFieldFactoring {
     return out;
   }
 
-  /** The library leaves a power of one variable as it is. */
-  private static void addPowers(List<Factor> out, Polynomial base, int exponent) {
+  /** The library leaves some powers as they are, a^2 and (a - 2*b)^2 over b^2 + 1 among them. */
+  private void addPowers(List<Factor> out, Polynomial base, int exponent) {
     if (base.termCount() == 1) {
       for (int v : base.support()) {
         out.add(new Factor(Polynomial.variable(base.variables(), v), exponent * base.degree(v)));
       }
-    } else {
-      out.add(new Factor(base, exponent));
+      return;
     }
+    List<Integer> numbers = rules.stream().map(Chain.Rule::variable).toList();
+    int x = base.support().stream().filter(v -> !numbers.contains(v)).findFirst().orElseThrow();
+    Chain chain = new Chain(variables, rules);
+    Polynomial repeated = ChainGcd.of(chain, base, base.derivative(x), x);
+    if (!repeated.contains(x)) {
+      out.add(new Factor(base, exponent));
+      return;
+    }
+    for (Factor f : factors(ChainGcd.quotient(chain, base, repeated, x))) {
+      out.add(new Factor(f.base(), exponent * multiplicity(chain, base, f.base(), x)));
+    }
+  }
+
+  private static int multiplicity(Chain chain, Polynomial base, Polynomial factor, int x) {
+    Polynomial rest = base;
+    int out = 0;
+    while (rest.contains(x) && ChainGcd.of(chain, rest, factor, x).degree(x) == factor.degree(x)) {
+      rest = ChainGcd.quotient(chain, rest, factor, x);
+      out++;
+    }
+    return out;
   }
 
   /** f with coefficients in the simple extension. */

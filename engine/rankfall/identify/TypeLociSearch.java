@@ -14,7 +14,6 @@ import rankfall.exact.Chain;
 import rankfall.exact.Factoring;
 import rankfall.exact.Factorization;
 import rankfall.exact.Polynomial;
-import rankfall.exact.RealZeros;
 import rankfall.lie.LieBracket;
 import rankfall.lie.StructureConstants;
 import rankfall.locus.BranchAlgebra;
@@ -91,22 +90,8 @@ final class TypeLociSearch {
           .computeIfAbsent(f.text(), t -> new ArrayList<>())
           .add(new Leaf.Defined(task.piece(), stratum.profile(), algebra));
       found.putIfAbsent(chain, f);
-      cutter.cut(task.piece(), f.assumed()).cut().stream()
-          .filter(TypeLociSearch::mayBeReal)
-          .forEach(q -> open.add(new Task(q, algebra)));
+      cutter.cut(task.piece(), f.assumed()).cut().forEach(q -> open.add(new Task(q, algebra)));
     }
-  }
-
-  /** Names are those of real algebras, so sets without real points are left out. */
-  private static boolean mayBeReal(Piece piece) {
-    Chain chain = piece.chain();
-    return chain.tower().isEmpty()
-        || RealZeros.exist(
-                    chain.variables(),
-                    chain.rules().stream().map(Chain.Rule::equation).toList(),
-                    List.of())
-                .verdict()
-            != RealZeros.Verdict.NO;
   }
 
   private Found facts(Piece piece, BranchAlgebra algebra) {

@@ -67,4 +67,28 @@ class PowersAndFactorsTest {
     }
     assertTrue(g.dividedBy(shared.primitive()).isPresent() || shared.isConstant());
   }
+
+  /**
+   * Powers over the numbers of c^2 + 1 and c^2 - 2, also such as show only modulo the equation: (a
+   * - 2*c)^2 is a^2 - 4*a*c - 4 over c^2 + 1. Factors multiply back, none is a factor twice.
+   */
+  @ParameterizedTest
+  @MethodSource("seeds")
+  void powersOverAlgebraicNumbersAreFound(long seed) {
+    Random random = new Random(seed);
+    Variables ring = new Variables(List.of("a", "b", "c"));
+    Polynomial a = Polynomial.variable(ring, 0);
+    Polynomial c = Polynomial.variable(ring, 2);
+    Polynomial number = c.pow(2).plus(Polynomial.constant(ring, random.nextBoolean() ? 1 : -2));
+    Chain chain = new Chain(ring, List.of(new Chain.Rule(2, number)));
+    Polynomial base = a.plus(c.times(java.math.BigInteger.valueOf(1 + random.nextInt(5))));
+    Polynomial other = Polynomial.variable(ring, 1).plus(c).plus(a.pow(random.nextInt(2)));
+    int k = 2 + random.nextInt(3);
+    Polynomial power = chain.reduced(random.nextBoolean() ? base.pow(k) : base.pow(k).times(other));
+    Factorization found = ChainFactoring.factorization(chain, power);
+    assertTrue(
+        found.factors().stream().anyMatch(f -> f.base().equals(base) && f.multiplicity() == k),
+        () -> power + " -> " + found);
+    assertTrue(found.factors().size() <= 2, found::toString);
+  }
 }
