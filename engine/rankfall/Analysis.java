@@ -2,8 +2,6 @@ package rankfall;
 
 import java.util.List;
 import java.util.Optional;
-import java.util.OptionalInt;
-import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.exact.Factorization;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
@@ -347,77 +345,6 @@ public record Analysis(
     }
   }
 
-  /** How a polynomial compares with 0. */
-  public enum Comparison {
-    EQUAL("="),
-    UNEQUAL("!="),
-    GREATER(">"),
-    LESS("<"),
-    NOT_LESS(">="),
-    NOT_GREATER("<=");
-
-    private final String symbol;
-
-    Comparison(String symbol) {
-      this.symbol = symbol;
-    }
-
-    /** As it is written between two numbers. */
-    public String symbol() {
-      return symbol;
-    }
-
-    /**
-     * Whether a number of some sign compares so with 0.
-     *
-     * @param sign -1, 0 or 1
-     */
-    public boolean holds(int sign) {
-      return switch (this) {
-        case EQUAL -> sign == 0;
-        case UNEQUAL -> sign != 0;
-        case GREATER -> sign > 0;
-        case LESS -> sign < 0;
-        case NOT_LESS -> sign >= 0;
-        case NOT_GREATER -> sign <= 0;
-      };
-    }
-  }
-
-  /**
-   * A sign condition.
-   *
-   * @param polynomial primitive
-   * @param comparison with 0
-   */
-  public record SignCondition(Polynomial polynomial, Comparison comparison) {
-    /** The text of the condition: {@code b - c < 0}. */
-    @Override
-    public String toString() {
-      return polynomial + " " + comparison.symbol() + " 0";
-    }
-  }
-
-  /**
-   * A Lie algebra by name.
-   *
-   * @param name the preferred name, such as {@code so(3,1)}
-   * @param otherNames names that are as right, such as a Bianchi type; may be empty
-   * @param everywhere whether it is proved for all points of the region; else it is the algebra at
-   *     the witness
-   */
-  public record AlgebraType(String name, List<String> otherNames, boolean everywhere) {
-    /** Copies the list. */
-    public AlgebraType {
-      otherNames = List.copyOf(otherNames);
-    }
-
-    /** The name, with a note where it is known at the witness only. */
-    public String text() {
-      return everywhere ? name : "at the witness: " + name;
-    }
-  }
-
   /**
    * The brackets at the general point of a component, followed to the general point of a stratum.
    *
@@ -469,51 +396,4 @@ public record Analysis(
    */
   public record Unfollowed(List<StructureEntry> structure, String reason)
       implements ContractionOutcome {}
-
-  /**
-   * The default grid of a family, counted.
-   *
-   * @param axes the values of each name; the last one changes fastest
-   * @param counts how many points had which answer; in the order of strata and regions
-   * @param points for each point in order its place in the counts; empty for a grid of more than 20
-   *     000 points
-   */
-  public record ScanCounts(List<ScanAxis> axes, List<ScanCount> counts, List<Integer> points) {
-    /** Copies the lists. */
-    public ScanCounts {
-      axes = List.copyOf(axes);
-      counts = List.copyOf(counts);
-      points = List.copyOf(points);
-    }
-  }
-
-  /** The values of one name in a grid, at least one. */
-  public record ScanAxis(String name, List<BigFraction> values) {
-    /** Copies the list. */
-    public ScanAxis {
-      values = List.copyOf(values);
-    }
-  }
-
-  /**
-   * Points of a grid of which the same is said.
-   *
-   * @param status {@code ok}, {@code outside}, {@code pole}, {@code off} or {@code open}
-   * @param stratum its name; empty where there is no algebra, or strata are not known
-   * @param region its name; empty where the points lie in none
-   * @param dimension of the algebra; empty where there is none
-   * @param rank of its Killing form; empty where there is none
-   * @param signature of its Killing form, where there is one
-   * @param type the algebra, where known; else empty
-   * @param points how many
-   */
-  public record ScanCount(
-      String status,
-      String stratum,
-      String region,
-      OptionalInt dimension,
-      OptionalInt rank,
-      Optional<Signature> signature,
-      String type,
-      long points) {}
 }

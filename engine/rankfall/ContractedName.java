@@ -7,7 +7,6 @@ import java.util.Optional;
 import java.util.SortedMap;
 import java.util.TreeMap;
 import org.apache.commons.numbers.fraction.BigFraction;
-import rankfall.Analysis.AlgebraType;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Stratum;
 import rankfall.exact.Integers;

@@ -5,7 +5,6 @@ import java.util.List;
 import java.util.Optional;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
-import rankfall.Analysis.SignCondition;
 import rankfall.exact.Polynomial;
 import rankfall.exact.RationalFunction;
 

@@ -7,7 +7,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import rankfall.Analysis.Comparison;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Stratum;
 import rankfall.RegionMap.Kind;

@@ -6,7 +6,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.Set;
-import rankfall.Analysis.AlgebraType;
 import rankfall.identify.AlgebraNames;
 import rankfall.identify.ExactAlgebra;
 import rankfall.identify.TypeLoci;

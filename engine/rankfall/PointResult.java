@@ -64,7 +64,7 @@ public sealed interface PointResult {
       boolean reductive,
       boolean compact,
       Optional<String> stratum,
-      Optional<Analysis.AlgebraType> type)
+      Optional<AlgebraType> type)
       implements PointResult {
     /** Copies the lists and the map. */
     public Facts {

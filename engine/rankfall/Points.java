@@ -208,7 +208,7 @@ public final class Points {
         f.reductive(),
         f.compact(),
         strata.of(point),
-        name.map(n -> new Analysis.AlgebraType(n.name(), n.otherNames(), true)));
+        name.map(n -> new AlgebraType(n.name(), n.otherNames(), true)));
   }
 
   private PointResult failure(Map<String, BigFraction> point, OptionalInt dimension, String error) {

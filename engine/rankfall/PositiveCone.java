@@ -3,8 +3,6 @@ package rankfall;
 import java.util.ArrayList;
 import java.util.List;
 import java.util.Optional;
-import rankfall.Analysis.Comparison;
-import rankfall.Analysis.SignCondition;
 import rankfall.Forms.Positivity;
 import rankfall.exact.Chain;
 import rankfall.exact.ChainFactoring;

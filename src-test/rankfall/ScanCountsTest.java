@@ -10,8 +10,6 @@ import java.util.List;
 import java.util.Map;
 import java.util.TreeMap;
 import org.junit.jupiter.api.Test;
-import rankfall.Analysis.ScanCount;
-import rankfall.Analysis.ScanCounts;
 import rankfall.spec.Spec;
 import rankfall.spec.SpecException;
 import rankfall.spec.SpecReader;

@@ -8,14 +8,14 @@ import java.util.Locale;
 import java.util.stream.Collectors;
 import org.apache.commons.csv.CSVFormat;
 import org.apache.commons.csv.CSVPrinter;
-import rankfall.Analysis.AlgebraType;
+import rankfall.AlgebraType;
 import rankfall.Analysis.Component;
 import rankfall.Analysis.Condition;
 import rankfall.Analysis.Coordinate;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.RealPoints;
-import rankfall.Analysis.SignCondition;
+import rankfall.SignCondition;
 import rankfall.exact.Polynomial;
 
 /**

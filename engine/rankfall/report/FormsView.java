@@ -14,6 +14,7 @@ import rankfall.Forms.InvariantForms;
 import rankfall.Forms.Roots;
 import rankfall.Forms.TorusForm;
 import rankfall.Forms.WithoutRoots;
+import rankfall.SignCondition;
 import rankfall.exact.RationalFunction;
 import rankfall.spec.Spec;
 
@@ -154,7 +155,7 @@ record FormsView(
           roots(t));
     }
 
-    private SafeString condition(Analysis.SignCondition c) {
+    private SafeString condition(SignCondition c) {
       return math(formulas.formulas().text(c.toString()));
     }
 

@@ -8,7 +8,6 @@ import java.util.Locale;
 import java.util.Optional;
 import rankfall.Analysis.MatrixEntry;
 import rankfall.Analysis.Quotient;
-import rankfall.Analysis.SignCondition;
 import rankfall.Forms.Angle;
 import rankfall.Forms.Casimir;
 import rankfall.Forms.Covector;
@@ -21,6 +20,7 @@ import rankfall.Forms.Roots;
 import rankfall.Forms.TorusForm;
 import rankfall.Forms.UnitVector;
 import rankfall.Forms.WithoutRoots;
+import rankfall.SignCondition;
 
 /** Torus, Casimir element and invariant forms as parts of {@code result.json}. */
 final class JsonForms {

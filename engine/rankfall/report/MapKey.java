@@ -5,7 +5,7 @@ import java.util.Comparator;
 import java.util.List;
 import java.util.Optional;
 import java.util.stream.Stream;
-import rankfall.Analysis.AlgebraType;
+import rankfall.AlgebraType;
 import rankfall.Analysis.Findings;
 import rankfall.Analysis.Region;
 import rankfall.Analysis.Stratum;

@@ -5,7 +5,7 @@ import java.util.Collections;
 import java.util.List;
 import java.util.stream.Collectors;
 import org.apache.commons.csv.CSVFormat;
-import rankfall.Analysis.AlgebraType;
+import rankfall.AlgebraType;
 import rankfall.Analysis.Signature;
 import rankfall.PointResult;
 

@@ -11,7 +11,7 @@ import com.fasterxml.jackson.databind.node.ObjectNode;
 import java.io.UncheckedIOException;
 import java.util.List;
 import java.util.Optional;
-import rankfall.Analysis.AlgebraType;
+import rankfall.AlgebraType;
 import rankfall.Analysis.Signature;
 import rankfall.PointResult;
 

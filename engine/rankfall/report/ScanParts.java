@@ -8,11 +8,11 @@ import java.util.Optional;
 import java.util.OptionalInt;
 import java.util.stream.Collectors;
 import rankfall.Analysis.Findings;
-import rankfall.Analysis.ScanAxis;
-import rankfall.Analysis.ScanCount;
-import rankfall.Analysis.ScanCounts;
 import rankfall.RegionMap.Kind;
 import rankfall.RegionMap.Place;
+import rankfall.ScanAxis;
+import rankfall.ScanCount;
+import rankfall.ScanCounts;
 import rankfall.exact.Rationals;
 
 /** What the page shows of the default grid, piece by piece. */

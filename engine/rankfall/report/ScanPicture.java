@@ -6,8 +6,8 @@ import java.util.Locale;
 import java.util.Map;
 import java.util.TreeMap;
 import org.apache.commons.numbers.fraction.BigFraction;
-import rankfall.Analysis.ScanAxis;
-import rankfall.Analysis.ScanCounts;
+import rankfall.ScanAxis;
+import rankfall.ScanCounts;
 import rankfall.exact.Rationals;
 
 /** Draws a grid over two names as coloured cells, one a point. */

@@ -6,12 +6,12 @@ import java.util.List;
 import java.util.Map;
 import java.util.Optional;
 import java.util.OptionalInt;
-import rankfall.Analysis.AlgebraType;
-import rankfall.Analysis.Comparison;
+import rankfall.AlgebraType;
 import rankfall.Analysis.Region;
-import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Signature;
 import rankfall.Analysis.Stratum;
+import rankfall.Comparison;
+import rankfall.SignCondition;
 import rankfall.exact.Polynomial;
 import rankfall.scan.Finding.Status;
 

@@ -8,6 +8,7 @@ import org.apache.commons.numbers.fraction.BigFraction;
 import rankfall.Analysis;
 import rankfall.PointResult;
 import rankfall.Points;
+import rankfall.SignCondition;
 import rankfall.exact.Polynomial;
 import rankfall.spec.SpecException;
 
@@ -35,9 +36,7 @@ record RegionRows(Analysed family) {
   }
 
   static String conditions(Analysis.Region r) {
-    return r.conditions().stream()
-        .map(Analysis.SignCondition::toString)
-        .collect(Collectors.joining("; "));
+    return r.conditions().stream().map(SignCondition::toString).collect(Collectors.joining("; "));
   }
 
   static String signature(Analysis.Signature s) {
@@ -64,7 +63,7 @@ record RegionRows(Analysed family) {
   /** Whether some polynomial of a row vanishes at a rational point. */
   static boolean isOnBorder(Analysis.Region r, List<BigFraction> point) {
     return r.conditions().stream()
-        .map(Analysis.SignCondition::polynomial)
+        .map(SignCondition::polynomial)
         .map((Polynomial p) -> p.at(point).signum())
         .anyMatch(s -> s == 0);
   }

@@ -15,6 +15,7 @@ import org.junit.jupiter.api.Test;
 import org.junit.jupiter.params.ParameterizedTest;
 import org.junit.jupiter.params.provider.CsvSource;
 import rankfall.Analysis;
+import rankfall.Comparison;
 import rankfall.PointResult;
 
 class RegionsTest {
@@ -244,7 +245,7 @@ class RegionsTest {
     for (Analysis.Region r : first) {
       assertEquals(11, r.conditions().size(), "no condition may be dropped");
       long negative =
-          r.conditions().stream().filter(c -> c.comparison() == Analysis.Comparison.LESS).count();
+          r.conditions().stream().filter(c -> c.comparison() == Comparison.LESS).count();
       assertEquals(negative % 2 == 0 ? 0 : 2, r.signature().plus());
     }
   }

@@ -19,10 +19,10 @@ import org.apache.commons.numbers.fraction.BigFraction;
 import org.junit.jupiter.api.Test;
 import org.junit.jupiter.api.io.TempDir;
 import rankfall.Analysis;
-import rankfall.Analysis.ScanAxis;
-import rankfall.Analysis.ScanCount;
-import rankfall.Analysis.ScanCounts;
 import rankfall.Analysis.Signature;
+import rankfall.ScanAxis;
+import rankfall.ScanCount;
+import rankfall.ScanCounts;
 
 /** A default grid in every form of the report. */
 final class ScanReportTest {

@@ -11,11 +11,11 @@ import java.util.Optional;
 import java.util.Set;
 import org.apache.commons.numbers.fraction.BigFraction;
 import org.junit.jupiter.api.Test;
-import rankfall.Analysis.AlgebraType;
-import rankfall.Analysis.Comparison;
+import rankfall.AlgebraType;
 import rankfall.Analysis.Region;
-import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Stratum;
+import rankfall.Comparison;
+import rankfall.SignCondition;
 import rankfall.exact.Polynomial;
 import rankfall.scan.Finding.Status;
 

@@ -5,12 +5,12 @@ import java.util.Optional;
 import java.util.OptionalDouble;
 import java.util.OptionalInt;
 import java.util.Set;
-import rankfall.Analysis.Comparison;
 import rankfall.Analysis.RealPoints;
 import rankfall.Analysis.Region;
-import rankfall.Analysis.SignCondition;
 import rankfall.Analysis.Signature;
 import rankfall.Analysis.Stratum;
+import rankfall.Comparison;
+import rankfall.SignCondition;
 import rankfall.exact.Polynomial;
 import rankfall.exact.Variables;
 
